@@ -1,0 +1,86 @@
+// Beams: a span, a constant flexural rigidity, and how each end is held.
+#pragma once
+
+#include <sagitta/detail/expect.hpp>
+#include <sagitta/detail/influence.hpp>
+#include <sagitta/detail/refuse.hpp>
+#include <sagitta/ends.hpp>
+#include <sagitta/units.hpp>
+
+namespace sagitta {
+
+template <class Beam, class Loads>
+class elastic_line;
+
+/// A prismatic beam of one span. Left and Right are ways to hold an end (held::fixed, held::pinned, held::free).
+template <class Left, class Right, class T = double>
+class beam {
+public:
+    static_assert(detail::stable_ends<Left, Right>,
+                  "sagitta: a beam held like this is a mechanism; it needs a clamped end or two supports");
+
+    using number = T;
+    using left_type = Left;
+    using right_type = Right;
+
+    /// Throws invalid_input unless the span and EI are greater than 0 and finite.
+    constexpr beam(const quantity<length, T>& span, const quantity<flexural_rigidity, T>& EI) : span_(span), EI_(EI) {
+        if (!(span.value() > T(0)) || !detail::is_finite(span.value())) [[unlikely]]
+            detail::refuse("span", span, "must be greater than 0 m and finite");
+        if (!(EI.value() > T(0)) || !detail::is_finite(EI.value())) [[unlikely]]
+            detail::refuse("EI", EI, "must be greater than 0 N*m^2 and finite");
+    }
+
+    [[nodiscard]] constexpr const quantity<length, T>& span() const { return span_; }
+    [[nodiscard]] constexpr const quantity<flexural_rigidity, T>& EI() const { return EI_; }
+
+    /// The elastic line under a load case, a composition of load cases or a load_list (elastic_line.hpp).
+    template <class Loads>
+    [[nodiscard]] constexpr auto under(const Loads& loads) const {
+        return elastic_line<beam, Loads>(*this, loads);
+    }
+
+private:
+    quantity<length, T> span_;
+    quantity<flexural_rigidity, T> EI_;
+};
+
+/// A beam from the ways its two ends are held, left then right: beam_with_ends<held::pinned, held::fixed>(L, EI).
+/// L is a length, EI a flexural rigidity.
+template <class Left, class Right, class L, class K>
+[[nodiscard]] constexpr auto beam_with_ends(const L& span, const K& EI) {
+    using T = detail::common_number<L, K>;
+    return beam<Left, Right, T>(detail::expect_length<T>(span), detail::expect_rigidity<T>(EI));
+}
+
+/// Supported at both ends, free to rotate there.
+template <class L, class K>
+[[nodiscard]] constexpr auto simple_beam(const L& span, const K& EI) {
+    return beam_with_ends<held::pinned, held::pinned>(span, EI);
+}
+
+/// Clamped at the left end, free at the right.
+template <class L, class K>
+[[nodiscard]] constexpr auto cantilever(const L& span, const K& EI) {
+    return beam_with_ends<held::fixed, held::free>(span, EI);
+}
+
+/// Clamped at the left end, supported at the right.
+template <class L, class K>
+[[nodiscard]] constexpr auto propped_cantilever(const L& span, const K& EI) {
+    return beam_with_ends<held::fixed, held::pinned>(span, EI);
+}
+
+/// Clamped at both ends.
+template <class L, class K>
+[[nodiscard]] constexpr auto fixed_beam(const L& span, const K& EI) {
+    return beam_with_ends<held::fixed, held::fixed>(span, EI);
+}
+
+/// The same beam with its ends exchanged.
+template <class Left, class Right, class T>
+[[nodiscard]] constexpr beam<Right, Left, T> mirrored(const beam<Left, Right, T>& b) {
+    return {b.span(), b.EI()};
+}
+
+}  // namespace sagitta

@@ -1,0 +1,14 @@
+// Everything but presentation: floors 0 to 5, which need Boost headers only.
+#pragma once
+
+#include <sagitta/beam.hpp>
+#include <sagitta/cross_check.hpp>
+#include <sagitta/elastic_line.hpp>
+#include <sagitta/ends.hpp>
+#include <sagitta/extremes.hpp>
+#include <sagitta/invalid_input.hpp>
+#include <sagitta/load.hpp>
+#include <sagitta/load_list.hpp>
+#include <sagitta/moment_area.hpp>
+#include <sagitta/units.hpp>
+#include <sagitta/version.hpp>

@@ -1,0 +1,76 @@
+// The loads of a beam as plain numbers in coherent SI, for the integrator: what acts where, and how the ends
+// are moved. No shape is known here.
+#pragma once
+
+#include <sagitta/load.hpp>
+#include <sagitta/load_list.hpp>
+
+#include <cstddef>
+#include <type_traits>
+#include <variant>
+#include <vector>
+
+namespace sagitta::detail {
+
+enum class acting_kind { point_force, couple, line };
+
+/// A force or couple at from = to, or a line load from size_from to size_to.
+template <class T>
+struct acting_load {
+    acting_kind kind;
+    T from, to;
+    T size_from, size_to;
+
+    /// The line load at the distance u behind its start.
+    constexpr T intensity(const T& u) const { return size_from + (size_to - size_from) * (u / (to - from)); }
+    constexpr T centre() const { return (from + to) / T(2); }
+};
+
+/// Everything that acts on a beam of span L.
+template <class T>
+struct acting_loads {
+    std::vector<acting_load<T>> loads;
+    T settlement_left{}, settlement_right{};
+    T rotation_left{}, rotation_right{};
+
+    template <class Loads>
+    acting_loads(const Loads& all, const T& L) {
+        if constexpr (loads::load_expression<Loads>) {
+            std::apply([&](const auto&... single) { (add(single, L), ...); }, loads::cases_of(all));
+        } else {
+            loads.reserve(all.cases().size());
+            for (const auto& any : all.cases()) std::visit([&](const auto& single) { add(single, L); }, any);
+        }
+    }
+
+private:
+    template <loads::action Action, class N>
+    void add(const loads::concentrated<Action, N>& load, const T&) {
+        const T a = static_cast<T>(load.at().value());
+        const T size = static_cast<T>(load.size().value());
+        loads.push_back({load.is_couple ? acting_kind::couple : acting_kind::point_force, a, a, size, size});
+    }
+
+    template <class Load>
+    requires requires { typename Load::where_type; }
+    void add(const Load& load, const T& L) {
+        T from(0);
+        T to = L;
+        if constexpr (requires { load.where().from; }) {
+            from = static_cast<T>(load.where().from.value());
+            to = static_cast<T>(load.where().to.value());
+        }
+        loads.push_back({acting_kind::line, from, to, static_cast<T>(load.size_from().value()),
+                         static_cast<T>(load.size_to().value())});
+    }
+
+    template <class End, loads::motion Motion, class N>
+    void add(const loads::movement<End, Motion, N>& movement, const T&) {
+        constexpr bool is_left = std::is_same_v<End, end::left_end>;
+        T& total = movement.is_rotation ? (is_left ? rotation_left : rotation_right)
+                                        : (is_left ? settlement_left : settlement_right);
+        total += static_cast<T>(movement.size().value());
+    }
+};
+
+}  // namespace sagitta::detail

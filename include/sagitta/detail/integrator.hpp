@@ -1,0 +1,271 @@
+// The moment-area integrator in plain numbers (coherent SI). It knows the loads and the supports of a beam and
+// no shape: shear and moment by equilibrium, redundants by numerical flexibility coefficients, slope and
+// deflection by integrating M/EI.
+#pragma once
+
+#include <sagitta/detail/acting_loads.hpp>
+#include <sagitta/detail/statics.hpp>
+#include <sagitta/ends.hpp>
+
+#include <boost/math/quadrature/gauss.hpp>
+
+#include <algorithm>
+#include <cstddef>
+#include <iterator>
+#include <type_traits>
+#include <vector>
+
+namespace sagitta::detail {
+
+/// The moments of the curvature diagram over one panel: all that both moment-area theorems need.
+template <class T>
+struct panel_moments {
+    T area{};        // integral of curvature
+    T about_from{};  // integral of curvature times the distance from the start
+    T about_to{};    // integral of curvature times the distance from the end
+};
+
+template <class T, std::size_t points, class Curvature>
+panel_moments<T> integrate_panel(const T& from, const T& to, const Curvature& curvature) {
+    using rule = boost::math::quadrature::gauss<T, points>;
+    const T half = (to - from) / T(2);
+    panel_moments<T> sum;
+    const auto add = [&](const T& offset, const T& weight) {
+        const T passed = half * (T(1) + offset);
+        const T part = weight * half * curvature(section<T>{from, passed});
+        sum.area += part;
+        sum.about_from += part * passed;
+        sum.about_to += part * half * (T(1) - offset);
+    };
+    const auto& offsets = rule::abscissa();
+    const auto& weights = rule::weights();
+    for (std::size_t i = 0; i < offsets.size(); ++i) {
+        add(offsets[i], weights[i]);
+        if (offsets[i] != T(0)) add(-offsets[i], weights[i]);
+    }
+    return sum;
+}
+
+template <class T>
+struct slope_and_deflection {
+    T slope{};
+    T deflection{};
+};
+
+/// A beam of span L under loads. Rigidity is EI: a number of type T, or a function from x to one.
+/// Prismatic beams are exact up to rounding, since the Gauss rule integrates their polynomials exactly; others
+/// where EI is smooth between the given steps and varies gently over an eighth of the way between joints.
+template <class Left, class Right, class T, class Rigidity>
+class integrator {
+    static constexpr bool is_prismatic = std::is_same_v<Rigidity, T>;
+    static constexpr std::size_t points = is_prismatic ? 3 : 20;
+    static constexpr int panels_between_joints = is_prismatic ? 3 : 8;
+
+public:
+    using section = detail::section<T>;
+
+    integrator(const T& span, const acting_loads<T>& acting, const Rigidity& rigidity, const std::vector<T>& steps = {})
+        : L_(span), EI_(rigidity) {
+        balanced_.reserve(acting.loads.size());
+        for (const auto& load : acting.loads) {
+            balanced_.emplace_back(load, carrier_of<Left, Right>(load, L_), L_);
+        }
+        make_panels(acting, steps);
+        solve_redundants(acting);
+        march(acting);
+    }
+
+    [[nodiscard]] const T& span() const { return L_; }
+
+    /// Shear and moment, just left or just right of the section where they jump.
+    [[nodiscard]] shear_and_moment<T> statics_at(const section& x, side which) const {
+        shear_and_moment<T> sum{(redundant_right_ - redundant_left_) / L_,
+                                redundant_left_ * (x.ahead_of(L_) / L_) + redundant_right_ * (x.x() / L_)};
+        for (const auto& load : balanced_) {
+            const auto part = load.at(x, which);
+            sum.shear += part.shear;
+            sum.moment += part.moment;
+        }
+        return sum;
+    }
+
+    [[nodiscard]] slope_and_deflection<T> state_at(const T& x) const {
+        const panel& p = panel_of(x);
+        if (x == p.from) return p.at_from;
+        if (x == p.to) return p.at_to;
+        if constexpr (Left::against_deflection) {
+            return forward(p.at_from, x - p.from, bending(p.from, x));
+        } else {
+            return backward(p.at_to, p.to - x, bending(x, p.to));
+        }
+    }
+
+    /// Moments of the curvature about both ends of a stretch that may cross panels.
+    [[nodiscard]] panel_moments<T> curvature_between(const T& a, const T& b) const {
+        panel_moments<T> sum;
+        for (const auto& p : panels_) {
+            const T from = std::max(a, p.from);
+            const T to = std::min(b, p.to);
+            if (!(from < to)) continue;
+            const bool is_whole = from == p.from && to == p.to;
+            const auto part = is_whole ? p.curvature : bending(from, to);
+            sum.area += part.area;
+            sum.about_from += part.about_from + part.area * (from - a);
+            sum.about_to += part.about_to + part.area * (b - to);
+        }
+        return sum;
+    }
+
+    /// The places that bound the panels of integration, ascending: ends, bounds of loads, steps, points between.
+    [[nodiscard]] std::vector<T> panel_bounds() const {
+        std::vector<T> bounds;
+        bounds.reserve(panels_.size() + 1);
+        for (const auto& p : panels_) bounds.push_back(p.from);
+        bounds.push_back(L_);
+        return bounds;
+    }
+
+private:
+    /// The moments of clamped ends are redundant where both ends carry the beam.
+    static constexpr bool carried_by_both = Left::against_deflection && Right::against_deflection;
+    static constexpr bool left_redundant = carried_by_both && Left::against_rotation;
+    static constexpr bool right_redundant = carried_by_both && Right::against_rotation;
+
+    using deflected = slope_and_deflection<T>;
+
+    struct panel {
+        T from, to;
+        panel_moments<T> curvature{};
+        deflected at_from{}, at_to{};
+    };
+
+    T EI_at(const T& x) const {
+        if constexpr (is_prismatic) {
+            return EI_;
+        } else {
+            return EI_(x);
+        }
+    }
+
+    template <class Curvature>
+    static panel_moments<T> integrate(const T& from, const T& to, const Curvature& curvature) {
+        return integrate_panel<T, points>(from, to, curvature);
+    }
+
+    /// M/EI between two places of one panel.
+    panel_moments<T> bending(const T& from, const T& to) const {
+        return integrate(from, to, [&](const section& x) { return statics_at(x, just_right).moment / EI_at(x.x()); });
+    }
+
+    void make_panels(const acting_loads<T>& acting, const std::vector<T>& steps) {
+        std::vector<T> joints{T(0), L_};
+        joints.reserve(2 + 2 * acting.loads.size() + steps.size());
+        for (const auto& load : acting.loads) {
+            joints.push_back(load.from);
+            joints.push_back(load.to);
+        }
+        joints.insert(joints.end(), steps.begin(), steps.end());
+        std::sort(joints.begin(), joints.end());
+        joints.erase(std::unique(joints.begin(), joints.end()), joints.end());
+        panels_.reserve(joints.size() * panels_between_joints);
+        for (std::size_t i = 1; i < joints.size(); ++i) {
+            const T width = (joints[i] - joints[i - 1]) / T(panels_between_joints);
+            T from = joints[i - 1];
+            for (int k = 1; k < panels_between_joints; ++k) {
+                const T to = joints[i - 1] + T(k) * width;
+                panels_.push_back({from, to});
+                from = to;
+            }
+            panels_.push_back({from, joints[i]});
+        }
+    }
+
+    /// The integral over the beam of a curvature times a moment that varies linearly from end to end: the
+    /// virtual work of one in the other.
+    template <class Moments>
+    T work(const Moments& moments_of, const T& left, const T& right) const {
+        T sum(0);
+        for (const auto& p : panels_) {
+            const auto& c = moments_of(p);
+            sum +=
+                c.area * (left * ((L_ - p.from) / L_) + right * (p.from / L_)) + c.about_from * ((right - left) / L_);
+        }
+        return sum;
+    }
+
+    /// Compatibility at clamped ends. The virtual moment that falls linearly from 1 at one end to 0 at the
+    /// other does on the curvature the work (slope of that end) - (slope of the chord).
+    void solve_redundants(const acting_loads<T>& acting) {
+        for (auto& p : panels_) p.curvature = bending(p.from, p.to);
+        if constexpr (left_redundant || right_redundant) {
+            const auto of_panel = [](const panel& p) -> const panel_moments<T>& { return p.curvature; };
+            const auto unit_left = [&](const panel& p) {
+                return integrate(p.from, p.to, [&](const section& x) { return x.ahead_of(L_) / L_ / EI_at(x.x()); });
+            };
+            const auto unit_right = [&](const panel& p) {
+                return integrate(p.from, p.to, [&](const section& x) { return x.x() / L_ / EI_at(x.x()); });
+            };
+            const T chord = (acting.settlement_right - acting.settlement_left) / L_;
+            const T gap_left = acting.rotation_left - chord - work(of_panel, T(1), T(0));
+            const T gap_right = chord - acting.rotation_right - work(of_panel, T(0), T(1));
+            if constexpr (left_redundant && right_redundant) {
+                const T f_11 = work(unit_left, T(1), T(0));
+                const T f_12 = work(unit_left, T(0), T(1));
+                const T f_22 = work(unit_right, T(0), T(1));
+                const T determinant = f_11 * f_22 - f_12 * f_12;
+                redundant_left_ = (gap_left * f_22 - gap_right * f_12) / determinant;
+                redundant_right_ = (gap_right * f_11 - gap_left * f_12) / determinant;
+            } else if constexpr (left_redundant) {
+                redundant_left_ = gap_left / work(unit_left, T(1), T(0));
+            } else {
+                redundant_right_ = gap_right / work(unit_right, T(0), T(1));
+            }
+            for (auto& p : panels_) p.curvature = bending(p.from, p.to);
+        }
+    }
+
+    /// From an end whose deflection and slope are known to the other, panel by panel.
+    void march(const acting_loads<T>& acting) {
+        if constexpr (Left::against_deflection) {
+            deflected here{acting.rotation_left, acting.settlement_left};
+            if constexpr (!Left::against_rotation) {
+                const auto of_panel = [](const panel& p) -> const panel_moments<T>& { return p.curvature; };
+                here.slope = (acting.settlement_right - acting.settlement_left) / L_ + work(of_panel, T(1), T(0));
+            }
+            for (auto& p : panels_) {
+                p.at_from = here;
+                here = forward(here, p.to - p.from, p.curvature);
+                p.at_to = here;
+            }
+        } else {
+            deflected here{acting.rotation_right, acting.settlement_right};
+            for (std::size_t i = panels_.size(); i-- > 0;) {
+                auto& p = panels_[i];
+                p.at_to = here;
+                here = backward(here, p.to - p.from, p.curvature);
+                p.at_from = here;
+            }
+        }
+    }
+
+    static deflected forward(const deflected& start, const T& width, const panel_moments<T>& c) {
+        return {start.slope - c.area, start.deflection + start.slope * width - c.about_to};
+    }
+    static deflected backward(const deflected& stop, const T& width, const panel_moments<T>& c) {
+        return {stop.slope + c.area, stop.deflection - stop.slope * width - c.about_from};
+    }
+
+    const panel& panel_of(const T& x) const {
+        const auto after = std::upper_bound(panels_.begin(), panels_.end(), x,
+                                            [](const T& place, const panel& p) { return place < p.from; });
+        return *std::prev(after);
+    }
+
+    T L_;
+    Rigidity EI_;
+    std::vector<balanced_load<T>> balanced_;
+    std::vector<panel> panels_;
+    T redundant_left_{}, redundant_right_{};
+};
+
+}  // namespace sagitta::detail

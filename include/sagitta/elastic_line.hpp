@@ -1,0 +1,242 @@
+// The elastic line of a beam under loads: superposed closed forms for deflection, slope, moment and shear.
+#pragma once
+
+#include <sagitta/beam.hpp>
+#include <sagitta/detail/load_effect.hpp>
+#include <sagitta/load.hpp>
+#include <sagitta/load_list.hpp>
+
+#include <algorithm>
+#include <array>
+#include <cstddef>
+#include <tuple>
+#include <type_traits>
+#include <variant>
+#include <vector>
+
+namespace sagitta {
+namespace detail {
+
+/// The effects of loads known when compiling: a tuple, no allocation.
+template <class Beam, class Loads>
+class superposition;
+
+template <class Left, class Right, class N, loads::load_expression Loads>
+class superposition<beam<Left, Right, N>, Loads> {
+public:
+    using number = std::common_type_t<N, typename Loads::number>;
+    using beam_type = beam<Left, Right, number>;
+
+    constexpr superposition(const beam_type& b, const Loads& loads)
+        : effects_(std::apply([&](const auto&... single) { return effects(effect(single, b)...); },
+                              loads::cases_of(loads))) {}
+
+    template <class Sum, class Response>
+    constexpr Sum sum(const Response& response_of) const {
+        return std::apply([&](const auto&... single) { return (response_of(single) + ...); }, effects_);
+    }
+
+    /// The places where the elastic line changes its polynomial, both ends included, ascending.
+    constexpr auto joints(const beam_type& b) const {
+        return std::apply(
+            [&](const auto&... single) {
+                std::array<quantity<length, number>, 2 * sizeof...(single) + 2> places{
+                    quantity<length, number>{}, b.span(), single.start(b)..., single.stop(b)...};
+                std::sort(places.begin(), places.end());
+                return places;
+            },
+            effects_);
+    }
+
+private:
+    template <class L>
+    using effect_of = load_effect<L, Left, Right, number>;
+
+    template <class L>
+    static constexpr effect_of<L> effect(const L& single, const beam_type& b) {
+        if constexpr (requires { requires L::is_rotation; }) {
+            static_assert(can_act_on<L, Left, Right>,
+                          "sagitta: a support rotation needs a clamped end; this end turns freely");
+        } else {
+            static_assert(can_act_on<L, Left, Right>,
+                          "sagitta: a settlement needs an end that is held against deflection; this end is free");
+        }
+        return effect_of<L>(single, b);
+    }
+
+    template <class... L>
+    static std::tuple<effect_of<L>...> effects_of(const std::tuple<L...>&);
+    using effects = decltype(effects_of(loads::cases_of(std::declval<const Loads&>())));
+
+    effects effects_;
+};
+
+/// The effects of a load_list.
+template <class Left, class Right, class N, class M>
+class superposition<beam<Left, Right, N>, load_list<M>> {
+public:
+    using number = std::common_type_t<N, M>;
+    using beam_type = beam<Left, Right, number>;
+
+    superposition(const beam_type& b, const load_list<M>& list) {
+        effects_.reserve(list.cases().size());
+        for (const auto& any : list.cases()) {
+            std::visit([&](const auto& single) { add(single, b); }, any);
+        }
+    }
+
+    template <class Sum, class Response>
+    Sum sum(const Response& response_of) const {
+        Sum total{};
+        for (const auto& any : effects_) {
+            total += std::visit([&](const auto& single) { return response_of(single); }, any);
+        }
+        return total;
+    }
+
+    std::vector<quantity<length, number>> joints(const beam_type& b) const {
+        std::vector<quantity<length, number>> places{quantity<length, number>{}, b.span()};
+        for (const auto& any : effects_) {
+            std::visit(
+                [&](const auto& single) {
+                    places.push_back(single.start(b));
+                    places.push_back(single.stop(b));
+                },
+                any);
+        }
+        std::sort(places.begin(), places.end());
+        return places;
+    }
+
+private:
+    template <class L>
+    void add(const L& single, const beam_type& b) {
+        if constexpr (can_act_on<L, Left, Right>) {
+            effects_.emplace_back(load_effect<L, Left, Right, number>(single, b));
+        } else {
+            refuse(L::is_rotation ? "support_rotation" : "settlement", single.size(),
+                   L::is_rotation ? "needs a clamped end; this end turns freely"
+                                  : "needs an end that is held against deflection; this end is free");
+        }
+    }
+
+    template <class... L>
+    static std::variant<load_effect<L, Left, Right, number>...> any_effect_of(const std::variant<L...>&);
+    using any_effect = decltype(any_effect_of(std::declval<const loads::any_load<M>&>()));
+
+    std::vector<any_effect> effects_;
+};
+
+}  // namespace detail
+
+/// What beam.under(loads) returns. Every answer is a quantity in coherent SI.
+///
+/// Places x are lengths from the left end; invalid_input is thrown where x is not on the beam. Where a
+/// concentrated load stands, shear (force) or moment (couple) have two values: side says which is meant. By
+/// default it is the value just right of x, at the right end of the beam the one just left of it, so that both
+/// ends answer for the beam itself. At an end, the other side of it answers for the support.
+///
+/// Accuracy in double: within 1e-13 of the greatest value of the same response in the same beam for each load
+/// case; errors of superposed cases add.
+template <class Left, class Right, class N, class Loads>
+class elastic_line<beam<Left, Right, N>, Loads> {
+    using superposed = detail::superposition<beam<Left, Right, N>, Loads>;
+    using response = detail::response;
+
+public:
+    using number = typename superposed::number;
+    using beam_type = beam<Left, Right, number>;
+
+    constexpr elastic_line(const beam<Left, Right, N>& b, const Loads& loads)
+        : beam_(detail::coherent<length, number>(b.span()), detail::coherent<flexural_rigidity, number>(b.EI())),
+          loads_(loads),
+          superposed_(beam_, loads) {}
+
+    /// Deflection, downward positive (a length).
+    template <class X>
+    [[nodiscard]] constexpr quantity<length, number> deflection(const X& x) const {
+        return answer<response::deflection>(on_beam(x), just_right);
+    }
+    /// Slope dv/dx, clockwise positive (a plane angle).
+    template <class X>
+    [[nodiscard]] constexpr quantity<plane_angle, number> slope(const X& x) const {
+        return answer<response::slope>(on_beam(x), just_right);
+    }
+    /// Bending moment, sagging positive (force times length).
+    template <class X>
+    [[nodiscard]] constexpr quantity<moment, number> moment(const X& x) const {
+        const auto place = on_beam(x);
+        return answer<response::moment>(place, inner_side(place));
+    }
+    template <class X>
+    [[nodiscard]] constexpr quantity<sagitta::moment, number> moment(const X& x, side which) const {
+        return answer<response::moment>(on_beam(x), which);
+    }
+    /// Shear force V = dM/dx.
+    template <class X>
+    [[nodiscard]] constexpr quantity<force, number> shear(const X& x) const {
+        const auto place = on_beam(x);
+        return answer<response::shear>(place, inner_side(place));
+    }
+    template <class X>
+    [[nodiscard]] constexpr quantity<force, number> shear(const X& x, side which) const {
+        return answer<response::shear>(on_beam(x), which);
+    }
+    /// The line load at x, downward positive (force per length).
+    template <class X>
+    [[nodiscard]] constexpr quantity<line_load, number> load(const X& x, side which = just_right) const {
+        const auto place = on_beam(x);
+        return superposed_.template sum<quantity<line_load, number>>(
+            [&](const auto& effect) { return effect.intensity(place, beam_, which); });
+    }
+
+    /// The force that the support at an end exerts on the beam, upward positive; 0 at a free end. Loads that
+    /// stand right at the support are part of it.
+    [[nodiscard]] constexpr quantity<force, number> reaction(end::left_end) const {
+        return answer<response::shear>({}, just_left);
+    }
+    [[nodiscard]] constexpr quantity<force, number> reaction(end::right_end) const {
+        return -answer<response::shear>(beam_.span(), just_right);
+    }
+
+    /// The bending moment at the support of an end, sagging positive; 0 unless the end is clamped. A couple
+    /// that stands right at the support lies between this value and the beam's own.
+    [[nodiscard]] constexpr quantity<sagitta::moment, number> end_moment(end::left_end) const {
+        return answer<response::moment>({}, just_left);
+    }
+    [[nodiscard]] constexpr quantity<sagitta::moment, number> end_moment(end::right_end) const {
+        return answer<response::moment>(beam_.span(), just_right);
+    }
+
+    [[nodiscard]] constexpr const beam_type& supported() const { return beam_; }
+    [[nodiscard]] constexpr const Loads& loads() const { return loads_; }
+
+    /// The places where the elastic line passes from one polynomial to the next, both ends included, ascending
+    /// and possibly repeated (an array, or a vector where the loads are a load_list).
+    [[nodiscard]] constexpr auto joints() const { return superposed_.joints(beam_); }
+
+private:
+    template <class X>
+    constexpr quantity<length, number> on_beam(const X& x) const {
+        const auto place = detail::expect_length<number>(x);
+        if (!(place.value() >= number(0) && place <= beam_.span())) [[unlikely]]
+            detail::refuse("x", place, "must lie on the beam, from 0 m to ", beam_.span());
+        return place;
+    }
+
+    constexpr side inner_side(const quantity<length, number>& x) const {
+        return x < beam_.span() ? just_right : just_left;
+    }
+
+    template <response R>
+    constexpr detail::response_quantity<R, number> answer(const quantity<length, number>& x, side which) const {
+        return superposed_.template sum<detail::response_quantity<R, number>>(
+            [&](const auto& effect) { return effect.template at<R>(x, beam_, which); });
+    }
+
+    beam_type beam_;
+    Loads loads_;
+    superposed superposed_;
+};
+
+}  // namespace sagitta

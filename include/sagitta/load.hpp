@@ -1,0 +1,172 @@
+// Load cases and their vector space.
+//
+// point_load, applied_couple, uniform_load, partial_uniform_load, linear_load, settlement and support_rotation
+// make load cases; + - * / compose them. A composition whose length is known when compiling allocates nothing
+// and is constexpr; load_list (load_list.hpp) grows at run time.
+#pragma once
+
+#include <sagitta/detail/expect.hpp>
+#include <sagitta/detail/load_case.hpp>
+#include <sagitta/detail/refuse.hpp>
+#include <sagitta/ends.hpp>
+#include <sagitta/units.hpp>
+
+#include <tuple>
+#include <type_traits>
+
+namespace sagitta {
+namespace loads {
+
+template <load_expression A, load_expression B>
+[[nodiscard]] constexpr auto operator+(const A& a, const B& b) {
+    return std::apply([](const auto&... c) { return load_sum(std::tuple<std::remove_cvref_t<decltype(c)>...>(c...)); },
+                      std::tuple_cat(cases_of(a), cases_of(b)));
+}
+
+template <load_expression L, detail::number_type N>
+[[nodiscard]] constexpr L operator*(const L& load, const N& factor) {
+    detail::require_load_factor(factor);
+    return load.scaled(static_cast<typename L::number>(factor));
+}
+template <load_expression L, detail::number_type N>
+[[nodiscard]] constexpr L operator*(const N& factor, const L& load) {
+    return load * factor;
+}
+template <load_expression L, detail::number_type N>
+[[nodiscard]] constexpr L operator/(const L& load, const N& divisor) {
+    return load * (typename L::number(1) / static_cast<typename L::number>(divisor));
+}
+template <load_expression L>
+[[nodiscard]] constexpr L operator-(const L& load) {
+    return load.scaled(typename L::number(-1));
+}
+template <load_expression A, load_expression B>
+[[nodiscard]] constexpr auto operator-(const A& a, const B& b) {
+    return a + (-b);
+}
+
+}  // namespace loads
+
+/// A place for a concentrated load: its distance from the left end (a length, not negative).
+template <class X>
+[[nodiscard]] constexpr auto at(const X& x) {
+    using T = detail::common_number<X>;
+    const auto place = detail::expect_length<T>(x);
+    if (!(place.value() >= T(0)) || !detail::is_finite(place.value())) [[unlikely]]
+        detail::refuse("at", place, "must be a finite distance from the left end, not less than 0 m");
+    return loads::position<T>{place};
+}
+
+/// A stretch for a line load: two distances from the left end (lengths, not negative, from < to).
+template <class From, class To>
+[[nodiscard]] constexpr auto between(const From& from, const To& to) {
+    using T = detail::common_number<From, To>;
+    const auto start = detail::expect_length<T>(from);
+    const auto stop = detail::expect_length<T>(to);
+    if (!(start.value() >= T(0)) || !detail::is_finite(start.value())) [[unlikely]]
+        detail::refuse("between: from", start, "must be a finite distance from the left end, not less than 0 m");
+    if (!(start.value() < stop.value()) || !detail::is_finite(stop.value())) [[unlikely]]
+        detail::refuse("between: to", stop, "must be a finite distance from the left end, greater than from = ", start);
+    return loads::stretch<T>{start, stop};
+}
+
+namespace detail {
+
+template <class P>
+struct number_of_place {
+    using type = double;
+};
+template <class T>
+struct number_of_place<loads::position<T>> {
+    using type = T;
+};
+template <class T>
+struct number_of_place<loads::stretch<T>> {
+    using type = T;
+};
+
+template <class T, class P>
+constexpr loads::position<T> expect_position([[maybe_unused]] const P& place) {
+    constexpr bool right = requires { place.x; };
+    static_assert(right, "sagitta: a place on the beam is expected here: write at(3.0*m)");
+    if constexpr (right) {
+        return {coherent<length, T>(place.x)};
+    } else {
+        return {};
+    }
+}
+
+template <class T, class P>
+constexpr auto expect_stretch(const P& place) {
+    constexpr bool right = requires { place.from, place.to; };
+    static_assert(right, "sagitta: a stretch of the beam is expected here: write between(1.2*m, 4.8*m)");
+    if constexpr (right) {
+        return loads::stretch<T>{coherent<length, T>(place.from), coherent<length, T>(place.to)};
+    } else {
+        return loads::stretch<T>{};
+    }
+}
+
+}  // namespace detail
+
+/// A concentrated force P (a force, downward positive) at a place: point_load(22.0*kN, at(3.0*m)).
+template <class F, class P>
+[[nodiscard]] constexpr auto point_load(const F& size, const P& place) {
+    using T = std::common_type_t<detail::common_number<F>, typename detail::number_of_place<P>::type>;
+    return loads::concentrated<loads::action::point_force, T>(detail::expect_force<T>(size),
+                                                              detail::expect_position<T>(place));
+}
+
+/// A concentrated couple (force times length, clockwise positive) at a place: applied_couple(8.0*kN*m, at(7.2*m)).
+template <class C, class P>
+[[nodiscard]] constexpr auto applied_couple(const C& size, const P& place) {
+    using T = std::common_type_t<detail::common_number<C>, typename detail::number_of_place<P>::type>;
+    return loads::concentrated<loads::action::couple, T>(detail::expect_moment<T>(size),
+                                                         detail::expect_position<T>(place));
+}
+
+/// A line load w (force per length, downward positive) over the whole beam.
+template <class W>
+[[nodiscard]] constexpr auto uniform_load(const W& size) {
+    using T = detail::common_number<W>;
+    return loads::uniform<T, loads::whole_beam>(detail::expect_line_load<T>(size), {});
+}
+
+/// A line load w over a stretch: partial_uniform_load(9.0*kN/m, between(1.2*m, 4.8*m)).
+template <class W, class S>
+[[nodiscard]] constexpr auto partial_uniform_load(const W& size, const S& where) {
+    using T = std::common_type_t<detail::common_number<W>, typename detail::number_of_place<S>::type>;
+    return loads::uniform<T, loads::stretch<T>>(detail::expect_line_load<T>(size), detail::expect_stretch<T>(where));
+}
+
+/// A line load that varies linearly from its first size to its second over a stretch (trapezoidal, triangular).
+template <class W1, class W2, class S>
+[[nodiscard]] constexpr auto linear_load(const W1& size_from, const W2& size_to, const S& where) {
+    using T = std::common_type_t<detail::common_number<W1, W2>, typename detail::number_of_place<S>::type>;
+    return loads::linear<T, loads::stretch<T>>(detail::expect_line_load<T>(size_from),
+                                               detail::expect_line_load<T>(size_to), detail::expect_stretch<T>(where));
+}
+
+/// The same over the whole beam.
+template <class W1, class W2>
+[[nodiscard]] constexpr auto linear_load(const W1& size_from, const W2& size_to) {
+    using T = detail::common_number<W1, W2>;
+    return loads::linear<T, loads::whole_beam>(detail::expect_line_load<T>(size_from),
+                                               detail::expect_line_load<T>(size_to), {});
+}
+
+/// An end that moves down by a given length (downward positive): settlement(end::right, 5.0*mm).
+template <class End, class D>
+[[nodiscard]] constexpr auto settlement(End, const D& size) {
+    using T = detail::common_number<D>;
+    return loads::movement<End, loads::motion::settlement, T>(detail::expect_length<T>(size));
+}
+
+/// A clamped end that is turned by a given angle (clockwise positive): support_rotation(end::left, 0.5*mrad).
+template <class End, class R>
+[[nodiscard]] constexpr auto support_rotation(End, const R& size) {
+    using T = detail::common_number<R>;
+    return loads::movement<End, loads::motion::rotation, T>(detail::expect_angle<T>(size));
+}
+
+}  // namespace sagitta

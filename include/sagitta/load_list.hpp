@@ -1,0 +1,78 @@
+// A list of load cases whose length is known only at run time.
+#pragma once
+
+#include <sagitta/detail/load_case.hpp>
+
+#include <variant>
+#include <vector>
+
+namespace sagitta {
+namespace loads {
+
+/// Any one load case, held by value.
+template <class T>
+using any_load =
+    std::variant<concentrated<action::point_force, T>, concentrated<action::couple, T>, uniform<T, whole_beam>,
+                 uniform<T, stretch<T>>, linear<T, whole_beam>, linear<T, stretch<T>>,
+                 movement<end::left_end, motion::settlement, T>, movement<end::right_end, motion::settlement, T>,
+                 movement<end::left_end, motion::rotation, T>, movement<end::right_end, motion::rotation, T>>;
+
+}  // namespace loads
+
+/// Load cases acting together, their number known at run time. The same vector space as the compositions of
+/// load.hpp: += - * / and beam.under(list).
+template <class T = double>
+class load_list {
+public:
+    using number = T;
+
+    load_list() = default;
+
+    /// Adds a load case, a composition of them, or another list.
+    template <loads::load_expression L>
+    load_list& operator+=(const L& load) {
+        std::apply([this](const auto&... single) { (cases_.emplace_back(single), ...); }, loads::cases_of(load));
+        return *this;
+    }
+    load_list& operator+=(const load_list& other) {
+        if (this == &other) return *this *= T(2);
+        cases_.insert(cases_.end(), other.cases_.begin(), other.cases_.end());
+        return *this;
+    }
+    template <class L>
+    load_list& operator-=(const L& load) {
+        load_list other;
+        other += load;
+        return *this += other * T(-1);
+    }
+    load_list& operator*=(const T& factor) {
+        detail::require_load_factor(factor);
+        for (auto& any : cases_) {
+            std::visit([&](auto& single) { single = single.scaled(factor); }, any);
+        }
+        return *this;
+    }
+    load_list& operator/=(const T& divisor) { return *this *= T(1) / divisor; }
+
+    template <class L>
+    [[nodiscard]] friend load_list operator+(load_list list, const L& load) {
+        return list += load;
+    }
+    template <class L>
+    [[nodiscard]] friend load_list operator-(load_list list, const L& load) {
+        return list -= load;
+    }
+    [[nodiscard]] friend load_list operator-(load_list list) { return list *= T(-1); }
+    [[nodiscard]] friend load_list operator*(load_list list, const T& factor) { return list *= factor; }
+    [[nodiscard]] friend load_list operator*(const T& factor, load_list list) { return list *= factor; }
+    [[nodiscard]] friend load_list operator/(load_list list, const T& divisor) { return list /= divisor; }
+
+    [[nodiscard]] const std::vector<loads::any_load<T>>& cases() const { return cases_; }
+    void reserve(std::size_t count) { cases_.reserve(count); }
+    void clear() { cases_.clear(); }
+
+private:
+    std::vector<loads::any_load<T>> cases_;
+};
+
+}  // namespace sagitta

@@ -1,0 +1,139 @@
+// The moment-area integrator: slopes and deflections from the loads and supports of a beam alone, by numerical
+// integration, independent of every closed form. It proves them, and it serves stiffness that varies along x.
+#pragma once
+
+#include <sagitta/beam.hpp>
+#include <sagitta/detail/acting_loads.hpp>
+#include <sagitta/detail/expect.hpp>
+#include <sagitta/detail/integrator.hpp>
+#include <sagitta/detail/refuse.hpp>
+#include <sagitta/elastic_line.hpp>
+#include <sagitta/units.hpp>
+
+#include <initializer_list>
+#include <vector>
+
+namespace sagitta {
+
+/// What the two moment-area theorems (Mohr) say about two points of an elastic line.
+template <class T>
+struct moment_area_result {
+    /// Slope at the second point less the slope at the first.
+    quantity<plane_angle, T> angle_change;
+    /// Tangential deviation: of the second point from the tangent at the first, downward positive.
+    quantity<length, T> deviation;
+    /// Of the first point from the tangent at the second.
+    quantity<length, T> deviation_of_first;
+};
+
+/// A beam under loads, integrated numerically (integrate_moment_area makes one). Answers as elastic_line does:
+/// x is a length on the beam, else invalid_input; side says which value is meant where shear or moment jump.
+template <class Left, class Right, class T, class Rigidity>
+class integrated_line {
+public:
+    using number = T;
+
+    integrated_line(const quantity<length, T>& span, const detail::acting_loads<T>& acting, const Rigidity& rigidity,
+                    const std::vector<T>& steps = {})
+        : integrator_(span.value(), acting, rigidity, steps) {}
+
+    /// Deflection, downward positive.
+    template <class X>
+    [[nodiscard]] quantity<length, T> deflection(const X& x) const {
+        return quantity<length, T>::from_value(integrator_.state_at(on_beam(x)).deflection);
+    }
+    /// Slope, clockwise positive.
+    template <class X>
+    [[nodiscard]] quantity<plane_angle, T> slope(const X& x) const {
+        return quantity<plane_angle, T>::from_value(integrator_.state_at(on_beam(x)).slope);
+    }
+    /// Bending moment, sagging positive.
+    template <class X>
+    [[nodiscard]] quantity<moment, T> moment(const X& x, side which) const {
+        return quantity<sagitta::moment, T>::from_value(integrator_.statics_at({on_beam(x)}, which).moment);
+    }
+    template <class X>
+    [[nodiscard]] quantity<sagitta::moment, T> moment(const X& x) const {
+        return moment(x, inner_side(on_beam(x)));
+    }
+    /// Shear force V = dM/dx.
+    template <class X>
+    [[nodiscard]] quantity<force, T> shear(const X& x, side which) const {
+        return quantity<force, T>::from_value(integrator_.statics_at({on_beam(x)}, which).shear);
+    }
+    template <class X>
+    [[nodiscard]] quantity<force, T> shear(const X& x) const {
+        return shear(x, inner_side(on_beam(x)));
+    }
+
+    /// The moment-area theorems between two points, in either order.
+    template <class From, class To>
+    [[nodiscard]] moment_area_result<T> between(const From& first, const To& second) const {
+        const T a = on_beam(first);
+        const T b = on_beam(second);
+        if (a <= b) {
+            const auto sum = integrator_.curvature_between(a, b);
+            return result(-sum.area, -sum.about_to, -sum.about_from);
+        }
+        const auto sum = integrator_.curvature_between(b, a);
+        return result(sum.area, -sum.about_from, -sum.about_to);
+    }
+
+private:
+    template <class X>
+    T on_beam(const X& x) const {
+        const auto place = detail::expect_length<T>(x);
+        if (!(place.value() >= T(0) && place.value() <= integrator_.span())) [[unlikely]]
+            detail::refuse("x", place, "must lie on the beam, from 0 m to ",
+                           quantity<length, T>::from_value(integrator_.span()));
+        return place.value();
+    }
+    side inner_side(const T& x) const { return x < integrator_.span() ? just_right : just_left; }
+
+    static moment_area_result<T> result(const T& angle, const T& of_second, const T& of_first) {
+        return {quantity<plane_angle, T>::from_value(angle), quantity<length, T>::from_value(of_second),
+                quantity<length, T>::from_value(of_first)};
+    }
+
+    detail::integrator<Left, Right, T, Rigidity> integrator_;
+};
+
+/// Integrates a prismatic beam under loads.
+template <class Left, class Right, class T, class Loads>
+[[nodiscard]] auto integrate_moment_area(const beam<Left, Right, T>& b, const Loads& loads) {
+    const detail::acting_loads<T> acting(loads, b.span().value());
+    return integrated_line<Left, Right, T, T>(b.span(), acting, b.EI().value());
+}
+
+/// The same with a stiffness that varies: EI is a function from a length x to a flexural rigidity, which
+/// replaces the beam's own. The places where it jumps must be given, as lengths on the beam.
+/// Throws invalid_input where EI is not greater than 0 or a step is not on the beam.
+template <class Left, class Right, class T, class Loads, class Stiffness>
+[[nodiscard]] auto integrate_moment_area(const beam<Left, Right, T>& b, const Loads& loads, const Stiffness& EI,
+                                         std::initializer_list<quantity<length, T>> steps = {}) {
+    std::vector<T> places;
+    for (const auto& step : steps) {
+        if (!(step.value() > T(0) && step < b.span())) [[unlikely]]
+            detail::refuse("step of EI", step, "must lie between the ends of the beam, 0 m and ", b.span());
+        places.push_back(step.value());
+    }
+    const auto rigidity_at = [EI](const T& x) {
+        const auto place = quantity<length, T>::from_value(x);
+        const auto here = detail::expect_rigidity<T>(EI(place));
+        if (!(here.value() > T(0)) || !detail::is_finite(here.value())) [[unlikely]]
+            detail::refuse("EI", here, "must be greater than 0 N*m^2 and finite, also at x = ", place);
+        return here.value();
+    };
+    const detail::acting_loads<T> acting(loads, b.span().value());
+    return integrated_line<Left, Right, T, std::remove_const_t<decltype(rigidity_at)>>(b.span(), acting, rigidity_at,
+                                                                                       places);
+}
+
+/// Angle change and tangential deviations between two points of an elastic line, by the moment-area
+/// integrator: from its loads and supports alone, no closed form.
+template <class Beam, class Loads, class From, class To>
+[[nodiscard]] auto moment_area(const elastic_line<Beam, Loads>& line, const From& first, const To& second) {
+    return integrate_moment_area(line.supported(), line.loads()).between(first, second);
+}
+
+}  // namespace sagitta

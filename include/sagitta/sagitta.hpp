@@ -1,0 +1,6 @@
+// The whole library.
+#pragma once
+
+#include <sagitta/core.hpp>
+#include <sagitta/format.hpp>
+#include <sagitta/parse.hpp>
