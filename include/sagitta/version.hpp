@@ -1,6 +1,8 @@
 // The version of the library: the one place where it is written (CMake reads it from here).
 #pragma once
 
+#include <compare>
+
 #define SAGITTA_VERSION_MAJOR 0
 #define SAGITTA_VERSION_MINOR 1
 #define SAGITTA_VERSION_PATCH 0
