@@ -25,9 +25,9 @@ public:
 
     /// Throws invalid_input unless the span and EI are greater than 0 and finite.
     constexpr beam(const quantity<length, T>& span, const quantity<flexural_rigidity, T>& EI) : span_(span), EI_(EI) {
-        if (!(span.value() > T(0)) || !detail::is_finite(span.value())) [[unlikely]]
+        if (!detail::is_positive(span.value())) [[unlikely]]
             detail::refuse("span", span, "must be greater than 0 m and finite");
-        if (!(EI.value() > T(0)) || !detail::is_finite(EI.value())) [[unlikely]]
+        if (!detail::is_positive(EI.value())) [[unlikely]]
             detail::refuse("EI", EI, "must be greater than 0 N*m^2 and finite");
     }
 
@@ -36,7 +36,7 @@ public:
 
     /// The elastic line under a load case, a composition of load cases or a load_list (elastic_line.hpp).
     template <class Loads>
-    [[nodiscard]] constexpr auto under(const Loads& loads) const {
+    [[nodiscard, gnu::always_inline]] constexpr auto under(const Loads& loads) const {
         return elastic_line<beam, Loads>(*this, loads);
     }
 

@@ -27,13 +27,14 @@ public:
     using number = std::common_type_t<N, typename Loads::number>;
     using beam_type = beam<Left, Right, number>;
 
-    constexpr superposition(const beam_type& b, const Loads& loads)
-        : effects_(std::apply([&](const auto&... single) { return effects(effect(single, b)...); },
-                              loads::cases_of(loads))) {}
+    // Written without std::apply and kept inline: then the compiler sees through the tuple, leaves out what an
+    // answer does not need (half of every effect), and composing costs what the formulas cost.
+    [[gnu::always_inline]] constexpr superposition(const beam_type& b, const Loads& loads)
+        : superposition(b, loads::cases_of(loads), all{}) {}
 
     template <class Sum, class Response>
-    constexpr Sum sum(const Response& response_of) const {
-        return std::apply([&](const auto&... single) { return (response_of(single) + ...); }, effects_);
+    [[gnu::always_inline]] constexpr Sum sum(const Response& response_of) const {
+        return sum_over<Sum>(response_of, all{});
     }
 
     /// The places where the elastic line changes its polynomial, both ends included, ascending.
@@ -51,9 +52,22 @@ public:
 private:
     template <class L>
     using effect_of = load_effect<L, Left, Right, number>;
+    template <class... L>
+    static std::tuple<effect_of<L>...> effects_of(const std::tuple<L...>&);
+    using effects = decltype(effects_of(loads::cases_of(std::declval<const Loads&>())));
+    using all = std::make_index_sequence<std::tuple_size_v<effects>>;
+
+    template <class Cases, std::size_t... i>
+    [[gnu::always_inline]] constexpr superposition(const beam_type& b, const Cases& cases, std::index_sequence<i...>)
+        : effects_(effect(std::get<i>(cases), b)...) {}
+
+    template <class Sum, class Response, std::size_t... i>
+    [[gnu::always_inline]] constexpr Sum sum_over(const Response& response_of, std::index_sequence<i...>) const {
+        return (response_of(std::get<i>(effects_)) + ...);
+    }
 
     template <class L>
-    static constexpr effect_of<L> effect(const L& single, const beam_type& b) {
+    [[gnu::always_inline]] static constexpr effect_of<L> effect(const L& single, const beam_type& b) {
         if constexpr (requires { requires L::is_rotation; }) {
             static_assert(can_act_on<L, Left, Right>,
                           "sagitta: a support rotation needs a clamped end; this end turns freely");
@@ -63,10 +77,6 @@ private:
         }
         return effect_of<L>(single, b);
     }
-
-    template <class... L>
-    static std::tuple<effect_of<L>...> effects_of(const std::tuple<L...>&);
-    using effects = decltype(effects_of(loads::cases_of(std::declval<const Loads&>())));
 
     effects effects_;
 };
@@ -147,39 +157,39 @@ public:
     using number = typename superposed::number;
     using beam_type = beam<Left, Right, number>;
 
-    constexpr elastic_line(const beam<Left, Right, N>& b, const Loads& loads)
+    [[gnu::always_inline]] constexpr elastic_line(const beam<Left, Right, N>& b, const Loads& loads)
         : beam_(detail::coherent<length, number>(b.span()), detail::coherent<flexural_rigidity, number>(b.EI())),
           loads_(loads),
           superposed_(beam_, loads) {}
 
     /// Deflection, downward positive (a length).
     template <class X>
-    [[nodiscard]] constexpr quantity<length, number> deflection(const X& x) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<length, number> deflection(const X& x) const {
         return answer<response::deflection>(on_beam(x), just_right);
     }
     /// Slope dv/dx, clockwise positive (a plane angle).
     template <class X>
-    [[nodiscard]] constexpr quantity<plane_angle, number> slope(const X& x) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<plane_angle, number> slope(const X& x) const {
         return answer<response::slope>(on_beam(x), just_right);
     }
     /// Bending moment, sagging positive (force times length).
     template <class X>
-    [[nodiscard]] constexpr quantity<moment, number> moment(const X& x) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<moment, number> moment(const X& x) const {
         const auto place = on_beam(x);
         return answer<response::moment>(place, inner_side(place));
     }
     template <class X>
-    [[nodiscard]] constexpr quantity<sagitta::moment, number> moment(const X& x, side which) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<sagitta::moment, number> moment(const X& x, side which) const {
         return answer<response::moment>(on_beam(x), which);
     }
     /// Shear force V = dM/dx.
     template <class X>
-    [[nodiscard]] constexpr quantity<force, number> shear(const X& x) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<force, number> shear(const X& x) const {
         const auto place = on_beam(x);
         return answer<response::shear>(place, inner_side(place));
     }
     template <class X>
-    [[nodiscard]] constexpr quantity<force, number> shear(const X& x, side which) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<force, number> shear(const X& x, side which) const {
         return answer<response::shear>(on_beam(x), which);
     }
     /// The line load at x, downward positive (force per length).
@@ -217,7 +227,7 @@ public:
 
 private:
     template <class X>
-    constexpr quantity<length, number> on_beam(const X& x) const {
+    [[gnu::always_inline]] constexpr quantity<length, number> on_beam(const X& x) const {
         const auto place = detail::expect_length<number>(x);
         if (!(place.value() >= number(0) && place <= beam_.span())) [[unlikely]]
             detail::refuse("x", place, "must lie on the beam, from 0 m to ", beam_.span());
@@ -229,9 +239,10 @@ private:
     }
 
     template <response R>
-    constexpr detail::response_quantity<R, number> answer(const quantity<length, number>& x, side which) const {
-        return superposed_.template sum<detail::response_quantity<R, number>>(
-            [&](const auto& effect) { return effect.template at<R>(x, beam_, which); });
+    [[gnu::always_inline]] constexpr detail::response_quantity<R, number> answer(const quantity<length, number>& x,
+                                                                                 side which) const {
+        return superposed_.template sum<detail::response_quantity<R, number>>([&](
+            const auto& effect) __attribute__((always_inline)) { return effect.template at<R>(x, beam_, which); });
     }
 
     beam_type beam_;

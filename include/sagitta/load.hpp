@@ -18,9 +18,8 @@ namespace sagitta {
 namespace loads {
 
 template <load_expression A, load_expression B>
-[[nodiscard]] constexpr auto operator+(const A& a, const B& b) {
-    return std::apply([](const auto&... c) { return load_sum(std::tuple<std::remove_cvref_t<decltype(c)>...>(c...)); },
-                      std::tuple_cat(cases_of(a), cases_of(b)));
+[[nodiscard, gnu::always_inline]] constexpr auto operator+(const A& a, const B& b) {
+    return load_sum(std::tuple_cat(cases_of(a), cases_of(b)));
 }
 
 template <load_expression L, detail::number_type N>
@@ -47,13 +46,15 @@ template <load_expression A, load_expression B>
 
 }  // namespace loads
 
+// Places are bounded by the beam as well, but only beam.under(...) knows its span and refuses what lies beyond.
+
 /// A place for a concentrated load: its distance from the left end (a length, not negative).
 template <class X>
 [[nodiscard]] constexpr auto at(const X& x) {
     using T = detail::common_number<X>;
     const auto place = detail::expect_length<T>(x);
-    if (!(place.value() >= T(0)) || !detail::is_finite(place.value())) [[unlikely]]
-        detail::refuse("at", place, "must be a finite distance from the left end, not less than 0 m");
+    if (!(place.value() >= T(0))) [[unlikely]]
+        detail::refuse("at", place, "must be a distance from the left end, not less than 0 m");
     return loads::position<T>{place};
 }
 
@@ -63,10 +64,10 @@ template <class From, class To>
     using T = detail::common_number<From, To>;
     const auto start = detail::expect_length<T>(from);
     const auto stop = detail::expect_length<T>(to);
-    if (!(start.value() >= T(0)) || !detail::is_finite(start.value())) [[unlikely]]
-        detail::refuse("between: from", start, "must be a finite distance from the left end, not less than 0 m");
-    if (!(start.value() < stop.value()) || !detail::is_finite(stop.value())) [[unlikely]]
-        detail::refuse("between: to", stop, "must be a finite distance from the left end, greater than from = ", start);
+    if (!(start.value() >= T(0))) [[unlikely]]
+        detail::refuse("between: from", start, "must be a distance from the left end, not less than 0 m");
+    if (!(start.value() < stop.value())) [[unlikely]]
+        detail::refuse("between: to", stop, "must be a distance from the left end, greater than from = ", start);
     return loads::stretch<T>{start, stop};
 }
 

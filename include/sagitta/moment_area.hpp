@@ -120,7 +120,7 @@ template <class Left, class Right, class T, class Loads, class Stiffness>
     const auto rigidity_at = [EI](const T& x) {
         const auto place = quantity<length, T>::from_value(x);
         const auto here = detail::expect_rigidity<T>(EI(place));
-        if (!(here.value() > T(0)) || !detail::is_finite(here.value())) [[unlikely]]
+        if (!detail::is_positive(here.value())) [[unlikely]]
             detail::refuse("EI", here, "must be greater than 0 N*m^2 and finite, also at x = ", place);
         return here.value();
     };

@@ -31,14 +31,15 @@ constexpr auto as_ratio(const quantity<plane_angle, T>& angle) {
     return quantity<dimensionless, T>::from_value(angle.value());
 }
 
-/// The scale of each response to a force F on a beam of span L: F L^3/EI, F L^2/EI, F L, F.
+/// The scale of each response to a force F on a beam of span L: F L^3/EI, F L^2/EI, F L, F. Grouped so that
+/// several loads on one beam share what does not depend on them.
 template <response R, class T>
 constexpr response_quantity<R, T> scale_of_force(const quantity<force, T>& F, const quantity<length, T>& L,
                                                  const quantity<flexural_rigidity, T>& EI) {
     if constexpr (R == response::deflection) {
-        return F * L * L * L / EI;
+        return F * (L * L * L / EI);
     } else if constexpr (R == response::slope) {
-        return as_angle(F * L * L / EI);
+        return as_angle(F * (L * L / EI));
     } else if constexpr (R == response::moment) {
         return F * L;
     } else {
@@ -86,9 +87,9 @@ private:
         if constexpr (has_shear && has_moment) {
             return -(s * s) * (turning / T(2) + across * s / T(6)) / EI;
         } else if constexpr (has_shear) {
-            return s * (as_ratio(turning) - across * s * s / (T(6) * EI));
+            return s * (as_ratio(turning) - across * (s * s / (T(6) * EI)));
         } else if constexpr (has_moment) {
-            return across - turning * s * s / (T(2) * EI);
+            return across - turning * (s * s / (T(2) * EI));
         } else {
             return across + as_ratio(turning) * s;
         }
@@ -99,7 +100,7 @@ private:
         if constexpr (has_shear && has_moment) {
             return as_angle(-s * (turning + across * s / T(2)) / EI);
         } else if constexpr (has_shear) {
-            return turning - as_angle(across * s * s / (T(2) * EI));
+            return turning - as_angle(across * (s * s / (T(2) * EI)));
         } else if constexpr (has_moment) {
             return as_angle(-turning * s / EI);
         } else {

@@ -47,7 +47,7 @@ constexpr response_quantity<R, T> line_load_part(const quantity<length, T>& s,
                                                  const intensity_profile<T, is_uniform>& load,
                                                  const quantity<flexural_rigidity, T>& EI) {
     if constexpr (R == response::deflection) {
-        return s * s * s * s * load.over(s, 24, 120) / EI;
+        return (s * s) * (s * s) * load.over(s, 24, 120) / EI;
     } else if constexpr (R == response::slope) {
         return as_angle(s * s * s * load.over(s, 6, 24) / EI);
     } else if constexpr (R == response::moment) {
@@ -75,7 +75,8 @@ class load_effect<loads::concentrated<Action, N>, Left, Right, T> {
     using load = loads::concentrated<Action, N>;
 
 public:
-    constexpr load_effect(const load& acting, const beam<Left, Right, T>& b) : at_(coherent<length, T>(acting.at())) {
+    [[gnu::always_inline]] constexpr load_effect(const load& acting, const beam<Left, Right, T>& b)
+        : at_(coherent<length, T>(acting.at())) {
         const auto L = b.span();
         const auto rest = L - at_;
         if (!(rest.value() >= T(0))) [[unlikely]]
@@ -95,8 +96,8 @@ public:
     }
 
     template <response R>
-    constexpr response_quantity<R, T> at(const quantity<length, T>& x, const beam<Left, Right, T>& b,
-                                         side which) const {
+    [[gnu::always_inline]] constexpr response_quantity<R, T> at(const quantity<length, T>& x,
+                                                                const beam<Left, Right, T>& b, side which) const {
         const bool before = which == side::just_left ? x <= at_ : x < at_;
         if (before) return left_.template at<R>(x, b.EI());
         return seen_from_right<R>(right_.template at<R>(b.span() - x, b.EI()));
@@ -110,8 +111,8 @@ public:
 
 private:
     template <class Here, class There, int order>
-    static constexpr end_state<Here, T> state(const quantity<force, T>& F, const T& near, const T& far,
-                                              const beam<Left, Right, T>& b) {
+    [[gnu::always_inline]] static constexpr end_state<Here, T> state(const quantity<force, T>& F, const T& near,
+                                                                     const T& far, const beam<Left, Right, T>& b) {
         using across = derivative_t<decltype(across_row<Here, There>()), order>;
         using turning = derivative_t<decltype(turning_row<Here, There>()), order>;
         return state_from<Here>(F, across::value(near, far), turning::value(near, far), b);
@@ -125,25 +126,27 @@ private:
 /// Line loads are integrals of the point load over its place: their resultant times the mean of the shapes
 /// over the stretch.
 template <class Load, class Left, class Right, class T>
-class line_load_effect {
+requires requires { typename Load::where_type; }
+class load_effect<Load, Left, Right, T> {
     static constexpr bool is_uniform = Load::is_uniform;
     static constexpr bool is_whole = std::is_same_v<typename Load::where_type, loads::whole_beam>;
     using profile = intensity_profile<T, is_uniform>;
 
 public:
-    constexpr line_load_effect(const Load& acting, const beam<Left, Right, T>& b)
+    [[gnu::always_inline]] constexpr load_effect(const Load& acting, const beam<Left, Right, T>& b)
         : w_from_(coherent<line_load, T>(acting.size_from())), w_to_(coherent<line_load, T>(acting.size_to())) {
         const auto L = b.span();
         if constexpr (is_whole) {
             to_ = L;
-            left_ = state<Left, Right>({T(0), T(1), T(1), T(0), T(1)}, w_from_, w_to_, b);
-            right_ = state<Right, Left>({T(0), T(1), T(1), T(0), T(1)}, w_to_, w_from_, b);
+            left_ = state<Left, Right>({T(1) / T(2), T(1) / T(2), T(1)}, w_from_, w_to_, b);
+            right_ = state<Right, Left>({T(1) / T(2), T(1) / T(2), T(1)}, w_to_, w_from_, b);
         } else {
             from_ = coherent<length, T>(acting.where().from);
             to_ = coherent<length, T>(acting.where().to);
             if (!(to_ <= L)) [[unlikely]]
                 refuse("between: to", to_, "must not lie beyond the span of the beam, ", L);
-            const fractions<T> seen{ratio(from_, L), ratio(L - from_, L), ratio(to_, L), ratio(L - to_, L),
+            const auto twice = L * T(2);
+            const fractions<T> seen{ratio(from_ + to_, twice), ratio((L - from_) + (L - to_), twice),
                                     ratio(to_ - from_, L)};
             left_ = state<Left, Right>(seen, w_from_, w_to_, b);
             right_ = state<Right, Left>(seen.mirrored(), w_to_, w_from_, b);
@@ -151,7 +154,8 @@ public:
     }
 
     template <response R>
-    constexpr response_quantity<R, T> at(const quantity<length, T>& x, const beam<Left, Right, T>& b, side) const {
+    [[gnu::always_inline]] constexpr response_quantity<R, T> at(const quantity<length, T>& x,
+                                                                const beam<Left, Right, T>& b, side) const {
         const auto back = b.span() - x;
         if constexpr (!is_whole) {
             if (x <= from_) return left_.template at<R>(x, b.EI());
@@ -183,8 +187,10 @@ private:
     }
 
     template <class Here, class There>
-    static constexpr end_state<Here, T> state(const fractions<T>& seen, const quantity<line_load, T>& w_from,
-                                              const quantity<line_load, T>& w_to, const beam<Left, Right, T>& b) {
+    [[gnu::always_inline]] static constexpr end_state<Here, T> state(const fractions<T>& seen,
+                                                                     const quantity<line_load, T>& w_from,
+                                                                     const quantity<line_load, T>& w_to,
+                                                                     const beam<Left, Right, T>& b) {
         using across = decltype(across_row<Here, There>());
         using turning = decltype(turning_row<Here, There>());
         const auto width = seen.width * b.span();
@@ -205,17 +211,6 @@ private:
     quantity<line_load, T> w_to_;
     end_state<Left, T> left_{};
     end_state<Right, T> right_{};
-};
-
-template <class N, class Where, class Left, class Right, class T>
-class load_effect<loads::uniform<N, Where>, Left, Right, T>
-    : public line_load_effect<loads::uniform<N, Where>, Left, Right, T> {
-    using line_load_effect<loads::uniform<N, Where>, Left, Right, T>::line_load_effect;
-};
-template <class N, class Where, class Left, class Right, class T>
-class load_effect<loads::linear<N, Where>, Left, Right, T>
-    : public line_load_effect<loads::linear<N, Where>, Left, Right, T> {
-    using line_load_effect<loads::linear<N, Where>, Left, Right, T>::line_load_effect;
 };
 
 /// True where the end in question holds the beam against a movement, so that the movement can be imposed.
@@ -240,7 +235,8 @@ public:
         : size_(coherent<typename load::unit, T>(imposed.size())) {}
 
     template <response R>
-    constexpr response_quantity<R, T> at(const quantity<length, T>& x, const beam<Left, Right, T>& b, side) const {
+    [[gnu::always_inline]] constexpr response_quantity<R, T> at(const quantity<length, T>& x,
+                                                                const beam<Left, Right, T>& b, side) const {
         const auto L = b.span();
         if constexpr (!can_act_on<load, Left, Right>) {
             return {};

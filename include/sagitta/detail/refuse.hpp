@@ -6,7 +6,9 @@
 
 #include <array>
 #include <charconv>
+#include <limits>
 #include <string>
+#include <type_traits>
 
 namespace sagitta::detail {
 
@@ -25,37 +27,57 @@ inline constexpr const char* coherent_symbol<line_load> = " N/m";
 template <>
 inline constexpr const char* coherent_symbol<flexural_rigidity> = " N*m^2";
 
-template <class T>
-std::string number_text(const T& number) {
+inline std::string number_text(double number) {
     std::array<char, 40> text{};
-    const auto end = std::to_chars(text.data(), text.data() + text.size(), static_cast<double>(number),
-                                   std::chars_format::general, 9);
+    const auto end = std::to_chars(text.data(), text.data() + text.size(), number, std::chars_format::general, 9);
     return {text.data(), end.ptr};
 }
 
-template <class Dimension, class T>
-std::string with_unit(const quantity<Dimension, T>& q) {
-    return number_text(q.value()) + coherent_symbol<Dimension>;
+[[noreturn, gnu::cold, gnu::noinline]] inline void throw_invalid_input(const char* argument, double value,
+                                                                       const char* unit, const char* bound) {
+    throw invalid_input(std::string(argument) + " = " + number_text(value) + unit + " " + bound);
+}
+[[noreturn, gnu::cold, gnu::noinline]] inline void throw_invalid_input(const char* argument, double value,
+                                                                       const char* unit, const char* bound,
+                                                                       double limit, const char* limit_unit) {
+    throw invalid_input(std::string(argument) + " = " + number_text(value) + unit + " " + bound + number_text(limit) +
+                        limit_unit);
 }
 
-template <class T>
-requires number_type<T> std::string with_unit(const T& number) { return number_text(number); }
+// Values are handed over as plain numbers: a reference to them would keep the whole computation in memory.
 
-/// Throws "<argument> = <value> <bound><limit>", for instance "span = -1 m must be greater than 0".
-template <class Value>
-[[noreturn, gnu::cold, gnu::noinline]] void refuse(const char* argument, const Value& value, const char* bound) {
-    throw invalid_input(std::string(argument) + " = " + with_unit(value) + " " + bound);
+/// Throws "<argument> = <value> <bound>", for instance "span = -1 m must be greater than 0 m and finite".
+template <class D, class T>
+[[noreturn, gnu::always_inline]] inline void refuse(const char* argument, const quantity<D, T>& value,
+                                                    const char* bound) {
+    throw_invalid_input(argument, static_cast<double>(value.value()), coherent_symbol<D>, bound);
 }
-template <class Value, class Limit>
-[[noreturn, gnu::cold, gnu::noinline]] void refuse(const char* argument, const Value& value, const char* bound,
-                                                   const Limit& limit) {
-    throw invalid_input(std::string(argument) + " = " + with_unit(value) + " " + bound + with_unit(limit));
+template <number_type T>
+[[noreturn, gnu::always_inline]] inline void refuse(const char* argument, const T& value, const char* bound) {
+    throw_invalid_input(argument, static_cast<double>(value), "", bound);
+}
+/// Throws "<argument> = <value> <bound><limit>".
+template <class D, class T, class E, class U>
+[[noreturn, gnu::always_inline]] inline void refuse(const char* argument, const quantity<D, T>& value,
+                                                    const char* bound, const quantity<E, U>& limit) {
+    throw_invalid_input(argument, static_cast<double>(value.value()), coherent_symbol<D>, bound,
+                        static_cast<double>(limit.value()), coherent_symbol<E>);
 }
 
-/// Neither infinite nor not-a-number.
+/// Neither infinite nor not-a-number: x - x is 0 then, and not-a-number otherwise. (One comparison, one jump.)
 template <class T>
 constexpr bool is_finite(const T& x) {
-    return x - x == T(0);
+    return x - x >= T(0);
+}
+
+/// Greater than 0 and finite.
+template <class T>
+constexpr bool is_positive(const T& x) {
+    if constexpr (std::is_floating_point_v<T>) {
+        return x > T(0) && x <= std::numeric_limits<T>::max();
+    } else {
+        return x > T(0) && is_finite(x);
+    }
 }
 
 template <class Dimension, class T>

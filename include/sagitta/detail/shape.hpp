@@ -18,6 +18,8 @@ struct shape {
     static constexpr std::size_t count = sizeof...(c);
     static constexpr std::array<int, count> coefficient{c...};
 
+    static constexpr bool is_zero = ((c == 0) && ...);
+
     template <class T>
     static constexpr T value(const T& near, const T& far) {
         return scaled(evaluate<first, last>(near, far) * outer_factor(near, far));
@@ -106,36 +108,39 @@ struct derivative<Shape, 0> {
 template <class Shape, int order = 1>
 using derivative_t = typename derivative<Shape, order>::type;
 
-/// A stretch of the beam as fractions of the span: the distances of its two ends from both ends of the beam,
+/// A stretch of the beam as fractions of the span: the distances of its middle from the two ends of the beam,
 /// and its width, each formed from lengths so that narrow stretches keep all their digits.
 template <class T>
 struct fractions {
-    T near_from, far_from;
-    T near_to, far_to;
+    T near;
+    T far;
     T width;
 
-    constexpr T near_middle() const { return (near_from + near_to) / T(2); }
-    constexpr T far_middle() const { return (far_from + far_to) / T(2); }
-    constexpr fractions mirrored() const { return {far_to, near_to, far_from, near_from, width}; }
+    constexpr fractions mirrored() const { return {far, near, width}; }
 };
 
-/// The mean of a shape over a stretch by Simpson's rule, which is exact up to cubic shapes and adds only terms
-/// of one sign where the shape has one sign.
+// Both means below are Taylor series about the middle of the stretch that end by themselves for cubic shapes.
+
+/// The mean of a shape over a stretch.
 template <class Shape, class T>
 constexpr T mean_over(const fractions<T>& s) {
-    static_assert(Shape::count <= 4, "Simpson's rule is exact up to cubic shapes");
-    return (Shape::value(s.near_from, s.far_from) + T(4) * Shape::value(s.near_middle(), s.far_middle()) +
-            Shape::value(s.near_to, s.far_to)) /
-           T(6);
+    static_assert(Shape::count <= 4, "the series ends with the second derivative");
+    const T middle = Shape::value(s.near, s.far);
+    using second = derivative_t<Shape, 2>;
+    if constexpr (second::is_zero) {
+        return middle;
+    } else {
+        return middle + second::value(s.near, s.far) * (s.width * s.width / T(24));
+    }
 }
 
 /// The mean of shape times t over a stretch, where t runs from -1 at its start to 1 at its end: what a line
-/// load adds by growing along the stretch. Taylor series about the middle, complete for cubic shapes.
+/// load adds by growing along the stretch.
 template <class Shape, class T>
 constexpr T tilted_mean_over(const fractions<T>& s) {
     static_assert(Shape::count <= 4, "the series ends with the third derivative");
-    const T first = derivative_t<Shape, 1>::value(s.near_middle(), s.far_middle());
-    const T third = derivative_t<Shape, 3>::value(s.near_middle(), s.far_middle());
+    const T first = derivative_t<Shape, 1>::value(s.near, s.far);
+    const T third = derivative_t<Shape, 3>::value(s.near, s.far);
     return s.width / T(6) * (first + third * s.width * s.width / T(40));
 }
 
