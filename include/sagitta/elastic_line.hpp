@@ -174,7 +174,7 @@ public:
     }
     /// Bending moment, sagging positive (force times length).
     template <class X>
-    [[nodiscard, gnu::always_inline]] constexpr quantity<moment, number> moment(const X& x) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<sagitta::moment, number> moment(const X& x) const {
         const auto place = on_beam(x);
         return answer<response::moment>(place, inner_side(place));
     }

@@ -28,6 +28,12 @@ public:
 
     load_list() = default;
 
+    /// A list that starts with a load case or a composition of them.
+    template <loads::load_expression L>
+    load_list(const L& load) {  // NOLINT(google-explicit-constructor): so that lists and compositions add up
+        *this += load;
+    }
+
     /// Adds a load case, a composition of them, or another list.
     template <loads::load_expression L>
     load_list& operator+=(const L& load) {
@@ -39,12 +45,7 @@ public:
         cases_.insert(cases_.end(), other.cases_.begin(), other.cases_.end());
         return *this;
     }
-    template <class L>
-    load_list& operator-=(const L& load) {
-        load_list other;
-        other += load;
-        return *this += other * T(-1);
-    }
+    load_list& operator-=(const load_list& other) { return *this += other * T(-1); }
     load_list& operator*=(const T& factor) {
         detail::require_load_factor(factor);
         for (auto& any : cases_) {
@@ -54,14 +55,8 @@ public:
     }
     load_list& operator/=(const T& divisor) { return *this *= T(1) / divisor; }
 
-    template <class L>
-    [[nodiscard]] friend load_list operator+(load_list list, const L& load) {
-        return list += load;
-    }
-    template <class L>
-    [[nodiscard]] friend load_list operator-(load_list list, const L& load) {
-        return list -= load;
-    }
+    [[nodiscard]] friend load_list operator+(load_list a, const load_list& b) { return a += b; }
+    [[nodiscard]] friend load_list operator-(load_list a, const load_list& b) { return a -= b; }
     [[nodiscard]] friend load_list operator-(load_list list) { return list *= T(-1); }
     [[nodiscard]] friend load_list operator*(load_list list, const T& factor) { return list *= factor; }
     [[nodiscard]] friend load_list operator*(const T& factor, load_list list) { return list *= factor; }
@@ -74,5 +69,8 @@ public:
 private:
     std::vector<loads::any_load<T>> cases_;
 };
+
+template <loads::load_expression L>
+load_list(const L&) -> load_list<typename L::number>;
 
 }  // namespace sagitta

@@ -49,7 +49,7 @@ public:
     }
     /// Bending moment, sagging positive.
     template <class X>
-    [[nodiscard]] quantity<moment, T> moment(const X& x, side which) const {
+    [[nodiscard]] quantity<sagitta::moment, T> moment(const X& x, side which) const {
         return quantity<sagitta::moment, T>::from_value(integrator_.statics_at({on_beam(x)}, which).moment);
     }
     template <class X>

@@ -187,13 +187,13 @@ private:
     }
 
     template <class Here, class There>
-    [[gnu::always_inline]] static constexpr end_state<Here, T> state(const fractions<T>& seen,
-                                                                     const quantity<line_load, T>& w_from,
-                                                                     const quantity<line_load, T>& w_to,
-                                                                     const beam<Left, Right, T>& b) {
+    [[gnu::always_inline]] constexpr end_state<Here, T> state(const fractions<T>& seen,
+                                                              const quantity<line_load, T>& w_from,
+                                                              const quantity<line_load, T>& w_to,
+                                                              const beam<Left, Right, T>& b) const {
         using across = decltype(across_row<Here, There>());
         using turning = decltype(turning_row<Here, There>());
-        const auto width = seen.width * b.span();
+        const auto width = to_ - from_;
         if constexpr (is_uniform) {
             return state_from<Here>(w_from * width, mean_over<across>(seen), mean_over<turning>(seen), b);
         } else {

@@ -3,6 +3,7 @@
 
 #include <array>
 #include <cstddef>
+#include <numeric>
 #include <utility>
 
 namespace sagitta::detail {
@@ -18,6 +19,12 @@ struct shape {
     static constexpr std::size_t count = sizeof...(c);
     static constexpr std::array<int, count> coefficient{c...};
 
+    /// What divisor and coefficients have in common is cancelled before anything is computed.
+    static constexpr int common = [] {
+        int g = Divisor;
+        for (const int k : coefficient) g = std::gcd(g, k);
+        return Divisor < 0 ? -g : g;
+    }();
     static constexpr bool is_zero = ((c == 0) && ...);
 
     template <class T>
@@ -41,9 +48,9 @@ private:
     template <std::size_t from, std::size_t to, class T>
     static constexpr T evaluate(const T& near, const T& far) {
         if constexpr (from == to) {
-            return T(coefficient[from]);
+            return T(coefficient[from] / common);
         } else {
-            return evaluate<from, to - 1>(near, far) * far + term<to - from, coefficient[to]>(near);
+            return evaluate<from, to - 1>(near, far) * far + term<to - from, coefficient[to] / common>(near);
         }
     }
 
@@ -63,10 +70,10 @@ private:
 
     template <class T>
     static constexpr T scaled(const T& x) {
-        if constexpr (Divisor == 1) {
+        if constexpr (Divisor == common) {
             return x;
         } else {
-            return x / T(Divisor);
+            return x / T(Divisor / common);
         }
     }
 

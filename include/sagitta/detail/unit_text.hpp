@@ -91,15 +91,31 @@ inline constexpr std::array unit_names{
 constexpr bool is_letter(char c) { return (c >= 'a' && c <= 'z') || (c >= 'A' && c <= 'Z'); }
 constexpr bool is_digit(char c) { return c >= '0' && c <= '9'; }
 
-/// Reads a product of named units: factors joined by * and /, each with an optional power as in cm4, mm^2.
-/// A / divides by the one factor behind it; "1/m" is allowed.
+/// Takes a sign off the front of a text; false where it does not stand there.
+constexpr bool take(std::string_view& text, std::string_view sign) {
+    if (!text.starts_with(sign)) return false;
+    text.remove_prefix(sign.size());
+    return true;
+}
+
+/// Takes a power off the front: 4, ^4 or a raised 2, 3, 4. 1 where none stands there, 0 where it is wrong.
+constexpr int take_power(std::string_view& text) {
+    constexpr std::array raised{std::string_view("\u00b2"), std::string_view("\u00b3"), std::string_view("\u2074")};
+    for (std::size_t i = 0; i < raised.size(); ++i) {
+        if (take(text, raised[i])) return static_cast<int>(i) + 2;
+    }
+    const bool announced = take(text, "^");
+    if (text.empty() || !is_digit(text.front())) return announced ? 0 : 1;
+    const int power = text.front() - '0';
+    text.remove_prefix(1);
+    return power;
+}
+
+/// Reads a product of named units: factors joined by * (or a raised dot) and /, each with an optional power as
+/// in cm4, mm^2. A / divides by the one factor behind it; "1/m" is allowed.
 constexpr described_unit read_unit(std::string_view text) {
     described_unit product{{}, {}, true};
-    int sign = 1;
-    if (text.starts_with("1/")) {
-        sign = -1;
-        text.remove_prefix(2);
-    }
+    int sign = take(text, "1/") ? -1 : 1;
     while (true) {
         std::size_t letters = 0;
         while (letters < text.size() && is_letter(text[letters])) ++letters;
@@ -107,25 +123,14 @@ constexpr described_unit read_unit(std::string_view text) {
         for (const auto& candidate : unit_names) {
             if (candidate.name == text.substr(0, letters)) factor = candidate.unit;
         }
-        if (!factor.known) return {};
         text.remove_prefix(letters);
-
-        int power = 1;
-        const bool caret = text.starts_with('^');
-        if (caret) text.remove_prefix(1);
-        if (!text.empty() && is_digit(text.front())) {
-            power = text.front() - '0';
-            text.remove_prefix(1);
-            if (power == 0) return {};
-        } else if (caret) {
-            return {};
-        }
+        const int power = take_power(text);
+        if (!factor.known || power == 0) return {};
         product = times(product, factor, sign * power);
 
         if (text.empty()) return product;
-        if (text.front() != '*' && text.front() != '/') return {};
-        sign = text.front() == '/' ? -1 : 1;
-        text.remove_prefix(1);
+        sign = take(text, "/") ? -1 : 1;
+        if (sign == 1 && !take(text, "*") && !take(text, "\u00b7")) return {};
     }
 }
 
