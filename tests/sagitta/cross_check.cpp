@@ -1,0 +1,145 @@
+// The moment-area integrator against the closed forms: they agree on every load case on every beam.
+// cross_check_misprints.cpp shows that the check is able to fail.
+#include <support/scene.hpp>
+
+#include <sagitta/cross_check.hpp>
+
+#include <doctest/doctest.h>
+
+#include <algorithm>
+#include <limits>
+#include <vector>
+
+using namespace sagitta;
+using namespace sagitta::units;
+
+namespace {
+
+constexpr double bound = 1e-12;
+
+void take_greater(cross_check_result<double>& worst, const cross_check_result<double>& one) {
+    worst.shear = std::max(worst.shear, one.shear);
+    worst.moment = std::max(worst.moment, one.moment);
+    worst.slope = std::max(worst.slope, one.slope);
+    worst.deflection = std::max(worst.deflection, one.deflection);
+}
+
+void check(const cross_check_result<double>& result) {
+    CHECK(result.shear <= bound);
+    CHECK(result.moment <= bound);
+    CHECK(result.slope <= bound);
+    CHECK(result.deflection <= bound);
+}
+
+void report(const cross_check_result<double>& worst) {
+    MESSAGE("greatest discrepancies: deflection " << worst.deflection << ", slope " << worst.slope << ", moment "
+                                                  << worst.moment << ", shear " << worst.shear);
+}
+
+}  // namespace
+
+TEST_CASE("closed forms and integrator agree to 1e-12 for every load case on every beam") {
+    constexpr std::uint64_t seed = 71;
+    CAPTURE(seed);
+    scene::chance random(seed);
+    cross_check_result<double> worst;
+    for (const double L : {1e-3, 7.2, 1e4}) {
+        const double EI = 1.75e7;
+        const double tiny = 1e-6 * L;
+        const double w = EI / L / L / L / L;
+        std::vector<scene::load> cases{{scene::kind::uniform, w},
+                                       {scene::kind::linear_whole, w, 0},
+                                       {scene::kind::linear_whole, 0, w},
+                                       {scene::kind::settlement_left, 0.01},
+                                       {scene::kind::settlement_right, 0.01},
+                                       {scene::kind::rotation_left, 0.01},
+                                       {scene::kind::rotation_right, 0.01}};
+        for (const double a : {0.0, tiny, L / 3, L / 2, random.in(0, L), L - tiny, L}) {
+            cases.push_back({scene::kind::point, w * L, 0, a, 0});
+            cases.push_back({scene::kind::couple, w * L * L, 0, a, 0});
+        }
+        const double inside = random.in(tiny, L - tiny);
+        for (const auto& [from, to] : std::vector<std::pair<double, double>>{{0, L / 3},
+                                                                             {L / 7, L},
+                                                                             {0.3 * L, 0.8 * L},
+                                                                             {0, L},
+                                                                             {0, tiny},
+                                                                             {L - tiny, L},
+                                                                             {inside, inside + tiny}}) {
+            cases.push_back({scene::kind::partial_uniform, w, 0, from, to});
+            cases.push_back({scene::kind::linear, w, 0, from, to});
+            cases.push_back({scene::kind::linear, 0, w, from, to});
+        }
+        scene::with_each_beam(L, EI, [&](const char* name, const auto& b, auto left, auto right) {
+            for (const auto& one : cases) {
+                if (!scene::can_act(one, left, right)) continue;
+                CAPTURE(name);
+                CAPTURE(L);
+                CAPTURE(scene::text(one));
+                const auto result = cross_check(b.under(scene::list_of({one})));
+                check(result);
+                take_greater(worst, result);
+            }
+        });
+    }
+    report(worst);
+}
+
+TEST_CASE("they agree on superpositions of random loads") {
+    constexpr std::uint64_t seed = 72;
+    CAPTURE(seed);
+    scene::chance random(seed);
+    cross_check_result<double> worst;
+    const double L = 7.2;
+    const double EI = 1.75e7;
+    for (int i = 0; i < 50; ++i) {
+        scene::with_each_beam(L, EI, [&](const char* name, const auto& b, auto left, auto right) {
+            CAPTURE(name);
+            CAPTURE(i);
+            const auto all = scene::random_loads(random, random.whole(2, 8), L, EI, left, right);
+            const auto result = cross_check(b.under(scene::list_of(all)));
+            check(result);
+            take_greater(worst, result);
+        });
+    }
+    report(worst);
+}
+
+TEST_CASE("a composition known when compiling is checked like a list") {
+    const auto loads = point_load(22.0 * kN, at(3.0 * m)) + uniform_load(4.5 * kN / m) +
+                       settlement(end::right, 5.0 * mm) + linear_load(0.0 * kN / m, 6.0 * kN / m);
+    const auto line = propped_cantilever(7.2 * m, 210.0 * GPa * 8356.0 * cm4).under(loads);
+    const auto result = cross_check(line);
+    check(result);
+    load_list list;
+    list += loads;
+    const auto of_list = cross_check(line.supported().under(list));
+    check(of_list);
+}
+
+TEST_CASE("an unloaded beam has no discrepancy") {
+    CHECK(cross_check(fixed_beam(3.0 * m, 1.0 * kN * m2).under(load_list{})).greatest() == 0);
+}
+
+TEST_CASE("the greatest discrepancy is the greatest of the four") {
+    using result = cross_check_result<double>;
+    CHECK(result{1, 2, 3, 4}.greatest() == 4);
+    CHECK(result{4, 1, 2, 3}.greatest() == 4);
+    CHECK(result{1, 4, 3, 2}.greatest() == 4);
+    CHECK(result{1, 2, 4, 3}.greatest() == 4);
+}
+
+TEST_CASE("a discrepancy that is not a number is never small") {
+    using result = cross_check_result<double>;
+    const double nan = std::numeric_limits<double>::quiet_NaN();
+    CHECK_FALSE(result{nan, 0, 0, 0}.greatest() <= bound);
+    CHECK_FALSE(result{0, nan, 0, 0}.greatest() <= bound);
+    CHECK_FALSE(result{0, 0, nan, 0}.greatest() <= bound);
+    CHECK_FALSE(result{0, 0, 0, nan}.greatest() <= bound);
+
+    detail::discrepancy<double> kept;
+    kept.compare(1, 1);
+    kept.compare(nan, 1);
+    kept.compare(1, 1);
+    CHECK_FALSE(kept.relative_to(0) <= bound);
+}

@@ -1,0 +1,228 @@
+// Loads as plain data, from which both a load_list of the library and the loads of the reference are made.
+#pragma once
+
+#include "reference.hpp"
+
+#include <sagitta/core.hpp>
+
+#include <algorithm>
+#include <cstdint>
+#include <random>
+#include <string>
+#include <vector>
+
+namespace scene {
+
+enum class kind {
+    point,
+    couple,
+    uniform,
+    partial_uniform,
+    linear_whole,
+    linear,
+    settlement_left,
+    settlement_right,
+    rotation_left,
+    rotation_right
+};
+
+struct load {
+    kind what;
+    double size = 0;
+    double size_to = 0;  // linear loads
+    double from = 0;     // place of concentrated loads
+    double to = 0;
+};
+
+inline std::string text(const load& l) {
+    const char* const names[] = {"point",  "couple",          "uniform",          "partial uniform", "linear whole",
+                                 "linear", "settlement left", "settlement right", "rotation left",   "rotation right"};
+    return std::string(names[static_cast<int>(l.what)]) + " " + std::to_string(l.size) + ", " +
+           std::to_string(l.size_to) + " from " + std::to_string(l.from) + " to " + std::to_string(l.to);
+}
+
+inline bool can_act(const load& l, reference::hold left, reference::hold right) {
+    using reference::hold;
+    switch (l.what) {
+        case kind::settlement_left:
+            return left != hold::free;
+        case kind::settlement_right:
+            return right != hold::free;
+        case kind::rotation_left:
+            return left == hold::fixed;
+        case kind::rotation_right:
+            return right == hold::fixed;
+        default:
+            return true;
+    }
+}
+
+inline void add(sagitta::load_list<>& list, const load& l) {
+    using namespace sagitta;
+    using namespace sagitta::units;
+    switch (l.what) {
+        case kind::point:
+            list += point_load(l.size * N, at(l.from * m));
+            return;
+        case kind::couple:
+            list += applied_couple(l.size * N * m, at(l.from * m));
+            return;
+        case kind::uniform:
+            list += uniform_load(l.size * N / m);
+            return;
+        case kind::partial_uniform:
+            list += partial_uniform_load(l.size * N / m, between(l.from * m, l.to * m));
+            return;
+        case kind::linear_whole:
+            list += linear_load(l.size * N / m, l.size_to * N / m);
+            return;
+        case kind::linear:
+            list += linear_load(l.size * N / m, l.size_to * N / m, between(l.from * m, l.to * m));
+            return;
+        case kind::settlement_left:
+            list += settlement(end::left, l.size * m);
+            return;
+        case kind::settlement_right:
+            list += settlement(end::right, l.size * m);
+            return;
+        case kind::rotation_left:
+            list += support_rotation(end::left, l.size * rad);
+            return;
+        case kind::rotation_right:
+            list += support_rotation(end::right, l.size * rad);
+            return;
+    }
+}
+
+inline sagitta::load_list<> list_of(const std::vector<load>& all) {
+    sagitta::load_list<> list;
+    for (const auto& l : all) add(list, l);
+    return list;
+}
+
+template <class T>
+reference::beam<T> reference_of(reference::hold left, reference::hold right, double L, double EI,
+                                const std::vector<load>& all) {
+    reference::beam<T> b(left, right, L, EI);
+    for (const auto& l : all) {
+        switch (l.what) {
+            case kind::point:
+                b.add_force(l.size, l.from);
+                break;
+            case kind::couple:
+                b.add_couple(l.size, l.from);
+                break;
+            case kind::uniform:
+                b.add_line(l.size, l.size, 0, L);
+                break;
+            case kind::partial_uniform:
+                b.add_line(l.size, l.size, l.from, l.to);
+                break;
+            case kind::linear_whole:
+                b.add_line(l.size, l.size_to, 0, L);
+                break;
+            case kind::linear:
+                b.add_line(l.size, l.size_to, l.from, l.to);
+                break;
+            case kind::settlement_left:
+            case kind::settlement_right:
+                b.add_settlement(l.what == kind::settlement_left, l.size);
+                break;
+            case kind::rotation_left:
+            case kind::rotation_right:
+                b.add_rotation(l.what == kind::rotation_left, l.size);
+                break;
+        }
+    }
+    b.solve();
+    return b;
+}
+
+/// The places where loads begin, stand or end, and both ends of the beam.
+inline std::vector<double> joints_of(double L, const std::vector<load>& all) {
+    std::vector<double> places{0, L};
+    for (const auto& l : all) {
+        if (l.what == kind::point || l.what == kind::couple) places.push_back(l.from);
+        if (l.what == kind::partial_uniform || l.what == kind::linear) {
+            places.push_back(l.from);
+            places.push_back(l.to);
+        }
+    }
+    std::sort(places.begin(), places.end());
+    return places;
+}
+
+/// Calls f(name, beam, left, right) for each way to hold a beam.
+template <class F>
+void with_each_beam(double span, double rigidity, const F& f) {
+    using reference::hold;
+    using namespace sagitta;
+    const auto L = span * units::m;
+    const auto EI = quantity<flexural_rigidity>::from_value(rigidity);
+    f("simple", simple_beam(L, EI), hold::pinned, hold::pinned);
+    f("cantilever", cantilever(L, EI), hold::fixed, hold::free);
+    f("mirrored cantilever", mirrored(cantilever(L, EI)), hold::free, hold::fixed);
+    f("propped", propped_cantilever(L, EI), hold::fixed, hold::pinned);
+    f("mirrored propped", mirrored(propped_cantilever(L, EI)), hold::pinned, hold::fixed);
+    f("fixed", fixed_beam(L, EI), hold::fixed, hold::fixed);
+}
+
+/// Numbers that are the same on every platform; the seed is named where it is used.
+class chance {
+public:
+    explicit chance(std::uint64_t seed) : engine_(seed) {}
+    /// From low up to high.
+    double in(double low, double high) {
+        return low + (high - low) * (static_cast<double>(engine_() >> 11U) * 0x1p-53);
+    }
+    int whole(int low, int high) { return std::min(high, static_cast<int>(in(low, high + 1))); }
+    bool toss() { return in(0, 1) < 0.5; }
+
+private:
+    std::mt19937_64 engine_;
+};
+
+/// A load of any kind, of either sign, anywhere on a span; the deflections of all kinds are of a like size.
+inline load random_load(chance& random, double L, double EI) {
+    const auto what = static_cast<kind>(random.whole(0, 9));
+    const double sign = random.toss() ? 1 : -1;
+    load l{what};
+    switch (what) {
+        case kind::point:
+            l.size = sign * random.in(1, 10) * EI / L / L / L;
+            l.from = random.in(0, L);
+            break;
+        case kind::couple:
+            l.size = sign * random.in(1, 10) * EI / L / L;
+            l.from = random.in(0, L);
+            break;
+        case kind::settlement_left:
+        case kind::settlement_right:
+        case kind::rotation_left:
+        case kind::rotation_right:
+            l.size = sign * random.in(0.01, 0.1) * (what >= kind::rotation_left ? 1 : L) / L;
+            break;
+        default: {
+            l.size = sign * random.in(1, 10) * EI / L / L / L / L;
+            l.size_to = random.in(-10, 10) * EI / L / L / L / L;
+            const double a = random.in(0, L);
+            const double b = random.in(0, L);
+            l.from = std::min(a, b);
+            l.to = std::max(a, b);
+            break;
+        }
+    }
+    return l;
+}
+
+inline std::vector<load> random_loads(chance& random, int count, double L, double EI, reference::hold left,
+                                      reference::hold right) {
+    std::vector<load> all;
+    while (static_cast<int>(all.size()) < count) {
+        const auto l = random_load(random, L, EI);
+        if (can_act(l, left, right)) all.push_back(l);
+    }
+    return all;
+}
+
+}  // namespace scene
