@@ -159,12 +159,12 @@ void with_each_beam(double span, double rigidity, const F& f) {
     using namespace sagitta;
     const auto L = span * units::m;
     const auto EI = quantity<flexural_rigidity>::from_value(rigidity);
-    f("simple", simple_beam(L, EI), hold::pinned, hold::pinned);
-    f("cantilever", cantilever(L, EI), hold::fixed, hold::free);
-    f("mirrored cantilever", mirrored(cantilever(L, EI)), hold::free, hold::fixed);
-    f("propped", propped_cantilever(L, EI), hold::fixed, hold::pinned);
-    f("mirrored propped", mirrored(propped_cantilever(L, EI)), hold::pinned, hold::fixed);
-    f("fixed", fixed_beam(L, EI), hold::fixed, hold::fixed);
+    f(std::string("simple"), simple_beam(L, EI), hold::pinned, hold::pinned);
+    f(std::string("cantilever"), cantilever(L, EI), hold::fixed, hold::free);
+    f(std::string("mirrored cantilever"), mirrored(cantilever(L, EI)), hold::free, hold::fixed);
+    f(std::string("propped"), propped_cantilever(L, EI), hold::fixed, hold::pinned);
+    f(std::string("mirrored propped"), mirrored(propped_cantilever(L, EI)), hold::pinned, hold::fixed);
+    f(std::string("fixed"), fixed_beam(L, EI), hold::fixed, hold::fixed);
 }
 
 /// Numbers that are the same on every platform; the seed is named where it is used.
