@@ -1,0 +1,8 @@
+// expect the compiler's: +='
+#include "twin.hpp"
+
+#ifdef WRONG
+void build(load_list<>& loads) { loads += joist; }
+#else
+void build(load_list<>& loads) { loads += dead; }
+#endif

@@ -1,0 +1,8 @@
+// expect the compiler's: *='
+#include "twin.hpp"
+
+#ifdef WRONG
+void build(load_list<>& loads) { loads *= 1.35 * m; }
+#else
+void build(load_list<>& loads) { loads *= 1.35; }
+#endif

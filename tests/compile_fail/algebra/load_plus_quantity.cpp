@@ -1,0 +1,8 @@
+// expect the compiler's: loads::uniform<
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = dead + 4.5 * kN / m;
+#else
+constexpr auto b = dead + uniform_load(4.5 * kN / m);
+#endif

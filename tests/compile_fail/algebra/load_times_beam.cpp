@@ -1,0 +1,8 @@
+// expect the compiler's: loads::uniform<
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = joist * dead;
+#else
+constexpr auto b = joist.under(dead);
+#endif

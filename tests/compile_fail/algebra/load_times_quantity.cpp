@@ -1,0 +1,8 @@
+// expect the compiler's: loads::uniform<
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = dead * (1.35 * m);
+#else
+constexpr auto b = dead * 1.35;
+#endif

@@ -1,0 +1,8 @@
+// expect the compiler's: conversion from 'double' to
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr quantity<length> L = 7.2;
+#else
+constexpr quantity<length> L = 7.2 * m;
+#endif

@@ -1,0 +1,8 @@
+// expect the compiler's: conversion from 'quantity<unit<
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr quantity<moment> M = 8.0e3 * boost::units::si::newton_meter;
+#else
+constexpr quantity<moment> M = 8.0 * kN * m;
+#endif

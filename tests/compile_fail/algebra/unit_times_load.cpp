@@ -1,0 +1,8 @@
+// expect the compiler's: loads::uniform<
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = kN * dead;
+#else
+constexpr auto b = 1.35 * dead;
+#endif

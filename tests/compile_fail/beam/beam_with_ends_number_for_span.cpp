@@ -1,0 +1,8 @@
+// expect: a length is expected here
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = beam_with_ends<held::pinned, held::fixed>(7, EI);
+#else
+constexpr auto b = beam_with_ends<held::pinned, held::fixed>(7.2 * m, EI);
+#endif

@@ -1,0 +1,8 @@
+// expect the compiler's: no member named 'deflection'
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = greatest_deflection(joist);
+#else
+constexpr auto b = greatest_deflection(line);
+#endif

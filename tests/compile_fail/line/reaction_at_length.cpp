@@ -1,0 +1,8 @@
+// expect the compiler's: reaction
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = line.reaction(0.0 * m);
+#else
+constexpr auto b = line.reaction(end::left);
+#endif

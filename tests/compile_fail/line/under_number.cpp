@@ -1,0 +1,8 @@
+// expect the compiler's: sagitta::detail::superposition<sagitta::beam<
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = joist.under(4.5);
+#else
+constexpr auto b = joist.under(dead);
+#endif

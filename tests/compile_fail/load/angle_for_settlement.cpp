@@ -1,0 +1,8 @@
+// expect: a length is expected here
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = settlement(end::right, 5.0 * mrad);
+#else
+constexpr auto b = settlement(end::right, 5.0 * mm);
+#endif

@@ -1,0 +1,8 @@
+// expect: a load per length is expected here
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = partial_uniform_load(9.0, between(1.2 * m, 4.8 * m));
+#else
+constexpr auto b = partial_uniform_load(9.0 * kN / m, between(1.2 * m, 4.8 * m));
+#endif

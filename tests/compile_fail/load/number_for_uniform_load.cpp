@@ -1,0 +1,8 @@
+// expect: a load per length is expected here
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = uniform_load(4.5);
+#else
+constexpr auto b = uniform_load(4.5 * kN / m);
+#endif

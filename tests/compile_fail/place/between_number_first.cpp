@@ -1,0 +1,8 @@
+// expect: a length is expected here
+#include "twin.hpp"
+
+#ifdef WRONG
+constexpr auto b = between(1.2, 4.8 * m);
+#else
+constexpr auto b = between(1.2 * m, 4.8 * m);
+#endif

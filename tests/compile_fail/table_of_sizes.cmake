@@ -1,0 +1,16 @@
+# Collects the sizes that the twins left behind: cmake -D sizes=FOLDER -D table=FILE -P table_of_sizes.cmake
+cmake_minimum_required(VERSION 3.20)
+
+file(GLOB files ${sizes}/*.txt)
+set(lines)
+foreach(file IN LISTS files)
+  file(STRINGS ${file} line)
+  list(APPEND lines "${line}")
+endforeach()
+if(NOT lines)
+  message(FATAL_ERROR "no twin has left the size of its diagnostic in ${sizes}")
+endif()
+list(SORT lines COMPARE NATURAL ORDER DESCENDING)
+list(JOIN lines "\n" text)
+file(WRITE ${table} "${text}\n")
+message("bytes, twin\n${text}")

@@ -1,0 +1,8 @@
+// expect the compiler's: get_dimension<double>
+#include "twin.hpp"
+
+#ifdef WRONG
+const auto P = parse<double>("22 kN");
+#else
+const auto P = parse<force>("22 kN");
+#endif
