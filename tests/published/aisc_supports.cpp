@@ -3,6 +3,7 @@
 #include "published/redundants.hpp"
 #include "support/published.hpp"
 
+#include <algorithm>
 #include <cmath>
 
 using namespace published;

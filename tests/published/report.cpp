@@ -1,14 +1,34 @@
-// Prints the tally of published values when the tests have run.
+// Prints the tally of published values when the tests have run, and what has been collected but not yet compared.
 #include "support/published.hpp"
 
 #include <iostream>
 
 namespace {
 
+struct left_out {
+    int values;
+    const char* of;
+    const char* because;
+};
+const left_out not_yet_covered[] = {
+    {41,
+     "the deflection limits and load combination factors of IBC, ACI 318, ASCE 7, EN 1990, EN 1992-1-1, EN 1993-1-1, "
+     "British, French and Spanish rules, IS 800 and NDS",
+     "the library has no code limits yet"},
+    {4, "Roark's and Blodgett's shear deflections", "the library has no shear deformation yet"},
+    {1, "Boresi and Schmidt, example 5.6 (3.42 % shear in a tip deflection)", "it has no shear deformation yet"},
+    {4, "Roark, cases 4f, 5b and 5f (y_A, theta_B)", "there the beam moves but does not bend"},
+};
+
 struct published_report : doctest::IReporter {
     explicit published_report(const doctest::ContextOptions& options) : out(options.cout ? *options.cout : std::cout) {}
 
-    void test_run_end(const doctest::TestRunStats&) override { published::tally::of_this_run().print(out); }
+    void test_run_end(const doctest::TestRunStats&) override {
+        published::tally::of_this_run().print(out);
+        for (const auto& [values, of, because] : not_yet_covered) {
+            out << "not yet covered: " << values << "  " << of << ", because " << because << '\n';
+        }
+    }
 
     void report_query(const doctest::QueryData&) override {}
     void test_run_start() override {}
