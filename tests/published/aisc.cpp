@@ -298,7 +298,7 @@ TEST_CASE("AISC diagram 32: simple span with end moments, uniform load") {
 TEST_CASE("AISC diagrams 40 to 42: moving loads on a simple beam, at their worst place") {
     for (const auto& b : beams) {
         const auto [l, EI, w, P, P2] = b;
-        const auto under_one = [&, load = P, span = l](double x) { return moment(simple(b).under(point(load, x)), x); };
+        const auto under_one = [&, load = P](double x) { return moment(simple(b).under(point(load, x)), x); };
         row(aisc, "40a: max moment under one load").equals(P * l / 4, under_one(l / 2));
         CHECK(std::abs(maximum(under_one, 0.2 * l, 0.9 * l).at - l / 2) < 1e-6 * l);
 
