@@ -10,5 +10,7 @@
 #include <sagitta/load.hpp>
 #include <sagitta/load_list.hpp>
 #include <sagitta/moment_area.hpp>
+#include <sagitta/piecewise.hpp>
 #include <sagitta/units.hpp>
 #include <sagitta/version.hpp>
+#include <sagitta/zeros.hpp>

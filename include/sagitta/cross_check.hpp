@@ -8,6 +8,7 @@
 #include <sagitta/units.hpp>
 
 #include <algorithm>
+#include <limits>
 
 namespace sagitta {
 
@@ -38,8 +39,10 @@ struct discrepancy {
         if (!((d < T(0) ? -d : d) <= difference)) difference = d < T(0) ? -d : d;
     }
 
-    T relative_to(const T& floor) const {
-        const T reference = size < floor ? floor : size;
+    /// Relative to the greatest value, or to what the neighbours imply where rounding is all there is.
+    T relative_to(const T& implied) const {
+        const T rounding = implied * (T(1000000) * std::numeric_limits<T>::epsilon());
+        const T reference = size < rounding ? implied : size;
         return difference == T(0) ? T(0) : difference / reference;
     }
 };
@@ -49,8 +52,9 @@ struct discrepancy {
 /// Compares shear, moment, slope and deflection at every joint of the beam and between joints, on both sides
 /// of concentrated loads. About 1e-15 to 1e-13 is rounding; a wrong coefficient shows as its own size.
 ///
-/// A response that all but vanishes along the whole beam (the shear under a constant moment) is measured
-/// against a thousandth of what its neighbours imply (M/L for V), since rounding alone would be all of it.
+/// A response that vanishes along the whole beam but for rounding (the shear under a constant moment, the
+/// deflection of a fixed beam under a constant curvature) is measured against what its neighbours in the chain
+/// imply, such as M/L for V.
 template <class Left, class Right, class N, class Loads>
 [[nodiscard]] auto cross_check(const elastic_line<beam<Left, Right, N>, Loads>& line) {
     using T = typename elastic_line<beam<Left, Right, N>, Loads>::number;
@@ -70,12 +74,11 @@ template <class Left, class Right, class N, class Loads>
         of_deflection.compare(line.deflection(x).value(), deflected.deflection);
     }
     const T flexibility = L / EI;
-    const T thousandth = T(1) / T(1000);
     return cross_check_result<T>{
-        of_shear.relative_to(of_moment.size / L * thousandth),
-        of_moment.relative_to(of_slope.size / flexibility * thousandth),
-        of_slope.relative_to(std::max(of_moment.size * flexibility, of_deflection.size / L) * thousandth),
-        of_deflection.relative_to(of_slope.size * L * thousandth),
+        of_shear.relative_to(of_moment.size / L),
+        of_moment.relative_to(of_slope.size / flexibility),
+        of_slope.relative_to(std::max(of_moment.size * flexibility, of_deflection.size / L)),
+        of_deflection.relative_to(std::max(of_slope.size, of_moment.size * flexibility) * L),
     };
 }
 

@@ -2,7 +2,10 @@
 #pragma once
 
 #include <sagitta/beam.hpp>
-#include <sagitta/detail/load_effect.hpp>
+#include <sagitta/detail/concentrated_effect.hpp>
+#include <sagitta/detail/curvature_effect.hpp>
+#include <sagitta/detail/line_load_effect.hpp>
+#include <sagitta/detail/movement_effect.hpp>
 #include <sagitta/load.hpp>
 #include <sagitta/load_list.hpp>
 
@@ -196,8 +199,27 @@ public:
     template <class X>
     [[nodiscard]] constexpr quantity<line_load, number> load(const X& x, side which = just_right) const {
         const auto place = on_beam(x);
-        return superposed_.template sum<quantity<line_load, number>>(
-            [&](const auto& effect) { return effect.intensity(place, beam_, which); });
+        using result = quantity<line_load, number>;
+        return superposed_.template sum<result>([&](const auto& effect) -> result {
+            if constexpr (requires { effect.intensity(place, beam_, which); }) {
+                return effect.intensity(place, beam_, which);
+            } else {
+                return {};
+            }
+        });
+    }
+    /// The imposed curvature at x, sagging positive (1 per length).
+    template <class X>
+    [[nodiscard]] constexpr quantity<curvature, number> imposed_curvature(const X& x, side which = just_right) const {
+        const auto place = on_beam(x);
+        using result = quantity<curvature, number>;
+        return superposed_.template sum<result>([&](const auto& effect) -> result {
+            if constexpr (requires { effect.imposed(place, beam_, which); }) {
+                return effect.imposed(place, beam_, which);
+            } else {
+                return {};
+            }
+        });
     }
 
     /// The force that the support at an end exerts on the beam, upward positive; 0 at a free end. Loads that

@@ -2,7 +2,8 @@
 #pragma once
 
 #include <sagitta/detail/polynomial.hpp>
-#include <sagitta/elastic_line.hpp>
+#include <sagitta/load.hpp>
+#include <sagitta/piecewise.hpp>
 #include <sagitta/units.hpp>
 
 namespace sagitta {
@@ -14,54 +15,115 @@ struct extreme {
     quantity<Dimension, T> value;
 };
 
+/// The greatest and the least value of a response (with their signs), and where they stand.
+template <class Dimension, class T>
+struct extreme_pair {
+    extreme<Dimension, T> greatest;
+    extreme<Dimension, T> least;
+
+    /// Whichever is greater in magnitude.
+    [[nodiscard]] constexpr const extreme<Dimension, T>& governing() const {
+        return abs(least.value) > abs(greatest.value) ? least : greatest;
+    }
+};
+
 namespace detail {
 
-/// The slope of the elastic line between two neighbouring joints, as a polynomial in t = (x - from)/(to - from)
-/// from 0 to 1. Its coefficients are the closed forms at the first joint.
-template <class Line>
-constexpr auto slope_between(const Line& line, const quantity<length, typename Line::number>& from,
-                             const quantity<length, typename Line::number>& to) {
+/// The response of a line at a place, by its closed forms.
+template <response R, class Line, class X>
+constexpr auto answer_of(const Line& line, const X& x, side which) {
+    if constexpr (R == response::deflection) {
+        return line.deflection(x);
+    } else if constexpr (R == response::slope) {
+        return line.slope(x);
+    } else if constexpr (R == response::moment) {
+        return line.moment(x, which);
+    } else {
+        return line.shear(x, which);
+    }
+}
+
+/// Offers to consider(x, value) every place between first and last where a response can be extreme: both sides
+/// of every joint, and every turning point between joints.
+template <response R, class Line, class Consider>
+constexpr void for_each_candidate(const Line& line, const quantity<length, typename Line::number>& first,
+                                  const quantity<length, typename Line::number>& last, const Consider& consider) {
     using T = typename Line::number;
-    const auto h = to - from;
-    const auto flexibility = h / line.supported().EI();
-    const auto w = line.load(from, just_right);
-    const auto growth = line.load(to, just_left) - w;
-    return polynomial<T, 4>{{
-        line.slope(from).value(),
-        -(line.moment(from, just_right) * flexibility).value(),
-        -(line.shear(from, just_right) * h * flexibility / T(2)).value(),
-        (w * h * h * flexibility / T(6)).value(),
-        (growth * h * h * flexibility / T(24)).value(),
-    }};
+    for_each_stretch(line, first, last, [&](const quantity<length, T>& from, const quantity<length, T>& to) {
+        const auto rate = normalized<R>(elastic_segment<T>(line, from, to)).derivative();
+        consider(from, answer_of<R>(line, from, just_right));
+        for (const auto& turning : roots_between_0_and_1(rate, rate.noise())) {
+            const auto x = from + (to - from) * turning.at;
+            consider(x, answer_of<R>(line, x, just_right));
+        }
+        consider(to, answer_of<R>(line, to, just_left));
+    });
+}
+
+template <response R, class Line>
+constexpr auto extremes_between(const Line& line, const quantity<length, typename Line::number>& first,
+                                const quantity<length, typename Line::number>& last) {
+    using T = typename Line::number;
+    const auto start = answer_of<R>(line, first, just_right);
+    extreme_pair<unit_of_response<R>, T> found{{first, start}, {first, start}};
+    for_each_candidate<R>(line, first, last, [&](const quantity<length, T>& x, const auto& value) {
+        if (value > found.greatest.value) found.greatest = {x, value};
+        if (value < found.least.value) found.least = {x, value};
+    });
+    return found;
+}
+
+/// Extremes over the whole beam, or over a stretch of it.
+template <response R, class Line>
+constexpr auto extremes_of(const Line& line) {
+    return extremes_between<R>(line, {}, line.supported().span());
+}
+template <response R, class Line, class Stretch>
+constexpr auto extremes_of(const Line& line, const Stretch& where) {
+    using T = typename Line::number;
+    const auto stretch = expect_stretch<T>(where);
+    if (!(stretch.to <= line.supported().span())) [[unlikely]]
+        refuse("between: to", stretch.to, "must not lie beyond the span of the beam, ", line.supported().span());
+    return extremes_between<R>(line, stretch.from, stretch.to);
 }
 
 }  // namespace detail
 
-/// The deflection that is greatest in magnitude, with its sign, and where it is. Every stationary point of
-/// every stretch and every joint is considered; of equal ones the leftmost is returned.
-///
-/// Accuracy in double: the value to 1e-12 of itself; the place to 1e-12 of the span, unless the moment nearly
-/// vanishes there (the line is then flat and its summit as ill-defined as the loads make it).
+// Each takes a line, and optionally a stretch of the beam: extremes_of_moment(line, between(1.0*m, 3.0*m)).
+// Accuracy in double: values to 1e-12 of the greatest; places to 1e-12 of the span, unless the next response in
+// the chain (the moment, for a deflection) nearly vanishes there: the line is then flat and its summit as
+// ill-defined as the loads make it. invalid_input where the stretch does not lie on the beam.
+
+/// Greatest and least deflection (lengths, downward positive).
+template <class Line, class... Stretch>
+[[nodiscard]] constexpr auto extremes_of_deflection(const Line& line, const Stretch&... where) {
+    return detail::extremes_of<detail::response::deflection>(line, where...);
+}
+/// Greatest and least slope (plane angles, clockwise positive).
+template <class Line, class... Stretch>
+[[nodiscard]] constexpr auto extremes_of_slope(const Line& line, const Stretch&... where) {
+    return detail::extremes_of<detail::response::slope>(line, where...);
+}
+/// Greatest and least bending moment (sagging positive); both sides of a couple are considered.
+template <class Line, class... Stretch>
+[[nodiscard]] constexpr auto extremes_of_moment(const Line& line, const Stretch&... where) {
+    return detail::extremes_of<detail::response::moment>(line, where...);
+}
+/// Greatest and least shear force; both sides of a point load are considered.
+template <class Line, class... Stretch>
+[[nodiscard]] constexpr auto extremes_of_shear(const Line& line, const Stretch&... where) {
+    return detail::extremes_of<detail::response::shear>(line, where...);
+}
+
+/// The deflection that is greatest in magnitude, with its sign, and where it is; of equal ones the leftmost.
 template <class Line>
 [[nodiscard]] constexpr auto greatest_deflection(const Line& line) {
     using T = typename Line::number;
     extreme<length, T> greatest{};
-    const auto consider = [&](const quantity<length, T>& x) {
-        const auto v = line.deflection(x);
-        if (abs(v) > abs(greatest.value)) greatest = {x, v};
-    };
-    const auto joints = line.joints();
-    consider(joints.front());
-    for (std::size_t i = 1; i < joints.size(); ++i) {
-        const auto from = joints[i - 1];
-        const auto to = joints[i];
-        if (!(from < to)) continue;
-        for (const T& t : detail::sign_changes(detail::slope_between(line, from, to))) {
-            const auto x = from + (to - from) * t;
-            consider(x < to ? x : to);
-        }
-        consider(to);
-    }
+    detail::for_each_candidate<detail::response::deflection>(
+        line, {}, line.supported().span(), [&](const quantity<length, T>& x, const quantity<length, T>& v) {
+            if (abs(v) > abs(greatest.value)) greatest = {x, v};
+        });
     return greatest;
 }
 

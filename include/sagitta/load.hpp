@@ -170,4 +170,38 @@ template <class End, class R>
     return loads::movement<End, loads::motion::rotation, T>(detail::expect_angle<T>(size));
 }
 
+/// A curvature (1 per length, sagging positive) that a cause other than load imposes over a stretch, such as
+/// shrinkage: imposed_curvature(0.0002/m, between(0.0*m, 3.0*m)).
+template <class C, class S>
+[[nodiscard]] constexpr auto imposed_curvature(const C& size, const S& where) {
+    using T = std::common_type_t<detail::common_number<C>, typename detail::number_of_place<S>::type>;
+    return loads::imposed_curvature<T, loads::stretch<T>>(detail::expect_curvature<T>(size),
+                                                          detail::expect_stretch<T>(where));
+}
+
+/// The same over the whole beam.
+template <class C>
+[[nodiscard]] constexpr auto imposed_curvature(const C& size) {
+    using T = detail::common_number<C>;
+    return loads::imposed_curvature<T, loads::whole_beam>(detail::expect_curvature<T>(size), {});
+}
+
+/// The side of a section that is the warmer one.
+enum class warm_side { top, bottom };
+
+/// A temperature that varies linearly through the depth: the curvature alpha (difference) / depth, sagging where
+/// the bottom is the warmer side. expansion: coefficient alpha (1 per temperature); difference: between top and
+/// bottom (a temperature); depth of the section (a length greater than 0); then optionally a stretch.
+template <class A, class D, class H, class... Stretch>
+[[nodiscard]] constexpr auto temperature_gradient(const A& expansion, const D& difference, warm_side warm,
+                                                  const H& depth, const Stretch&... where) {
+    using T = detail::common_number<A, D, H>;
+    const auto h = detail::expect_length<T>(depth);
+    if (!detail::is_positive(h.value())) [[unlikely]]
+        detail::refuse("temperature_gradient: depth", h, "must be greater than 0 m and finite");
+    const T strain = detail::expect_expansion<T>(expansion).value() * detail::expect_temperature<T>(difference).value();
+    const auto size = quantity<curvature, T>::from_value(strain / h.value());
+    return sagitta::imposed_curvature(warm == warm_side::bottom ? size : -size, where...);
+}
+
 }  // namespace sagitta

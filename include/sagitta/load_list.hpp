@@ -15,7 +15,8 @@ using any_load =
     std::variant<concentrated<action::point_force, T>, concentrated<action::couple, T>, uniform<T, whole_beam>,
                  uniform<T, stretch<T>>, linear<T, whole_beam>, linear<T, stretch<T>>,
                  movement<end::left_end, motion::settlement, T>, movement<end::right_end, motion::settlement, T>,
-                 movement<end::left_end, motion::rotation, T>, movement<end::right_end, motion::rotation, T>>;
+                 movement<end::left_end, motion::rotation, T>, movement<end::right_end, motion::rotation, T>,
+                 imposed_curvature<T, whole_beam>, imposed_curvature<T, stretch<T>>>;
 
 }  // namespace loads
 

@@ -17,6 +17,8 @@
 #include <boost/units/systems/si/plane_angle.hpp>
 #include <boost/units/systems/si/pressure.hpp>
 #include <boost/units/systems/si/surface_tension.hpp>
+#include <boost/units/systems/si/temperature.hpp>
+#include <boost/units/systems/si/wavenumber.hpp>
 
 #include <type_traits>
 
@@ -34,6 +36,9 @@ using stress = boost::units::si::pressure;
 using area = boost::units::si::area;
 using second_moment_of_area =
     boost::units::power_typeof_helper<boost::units::si::length, boost::units::static_rational<4>>::type;
+using curvature = boost::units::si::wavenumber;
+using temperature = boost::units::si::temperature;
+using expansion_coefficient = boost::units::divide_typeof_helper<dimensionless, temperature>::type;
 using flexural_rigidity = boost::units::multiply_typeof_helper<stress, second_moment_of_area>::type;
 
 /// A value of one dimension: quantity<length>, quantity<moment, float>.
@@ -187,6 +192,8 @@ inline constexpr unit_constant<stress, detail::scale{.tens = 3, .inches = -2, .p
 inline constexpr unit_constant<plane_angle> rad{};
 inline constexpr unit_constant<plane_angle, detail::scale{.tens = -3}> mrad{};
 inline constexpr unit_constant<plane_angle, detail::scale{.degrees = 1}> deg{};
+
+inline constexpr unit_constant<temperature> K{};
 
 inline constexpr auto m2 = m * m;
 inline constexpr auto cm2 = cm * cm;

@@ -14,6 +14,13 @@ namespace sagitta::detail {
 
 enum class acting_kind { point_force, couple, line };
 
+/// A curvature imposed between two places.
+template <class T>
+struct acting_curvature {
+    T from, to;
+    T size;
+};
+
 /// A force or couple at from = to, or a line load from size_from to size_to.
 template <class T>
 struct acting_load {
@@ -30,16 +37,17 @@ struct acting_load {
 template <class T>
 struct acting_loads {
     std::vector<acting_load<T>> loads;
+    std::vector<acting_curvature<T>> curvatures;
     T settlement_left{}, settlement_right{};
     T rotation_left{}, rotation_right{};
 
     template <class Loads>
-    acting_loads(const Loads& all, const T& L) {
+    acting_loads(const Loads& acting, const T& beam_span) {
         if constexpr (loads::load_expression<Loads>) {
-            std::apply([&](const auto&... single) { (add(single, L), ...); }, loads::cases_of(all));
+            std::apply([&](const auto&... single) { (add(single, beam_span), ...); }, loads::cases_of(acting));
         } else {
-            loads.reserve(all.cases().size());
-            for (const auto& any : all.cases()) std::visit([&](const auto& single) { add(single, L); }, any);
+            loads.reserve(acting.cases().size());
+            for (const auto& any : acting.cases()) std::visit([&](const auto& single) { add(single, beam_span); }, any);
         }
     }
 
@@ -52,16 +60,32 @@ private:
     }
 
     template <class Load>
-    requires requires { typename Load::where_type; }
-    void add(const Load& load, const T& L) {
-        T from(0);
-        T to = L;
+    requires requires { Load::is_uniform; }
+    void add(const Load& load, const T& beam_span) {
+        loads.push_back({acting_kind::line, start(load, T(0)), stop(load, beam_span),
+                         static_cast<T>(load.size_from().value()), static_cast<T>(load.size_to().value())});
+    }
+
+    template <class N, class Where>
+    void add(const loads::imposed_curvature<N, Where>& load, const T& beam_span) {
+        curvatures.push_back({start(load, T(0)), stop(load, beam_span), static_cast<T>(load.size().value())});
+    }
+
+    template <class Load>
+    static T start(const Load& load, const T& left_end) {
         if constexpr (requires { load.where().from; }) {
-            from = static_cast<T>(load.where().from.value());
-            to = static_cast<T>(load.where().to.value());
+            return static_cast<T>(load.where().from.value());
+        } else {
+            return left_end;
         }
-        loads.push_back({acting_kind::line, from, to, static_cast<T>(load.size_from().value()),
-                         static_cast<T>(load.size_to().value())});
+    }
+    template <class Load>
+    static T stop(const Load& load, const T& right_end) {
+        if constexpr (requires { load.where().to; }) {
+            return static_cast<T>(load.where().to.value());
+        } else {
+            return right_end;
+        }
     }
 
     template <class End, loads::motion Motion, class N>

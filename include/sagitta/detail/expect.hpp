@@ -40,6 +40,25 @@ constexpr quantity<plane_angle, T> expect_angle(const Q& q) {
 }
 
 template <class T, class Q>
+constexpr quantity<curvature, T> expect_curvature(const Q& q) {
+    static_assert(has_dimension<Q, curvature>, "sagitta: a curvature (1 per length) is expected here, such as 0.001/m");
+    return coherent<curvature, T>(q);
+}
+
+template <class T, class Q>
+constexpr quantity<temperature, T> expect_temperature(const Q& q) {
+    static_assert(has_dimension<Q, temperature>, "sagitta: a temperature difference is expected here, such as 20.0*K");
+    return coherent<temperature, T>(q);
+}
+
+template <class T, class Q>
+constexpr quantity<expansion_coefficient, T> expect_expansion(const Q& q) {
+    static_assert(has_dimension<Q, expansion_coefficient>,
+                  "sagitta: a coefficient of thermal expansion is expected here, such as 12e-6/K");
+    return coherent<expansion_coefficient, T>(q);
+}
+
+template <class T, class Q>
 constexpr quantity<flexural_rigidity, T> expect_rigidity(const Q& q) {
     static_assert(has_dimension<Q, flexural_rigidity>,
                   "sagitta: a flexural rigidity EI is expected here, such as 210.0*GPa * 8356.0*cm4");

@@ -4,10 +4,9 @@
 #pragma once
 
 #include <sagitta/detail/acting_loads.hpp>
+#include <sagitta/detail/panel.hpp>
 #include <sagitta/detail/statics.hpp>
 #include <sagitta/ends.hpp>
-
-#include <boost/math/quadrature/gauss.hpp>
 
 #include <algorithm>
 #include <cstddef>
@@ -16,35 +15,6 @@
 #include <vector>
 
 namespace sagitta::detail {
-
-/// The moments of the curvature diagram over one panel: all that both moment-area theorems need.
-template <class T>
-struct panel_moments {
-    T area{};        // integral of curvature
-    T about_from{};  // integral of curvature times the distance from the start
-    T about_to{};    // integral of curvature times the distance from the end
-};
-
-template <class T, std::size_t points, class Curvature>
-panel_moments<T> integrate_panel(const T& from, const T& to, const Curvature& curvature) {
-    using rule = boost::math::quadrature::gauss<T, points>;
-    const T half = (to - from) / T(2);
-    panel_moments<T> sum;
-    const auto add = [&](const T& offset, const T& weight) {
-        const T passed = half * (T(1) + offset);
-        const T part = weight * half * curvature(section<T>{from, passed});
-        sum.area += part;
-        sum.about_from += part * passed;
-        sum.about_to += part * half * (T(1) - offset);
-    };
-    const auto& offsets = rule::abscissa();
-    const auto& weights = rule::weights();
-    for (std::size_t i = 0; i < offsets.size(); ++i) {
-        add(offsets[i], weights[i]);
-        if (offsets[i] != T(0)) add(-offsets[i], weights[i]);
-    }
-    return sum;
-}
 
 template <class T>
 struct slope_and_deflection {
@@ -70,6 +40,7 @@ public:
         for (const auto& load : acting.loads) {
             balanced_.emplace_back(load, carrier_of<Left, Right>(load, L_), L_);
         }
+        curvatures_ = acting.curvatures;
         make_panels(acting, steps);
         solve_redundants(acting);
         march(acting);
@@ -93,7 +64,10 @@ public:
         const panel& p = panel_of(x);
         if (x == p.from) return p.at_from;
         if (x == p.to) return p.at_to;
-        if constexpr (Left::against_deflection) {
+        if constexpr (carried_by_both) {
+            return between_supports(x, p.left_of_it + about_left(p.from, bending(p.from, x)),
+                                    p.right_of_it + about_right(p.to, bending(x, p.to)));
+        } else if constexpr (Left::against_deflection) {
             return forward(p.at_from, x - p.from, bending(p.from, x));
         } else {
             return backward(p.at_to, p.to - x, bending(x, p.to));
@@ -136,6 +110,7 @@ private:
     struct panel {
         T from, to;
         panel_moments<T> curvature{};
+        T left_of_it{}, right_of_it{};  // moments of the curvature there about the nearer end of the beam
         deflected at_from{}, at_to{};
     };
 
@@ -152,9 +127,14 @@ private:
         return integrate_panel<T, points>(from, to, curvature);
     }
 
-    /// M/EI between two places of one panel.
+    /// The curvature between two places of one panel: M/EI and what is imposed.
     panel_moments<T> bending(const T& from, const T& to) const {
-        return integrate(from, to, [&](const section& x) { return statics_at(x, just_right).moment / EI_at(x.x()); });
+        T imposed(0);
+        for (const auto& each : curvatures_) {
+            if (each.from < to && each.to > from) imposed += each.size;
+        }
+        return integrate(from, to,
+                         [&](const section& x) { return statics_at(x, just_right).moment / EI_at(x.x()) + imposed; });
     }
 
     void make_panels(const acting_loads<T>& acting, const std::vector<T>& steps) {
@@ -163,6 +143,10 @@ private:
         for (const auto& load : acting.loads) {
             joints.push_back(load.from);
             joints.push_back(load.to);
+        }
+        for (const auto& imposed : curvatures_) {
+            joints.push_back(imposed.from);
+            joints.push_back(imposed.to);
         }
         joints.insert(joints.end(), steps.begin(), steps.end());
         std::sort(joints.begin(), joints.end());
@@ -224,14 +208,27 @@ private:
         }
     }
 
-    /// From an end whose deflection and slope are known to the other, panel by panel.
+    /// Deflection and slope at the panel bounds. Between two supports by both of them; else from the clamped end
+    /// to the free one.
     void march(const acting_loads<T>& acting) {
-        if constexpr (Left::against_deflection) {
-            deflected here{acting.rotation_left, acting.settlement_left};
-            if constexpr (!Left::against_rotation) {
-                const auto of_panel = [](const panel& p) -> const panel_moments<T>& { return p.curvature; };
-                here.slope = (acting.settlement_right - acting.settlement_left) / L_ + work(of_panel, T(1), T(0));
+        if constexpr (carried_by_both) {
+            ends_ = {acting.settlement_left, acting.settlement_right};
+            T sum(0);
+            for (auto& p : panels_) {
+                p.left_of_it = sum;
+                sum += about_left(p.from, p.curvature);
             }
+            sum = T(0);
+            for (std::size_t i = panels_.size(); i-- > 0;) {
+                panels_[i].right_of_it = sum;
+                sum += about_right(panels_[i].to, panels_[i].curvature);
+            }
+            for (auto& p : panels_) {
+                p.at_from = between_supports(p.from, p.left_of_it, p.right_of_it + about_right(p.to, p.curvature));
+                p.at_to = between_supports(p.to, p.left_of_it + about_left(p.from, p.curvature), p.right_of_it);
+            }
+        } else if constexpr (Left::against_deflection) {
+            deflected here{acting.rotation_left, acting.settlement_left};
             for (auto& p : panels_) {
                 p.at_from = here;
                 here = forward(here, p.to - p.from, p.curvature);
@@ -246,6 +243,18 @@ private:
                 p.at_from = here;
             }
         }
+    }
+
+    static T about_left(const T& from, const panel_moments<T>& c) { return c.area * from + c.about_from; }
+    T about_right(const T& to, const panel_moments<T>& c) const { return c.area * (L_ - to) + c.about_to; }
+
+    /// The conjugate beam (Mohr) on its two supports: what bends left of x and right of it, each seen from its own
+    /// side, so that nothing cancels. Clamped ends are level because the redundants make them so.
+    deflected between_supports(const T& x, const T& left_of_x, const T& right_of_x) const {
+        const T xi = x / L_;
+        const T eta = (L_ - x) / L_;
+        return {(ends_.right - ends_.left + right_of_x - left_of_x) / L_,
+                eta * (ends_.left + left_of_x) + xi * (ends_.right + right_of_x)};
     }
 
     static deflected forward(const deflected& start, const T& width, const panel_moments<T>& c) {
@@ -264,8 +273,12 @@ private:
     T L_;
     Rigidity EI_;
     std::vector<balanced_load<T>> balanced_;
+    std::vector<acting_curvature<T>> curvatures_;
     std::vector<panel> panels_;
     T redundant_left_{}, redundant_right_{};
+    struct {
+        T left{}, right{};
+    } ends_;  // how far the supports have settled
 };
 
 }  // namespace sagitta::detail

@@ -131,6 +131,28 @@ private:
     quantity<unit, T> size_;
 };
 
+/// An imposed curvature over a stretch (Where: stretch<T> or whole_beam): what a temperature gradient or uneven
+/// shrinkage would make of the beam if nothing held it.
+template <class T, class Where>
+class imposed_curvature {
+public:
+    using number = T;
+    using where_type = Where;
+
+    constexpr imposed_curvature(const quantity<curvature, T>& size, const Where& where) : size_(size), where_(where) {
+        detail::require_finite("imposed_curvature: size", size);
+    }
+
+    /// Positive where it makes the beam sag.
+    [[nodiscard]] constexpr const quantity<curvature, T>& size() const { return size_; }
+    [[nodiscard]] constexpr const Where& where() const { return where_; }
+    [[nodiscard]] constexpr imposed_curvature scaled(const T& factor) const { return {size_ * factor, where_}; }
+
+private:
+    quantity<curvature, T> size_;
+    Where where_;
+};
+
 template <class L>
 inline constexpr bool is_load_case = false;
 template <action A, class T>
@@ -141,6 +163,8 @@ template <class T, class W>
 inline constexpr bool is_load_case<linear<T, W>> = true;
 template <class E, motion M, class T>
 inline constexpr bool is_load_case<movement<E, M, T>> = true;
+template <class T, class W>
+inline constexpr bool is_load_case<imposed_curvature<T, W>> = true;
 
 template <class L>
 concept load_case = is_load_case<L>;

@@ -2,6 +2,8 @@
 // of the derivative a polynomial is monotone and has at most one root, so that none can be missed.
 #pragma once
 
+#include <sagitta/detail/bounded_list.hpp>
+
 #include <array>
 #include <cstddef>
 #include <limits>
@@ -24,17 +26,27 @@ struct polynomial {
         for (std::size_t i = 1; i <= Degree; ++i) d.c[i - 1] = T(static_cast<int>(i)) * c[i];
         return d;
     }
+
+    constexpr bool is_zero() const {
+        for (const T& each : c) {
+            if (each != T(0)) return false;
+        }
+        return true;
+    }
+
+    /// What rounding can make of a value on [0, 1]: the sum of the magnitudes times a few units in the last place.
+    constexpr T noise() const {
+        T sum(0);
+        for (const T& each : c) sum += each < T(0) ? -each : each;
+        return sum * (T(4) * std::numeric_limits<T>::epsilon());
+    }
 };
 
-/// At most Capacity numbers, ascending.
-template <class T, std::size_t Capacity>
-struct root_list {
-    std::array<T, Capacity> at{};
-    std::size_t count = 0;
-
-    constexpr void add(const T& root) { at[count++] = root; }
-    constexpr const T* begin() const { return at.data(); }
-    constexpr const T* end() const { return at.data() + count; }
+/// A root: where, and whether the polynomial changes its sign there or only touches zero.
+template <class T>
+struct root {
+    T at{};
+    bool crosses = true;
 };
 
 /// The root in [low, high], where p changes sign and is monotone. Newton steps, kept inside the bracket.
@@ -58,26 +70,39 @@ constexpr T bracketed_root(const polynomial<T, Degree>& p, T low, T high) {
     return t;
 }
 
-/// All places in the open interval (0, 1) where p changes sign.
+/// All roots in the open interval (0, 1), ascending. Values up to tolerance count as zero: a turning point with
+/// such a value is one double root; at the ends of the interval they are left to the caller.
 template <class T, std::size_t Degree>
-constexpr root_list<T, Degree> sign_changes(const polynomial<T, Degree>& p) {
-    root_list<T, Degree> roots;
-    T low(0);
-    T at_low = p(low);
-    const auto examine = [&](const T& high) {
-        const T at_high = p(high);
-        if (at_low == T(0)) {
-            if (low > T(0)) roots.add(low);
-        } else if ((at_low < T(0)) != (at_high < T(0)) && at_high != T(0)) {
-            roots.add(bracketed_root(p, low, high));
-        }
-        low = high;
-        at_low = at_high;
-    };
+constexpr bounded_list<root<T>, Degree> roots_between_0_and_1(const polynomial<T, Degree>& p, const T& tolerance) {
+    // Turning points cut the interval into monotone stretches; one with opposite signs at its ends has a root.
+    bounded_list<T, Degree + 1> cuts;
+    cuts.push_back(T(0));
     if constexpr (Degree > 1) {
-        for (const T& turning : sign_changes(p.derivative())) examine(turning);
+        const auto d = p.derivative();
+        for (const auto& turning : roots_between_0_and_1(d, d.noise())) cuts.push_back(turning.at);
     }
-    examine(T(1));
+    cuts.push_back(T(1));
+
+    const auto sign_at = [&](const T& t) {
+        const T value = p(t);
+        return value > tolerance ? 1 : value < -tolerance ? -1 : 0;
+    };
+    bounded_list<root<T>, Degree> roots;
+    int sign = sign_at(cuts[0]);
+    int before = sign;  // the last sign that was not zero
+    for (std::size_t i = 1; i < cuts.size(); ++i) {
+        const int next = sign_at(cuts[i]);
+        const bool turning = i + 1 < cuts.size();
+        if (sign * next < 0) {
+            roots.push_back({bracketed_root(p, cuts[i - 1], cuts[i]), true});
+        } else if (next == 0 && turning && (sign != 0 || i == 1)) {
+            roots.push_back({cuts[i], false});
+        } else if (sign == 0 && next * before < 0 && !roots.empty()) {
+            roots.back().crosses = true;  // a flat passage through zero
+        }
+        sign = next;
+        if (sign != 0) before = sign;
+    }
     return roots;
 }
 

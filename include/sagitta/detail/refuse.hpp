@@ -25,6 +25,8 @@ inline constexpr const char* coherent_symbol<moment> = " N*m";
 template <>
 inline constexpr const char* coherent_symbol<line_load> = " N/m";
 template <>
+inline constexpr const char* coherent_symbol<curvature> = " 1/m";
+template <>
 inline constexpr const char* coherent_symbol<flexural_rigidity> = " N*m^2";
 
 inline std::string number_text(double number) {

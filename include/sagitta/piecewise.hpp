@@ -1,0 +1,183 @@
+// The elastic line as what it is: one polynomial after the other, each taken out with its units.
+#pragma once
+
+#include <sagitta/detail/bounded_list.hpp>
+#include <sagitta/detail/end_state.hpp>
+#include <sagitta/detail/expect.hpp>
+#include <sagitta/detail/polynomial.hpp>
+#include <sagitta/ends.hpp>
+#include <sagitta/units.hpp>
+
+#include <array>
+#include <cstddef>
+#include <tuple>
+#include <utility>
+#include <vector>
+
+namespace sagitta {
+
+/// A stretch of an elastic line between two neighbouring joints, where no load begins, ends or stands. Its
+/// polynomials run in s = x - from; all follow from the values at its start.
+template <class T>
+class elastic_segment {
+    using per_length = typename boost::units::divide_typeof_helper<line_load, length>::type;
+
+public:
+    using number = T;
+
+    constexpr elastic_segment() = default;
+
+    /// The segment of a line between two places that have no joint between them.
+    template <class Line>
+    constexpr elastic_segment(const Line& whole_line, const quantity<length, T>& from, const quantity<length, T>& to)
+        : from_(from),
+          to_(to),
+          EI_(whole_line.supported().EI()),
+          v_(whole_line.deflection(from)),
+          slope_(whole_line.slope(from)),
+          M_(whole_line.moment(from, just_right)),
+          bend_(M_ / EI_ + whole_line.imposed_curvature(from, just_right)),
+          V_(whole_line.shear(from, just_right)),
+          w_(whole_line.load(from, just_right)),
+          growth_((whole_line.load(to, just_left) - w_) / (to - from)) {}
+
+    [[nodiscard]] constexpr const quantity<length, T>& from() const { return from_; }
+    [[nodiscard]] constexpr const quantity<length, T>& to() const { return to_; }
+
+    // The coefficients of s^0, s^1, ... as quantities, each with its own dimension.
+
+    /// Deflection: degree 5 (length, 1, 1/length, ...).
+    [[nodiscard]] constexpr auto deflection_coefficients() const {
+        return std::tuple(v_, detail::as_ratio(slope_), -bend_ / T(2), -V_ / (T(6) * EI_), w_ / (T(24) * EI_),
+                          growth_ / (T(120) * EI_));
+    }
+    /// Slope: degree 4, as a ratio (1, 1/length, ...).
+    [[nodiscard]] constexpr auto slope_coefficients() const {
+        return std::tuple(detail::as_ratio(slope_), -bend_, -V_ / (T(2) * EI_), w_ / (T(6) * EI_),
+                          growth_ / (T(24) * EI_));
+    }
+    /// Moment: degree 3.
+    [[nodiscard]] constexpr auto moment_coefficients() const { return std::tuple(M_, V_, -w_ / T(2), -growth_ / T(6)); }
+    /// Shear: degree 2.
+    [[nodiscard]] constexpr auto shear_coefficients() const { return std::tuple(V_, -w_, -growth_ / T(2)); }
+    /// Line load: degree 1.
+    [[nodiscard]] constexpr auto load_coefficients() const { return std::tuple(w_, growth_); }
+
+    // Values at a place x (a length from the left end of the beam; the polynomials go on beyond the segment).
+
+    template <class X>
+    [[nodiscard]] constexpr quantity<length, T> deflection(const X& x) const {
+        return value(deflection_coefficients(), x);
+    }
+    template <class X>
+    [[nodiscard]] constexpr quantity<plane_angle, T> slope(const X& x) const {
+        return detail::as_angle(value(slope_coefficients(), x));
+    }
+    template <class X>
+    [[nodiscard]] constexpr quantity<sagitta::moment, T> moment(const X& x) const {
+        return value(moment_coefficients(), x);
+    }
+    template <class X>
+    [[nodiscard]] constexpr quantity<force, T> shear(const X& x) const {
+        return value(shear_coefficients(), x);
+    }
+    template <class X>
+    [[nodiscard]] constexpr quantity<line_load, T> load(const X& x) const {
+        return value(load_coefficients(), x);
+    }
+
+private:
+    template <std::size_t i = 0, class... C>
+    static constexpr auto horner(const std::tuple<C...>& c, const quantity<length, T>& s) {
+        if constexpr (i + 1 == sizeof...(C)) {
+            return std::get<i>(c);
+        } else {
+            return std::get<i>(c) + s * horner<i + 1>(c, s);
+        }
+    }
+    template <class Coefficients, class X>
+    constexpr auto value(const Coefficients& c, const X& x) const {
+        return horner(c, detail::expect_length<T>(x) - from_);
+    }
+
+    quantity<length, T> from_{}, to_{};
+    quantity<flexural_rigidity, T> EI_{};
+    quantity<length, T> v_{};
+    quantity<plane_angle, T> slope_{};
+    quantity<sagitta::moment, T> M_{};
+    quantity<curvature, T> bend_{};  // of load and imposed
+    quantity<force, T> V_{};
+    quantity<line_load, T> w_{};
+    quantity<per_length, T> growth_{};
+};
+
+namespace detail {
+
+/// A list with room for so many values a segment: bounded where the line's joints are, else a vector.
+template <class Value, std::size_t a_segment, class Joints>
+struct list_by_segment {
+    using type = std::vector<Value>;
+};
+template <class Value, std::size_t a_segment, class X, std::size_t count>
+struct list_by_segment<Value, a_segment, std::array<X, count>> {
+    using type = bounded_list<Value, a_segment * count>;
+};
+template <class Value, std::size_t a_segment, class Line>
+using list_along = typename list_by_segment<Value, a_segment, decltype(std::declval<const Line&>().joints())>::type;
+
+/// Calls visit(from, to) for every stretch without joints between two places, in order.
+template <class Line, class Visit>
+constexpr void for_each_stretch(const Line& line, const quantity<length, typename Line::number>& first,
+                                const quantity<length, typename Line::number>& last, const Visit& visit) {
+    auto from = first;
+    const auto joints = line.joints();
+    for (const auto& joint : joints) {
+        const auto to = joint < last ? joint : last;
+        if (from < to) {
+            visit(from, to);
+            from = to;
+        }
+    }
+}
+
+/// The polynomial of one response over a segment, in t = (x - from)/(to - from) from 0 to 1, in coherent SI.
+template <response R, class T>
+constexpr auto normalized(const elastic_segment<T>& segment) {
+    const auto coefficients = [&] {
+        if constexpr (R == response::deflection) {
+            return segment.deflection_coefficients();
+        } else if constexpr (R == response::slope) {
+            return segment.slope_coefficients();
+        } else if constexpr (R == response::moment) {
+            return segment.moment_coefficients();
+        } else {
+            return segment.shear_coefficients();
+        }
+    }();
+    const T h = (segment.to() - segment.from()).value();
+    return std::apply(
+        [&](const auto&... c) {
+            polynomial<T, sizeof...(c) - 1> p;
+            std::size_t i = 0;
+            T power(1);
+            ((p.c[i++] = c.value() * power, power *= h), ...);
+            return p;
+        },
+        coefficients);
+}
+
+}  // namespace detail
+
+/// The segments of an elastic line from left to right, without gaps. An array-like list without allocation
+/// where the loads are known when compiling, a vector for a load_list.
+template <class Line>
+[[nodiscard]] constexpr auto piecewise_form(const Line& line) {
+    using T = typename Line::number;
+    detail::list_along<elastic_segment<T>, 1, Line> segments;
+    detail::for_each_stretch(line, {}, line.supported().span(), [&](const auto& from, const auto& to) {
+        segments.push_back(elastic_segment<T>(line, from, to));
+    });
+    return segments;
+}
+
+}  // namespace sagitta
