@@ -2,6 +2,7 @@
 #pragma once
 
 #include <sagitta/beam.hpp>
+#include <sagitta/chord.hpp>
 #include <sagitta/cross_check.hpp>
 #include <sagitta/elastic_line.hpp>
 #include <sagitta/ends.hpp>
@@ -11,6 +12,7 @@
 #include <sagitta/load_list.hpp>
 #include <sagitta/moment_area.hpp>
 #include <sagitta/piecewise.hpp>
+#include <sagitta/series.hpp>
 #include <sagitta/units.hpp>
 #include <sagitta/version.hpp>
 #include <sagitta/zeros.hpp>
