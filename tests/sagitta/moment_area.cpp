@@ -1,5 +1,6 @@
 // The moment-area theorems against slopes and deflections of the closed forms, and the integrator with stiffness
 // that varies against solutions derived here or published.
+#include <support/relative.hpp>
 #include <support/scene.hpp>
 
 #include <sagitta/moment_area.hpp>
@@ -14,9 +15,6 @@ using namespace sagitta;
 using namespace sagitta::units;
 
 namespace {
-
-/// |computed/expected - 1|
-double relative(double computed, double expected) { return std::abs(computed / expected - 1); }
 
 constexpr auto rigidity(double newton_square_metres) {
     return quantity<flexural_rigidity>::from_value(newton_square_metres);
@@ -209,7 +207,7 @@ TEST_CASE("a stepped simple beam, published") {
 TEST_CASE("settlements bend no beam that can follow, whatever its stiffness") {
     const auto EI = [](const quantity<length>& x) { return rigidity(1e6 + 1e5 * x.value()); };
     const auto line = integrate_moment_area(simple_beam(4.0 * m, rigidity(1e6)), settlement(end::right, 8.0 * mm), EI);
-    CHECK(line.deflection(1.0 * m).value() == doctest::Approx(0.002).epsilon(1e-14));
+    CHECK(relative(line.deflection(1.0 * m).value(), 0.002) < 1e-14);
     CHECK(line.moment(1.0 * m).value() == 0);
 }
 
