@@ -1,0 +1,74 @@
+#!/bin/sh
+# Builds and runs all tests with g++ and then with clang++: sh tests/run.sh, from any folder.
+#
+# Packages that are missing are installed where that is allowed. The last line is "N passed, N failed", the sum
+# over both compilers; the exit status is 0 only if nothing failed.
+set -u
+cd "$(dirname "$0")/.." || exit 1
+. ./.ci/setup.sh
+
+packages="libboost-dev libfmt-dev doctest-dev"
+command -v g++ > /dev/null || packages="$packages g++"
+command -v clang++ > /dev/null || packages="$packages clang"
+command -v cmake > /dev/null || packages="$packages cmake"
+command -v ninja > /dev/null || command -v make > /dev/null || packages="$packages ninja-build"
+# shellcheck disable=SC2086 # a list of words
+need_packages $packages || exit 1
+
+generator="Unix Makefiles"
+keep_going=-k
+if command -v ninja > /dev/null; then
+    generator=Ninja
+    keep_going="-k 0"
+fi
+jobs=$(getconf _NPROCESSORS_ONLN 2> /dev/null) || jobs=2
+passed=0
+failed=0
+
+run_with() { # run_with COMPILER BUILD_FOLDER
+    echo "== $1: configuring"
+    # A cache that another generator, compiler or folder has left behind would only get in the way.
+    rm -rf "$2/CMakeCache.txt" "$2/CMakeFiles"
+    # -O1 compiles fastest of the levels at which inlined headers are still run and not walked through.
+    if ! cmake -S . -B "$2" -G "$generator" -D CMAKE_CXX_COMPILER="$1" -D CMAKE_CXX_FLAGS=-O1 \
+        -D SAGITTA_BENCHMARKS=OFF > "$2.log" 2>&1; then
+        cat "$2.log"
+        echo "== $1: configuring failed"
+        failed=$((failed + 1))
+        return
+    fi
+
+    echo "== $1: building"
+    # One program that does not build must not hide what the others say.
+    # shellcheck disable=SC2086 # two words
+    if ! cmake --build "$2" --parallel "$jobs" -- $keep_going; then
+        echo "== $1: building failed"
+        failed=$((failed + 1))
+    fi
+
+    echo "== $1: testing"
+    (cd "$2" && ctest --output-on-failure --parallel "$jobs" 2>&1) | tee "$2.log" | grep -v '^ *Start *[0-9]*: '
+    sizes="$2/tests/compile_fail/diagnostic_sizes.txt"
+    if [ -f "$sizes" ]; then
+        echo "== $1: the longest diagnostics of wrong uses, in bytes"
+        head -n 5 "$sizes"
+    fi
+
+    # "97% tests passed, 5 tests failed out of 165"
+    summary=$(sed -n 's/.* tests passed, \([0-9]*\) tests failed out of \([0-9]*\)$/\1 \2/p' "$2.log")
+    if [ -z "$summary" ]; then
+        echo "== $1: no test was run"
+        failed=$((failed + 1))
+        return
+    fi
+    failed_here=${summary% *}
+    failed=$((failed + failed_here))
+    passed=$((passed + ${summary#* } - failed_here))
+}
+
+mkdir -p build
+run_with g++ build/tests-gcc
+run_with clang++ build/tests-clang
+
+echo "$passed passed, $failed failed"
+[ "$failed" -eq 0 ]
