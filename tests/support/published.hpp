@@ -137,7 +137,7 @@ public:
     void meets(const printed& value, double library) const {
         const bool met = value.admits(library);
         tally::of_this_run().compared(from_, label_, met);
-        CHECK_MESSAGE(met, from_.name, ", ", label_, ": printed ", value.text(), ", here ", text(library));
+        CHECK_MESSAGE(met, std::string(from_.name), ", ", label_, ": printed ", value.text(), ", here ", text(library));
     }
 
     /// The published formula, evaluated, is the library's value to 1e-12 of size, the greatest value of its
@@ -145,8 +145,8 @@ public:
     void equals(double formula, double library, double size) const {
         const bool met = std::abs(formula - library) <= 1e-12 * size;
         tally::of_this_run().compared(from_, label_, met);
-        CHECK_MESSAGE(met, from_.name, ", ", label_, ": published ", text(formula), ", here ", text(library),
-                      ", apart by ", text(std::abs(formula - library) / size), " of the greatest");
+        CHECK_MESSAGE(met, std::string(from_.name), ", ", label_, ": published ", text(formula), ", here ",
+                      text(library), ", apart by ", text(std::abs(formula - library) / size), " of the greatest");
     }
     void equals(double formula, double library) const { equals(formula, library, std::abs(formula)); }
 
@@ -154,8 +154,8 @@ public:
     void is_misprint(const printed& value, double library) const {
         const bool shown = std::isfinite(library) && !value.admits(library);
         tally::of_this_run().misprint(from_, label_, shown);
-        CHECK_MESSAGE(shown, from_.name, ", ", label_, ": known as a misprint, yet ", value.text(), " is met by ",
-                      text(library));
+        CHECK_MESSAGE(shown, std::string(from_.name), ", ", label_, ": known as a misprint, yet ", value.text(),
+                      " is met by ", text(library));
     }
 
 private:
