@@ -152,8 +152,9 @@ int run(const arguments& folders) {
     const auto beams_file = input_table::open(folders.input, "beams.csv", beam_columns, found);
     const auto loads_file = input_table::open(folders.input, "loads.csv", load_columns, found);
     const auto combinations_file = input_table::open(folders.input, "combinations.csv", combination_columns, found);
-    const bool is_empty = is_without_rows(beams_file, found) | is_without_rows(combinations_file, found);
-    if (!beams_file || !loads_file || !combinations_file || is_empty) {
+    const bool no_beams = is_without_rows(beams_file, found);
+    const bool no_combinations = is_without_rows(combinations_file, found);
+    if (!beams_file || !loads_file || !combinations_file || no_beams || no_combinations) {
         say_all(found);
         say("beam_schedule: nothing is computed, nothing is written");
         return something_refused;
