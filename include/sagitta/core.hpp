@@ -3,6 +3,7 @@
 
 #include <sagitta/beam.hpp>
 #include <sagitta/chord.hpp>
+#include <sagitta/continuous_beam.hpp>
 #include <sagitta/cross_check.hpp>
 #include <sagitta/elastic_line.hpp>
 #include <sagitta/ends.hpp>

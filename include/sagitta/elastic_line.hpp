@@ -240,6 +240,12 @@ public:
         return answer<response::moment>(beam_.span(), just_right);
     }
 
+    /// Flexural rigidity, the same at every x.
+    template <class X>
+    [[nodiscard]] constexpr const quantity<flexural_rigidity, number>& rigidity(const X&) const {
+        return beam_.EI();
+    }
+
     [[nodiscard]] constexpr const beam_type& supported() const { return beam_; }
     [[nodiscard]] constexpr const Loads& loads() const { return loads_; }
 

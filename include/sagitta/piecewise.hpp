@@ -21,6 +21,7 @@ namespace sagitta {
 template <class T>
 class elastic_segment {
     using per_length = typename boost::units::divide_typeof_helper<line_load, length>::type;
+    using per_force = typename boost::units::divide_typeof_helper<dimensionless, force>::type;
 
 public:
     using number = T;
@@ -32,14 +33,16 @@ public:
     constexpr elastic_segment(const Line& whole_line, const quantity<length, T>& from, const quantity<length, T>& to)
         : from_(from),
           to_(to),
-          EI_(whole_line.supported().EI()),
+          EI_(whole_line.rigidity(from)),
           v_(whole_line.deflection(from)),
           slope_(whole_line.slope(from)),
           M_(whole_line.moment(from, just_right)),
           bend_(M_ / EI_ + whole_line.imposed_curvature(from, just_right)),
           V_(whole_line.shear(from, just_right)),
           w_(whole_line.load(from, just_right)),
-          growth_((whole_line.load(to, just_left) - w_) / (to - from)) {}
+          growth_((whole_line.load(to, just_left) - w_) / (to - from)) {
+        if constexpr (requires { whole_line.shear_flexibility(); }) shear_flexibility_ = whole_line.shear_flexibility();
+    }
 
     [[nodiscard]] constexpr const quantity<length, T>& from() const { return from_; }
     [[nodiscard]] constexpr const quantity<length, T>& to() const { return to_; }
@@ -48,12 +51,12 @@ public:
 
     /// Deflection: degree 5 (length, 1, 1/length, ...).
     [[nodiscard]] constexpr auto deflection_coefficients() const {
-        return std::tuple(v_, detail::as_ratio(slope_), -bend_ / T(2), -V_ / (T(6) * EI_), w_ / (T(24) * EI_),
+        return std::tuple(v_, detail::as_ratio(slope_), -turning() / T(2), -turning_growth() / T(6), w_ / (T(24) * EI_),
                           growth_ / (T(120) * EI_));
     }
     /// Slope: degree 4, as a ratio (1, 1/length, ...).
     [[nodiscard]] constexpr auto slope_coefficients() const {
-        return std::tuple(detail::as_ratio(slope_), -bend_, -V_ / (T(2) * EI_), w_ / (T(6) * EI_),
+        return std::tuple(detail::as_ratio(slope_), -turning(), -turning_growth() / T(2), w_ / (T(6) * EI_),
                           growth_ / (T(24) * EI_));
     }
     /// Moment: degree 3.
@@ -87,6 +90,11 @@ public:
     }
 
 private:
+    /// Minus the second and third derivative of v at the start: bending, and where the beam deforms in shear the
+    /// change of V/kGA.
+    constexpr quantity<curvature, T> turning() const { return bend_ + w_ * shear_flexibility_; }
+    constexpr auto turning_growth() const { return V_ / EI_ + growth_ * shear_flexibility_; }
+
     template <std::size_t i = 0, class... C>
     static constexpr auto horner(const std::tuple<C...>& c, const quantity<length, T>& s) {
         if constexpr (i + 1 == sizeof...(C)) {
@@ -109,6 +117,7 @@ private:
     quantity<force, T> V_{};
     quantity<line_load, T> w_{};
     quantity<per_length, T> growth_{};
+    quantity<per_force, T> shear_flexibility_{};
 };
 
 namespace detail {

@@ -81,6 +81,9 @@ public:
     [[nodiscard]] constexpr const quantity<line_load, T>& size_from() const { return from_; }
     [[nodiscard]] constexpr const quantity<line_load, T>& size_to() const { return to_; }
     [[nodiscard]] constexpr const Where& where() const { return where_; }
+    [[nodiscard]] constexpr auto over(const stretch<T>& stretch_of_it) const {
+        return linear<T, stretch<T>>(from_, to_, stretch_of_it);
+    }
     [[nodiscard]] constexpr linear scaled(const T& factor) const { return {from_ * factor, to_ * factor, where_}; }
 
 private:
@@ -104,6 +107,9 @@ public:
     [[nodiscard]] constexpr const quantity<line_load, T>& size_from() const { return size_; }
     [[nodiscard]] constexpr const quantity<line_load, T>& size_to() const { return size_; }
     [[nodiscard]] constexpr const Where& where() const { return where_; }
+    [[nodiscard]] constexpr auto over(const stretch<T>& stretch_of_it) const {
+        return uniform<T, stretch<T>>(size_, stretch_of_it);
+    }
     [[nodiscard]] constexpr uniform scaled(const T& factor) const { return {size_ * factor, where_}; }
 
 private:
@@ -146,6 +152,9 @@ public:
     /// Positive where it makes the beam sag.
     [[nodiscard]] constexpr const quantity<curvature, T>& size() const { return size_; }
     [[nodiscard]] constexpr const Where& where() const { return where_; }
+    [[nodiscard]] constexpr auto over(const stretch<T>& stretch_of_it) const {
+        return imposed_curvature<T, stretch<T>>(size_, stretch_of_it);
+    }
     [[nodiscard]] constexpr imposed_curvature scaled(const T& factor) const { return {size_ * factor, where_}; }
 
 private:

@@ -59,7 +59,7 @@ constexpr T bracketed_root(const polynomial<T, Degree>& p, T low, T high) {
     T t = (low + high) / T(2);
     for (int i = 0; i < safe_step_count; ++i) {
         const T value = p(t);
-        if (value == T(0)) return t;
+        if (value == T(0)) break;
         ((value < T(0)) == rising ? low : high) = t;
         T next = t - value / slope(t);
         if (!(next > low && next < high)) next = (low + high) / T(2);
@@ -67,7 +67,9 @@ constexpr T bracketed_root(const polynomial<T, Degree>& p, T low, T high) {
         t = next;
         if (step <= resolution * t) break;
     }
-    return t;
+    // A last step changes nothing but what a number carries along besides its value (a derivative).
+    const T last = t - p(t) / slope(t);
+    return last >= low && last <= high ? last : t;
 }
 
 /// All roots in the open interval (0, 1), ascending. Values up to tolerance count as zero: a turning point with

@@ -46,30 +46,40 @@ inline std::string number_text(double number) {
                         limit_unit);
 }
 
+/// For messages only. A number type without a conversion to double is shown as nan.
+template <class T>
+constexpr double as_double(const T& x) {
+    if constexpr (requires { static_cast<double>(x); }) {
+        return static_cast<double>(x);
+    } else {
+        return std::numeric_limits<double>::quiet_NaN();
+    }
+}
+
 // Values are handed over as plain numbers: a reference to them would keep the whole computation in memory.
 
 /// Throws "<argument> = <value> <bound>", for instance "span = -1 m must be greater than 0 m and finite".
 template <class D, class T>
 [[noreturn, gnu::always_inline]] inline void refuse(const char* argument, const quantity<D, T>& value,
                                                     const char* bound) {
-    throw_invalid_input(argument, static_cast<double>(value.value()), coherent_symbol<D>, bound);
+    throw_invalid_input(argument, as_double(value.value()), coherent_symbol<D>, bound);
 }
 template <number_type T>
 [[noreturn, gnu::always_inline]] inline void refuse(const char* argument, const T& value, const char* bound) {
-    throw_invalid_input(argument, static_cast<double>(value), "", bound);
+    throw_invalid_input(argument, as_double(value), "", bound);
 }
 /// Throws "<argument> = <value> <bound><limit>".
 template <class D, class T, class E, class U>
 [[noreturn, gnu::always_inline]] inline void refuse(const char* argument, const quantity<D, T>& value,
                                                     const char* bound, const quantity<E, U>& limit) {
-    throw_invalid_input(argument, static_cast<double>(value.value()), coherent_symbol<D>, bound,
-                        static_cast<double>(limit.value()), coherent_symbol<E>);
+    throw_invalid_input(argument, as_double(value.value()), coherent_symbol<D>, bound, as_double(limit.value()),
+                        coherent_symbol<E>);
 }
 
-/// Neither infinite nor not-a-number: x - x is 0 then, and not-a-number otherwise. (One comparison, one jump.)
+/// Neither infinite nor not-a-number: 0 x is 0 then, and not-a-number otherwise. (One comparison, one jump.)
 template <class T>
 constexpr bool is_finite(const T& x) {
-    return x - x >= T(0);
+    return x * T(0) >= T(0);
 }
 
 /// Greater than 0 and finite.

@@ -6,12 +6,19 @@
 #include <numbers>
 #include <type_traits>
 
+namespace sagitta {
+
+/// True for whatever may stand in front of a unit: the built-in numbers and every type that describes itself through
+/// std::numeric_limits (multiprecision does). Specialize it for a number type of your own that does not.
+template <class T>
+inline constexpr bool is_number = std::is_arithmetic_v<T> || std::numeric_limits<T>::is_specialized;
+
+}  // namespace sagitta
+
 namespace sagitta::detail {
 
-/// True for whatever may stand in front of a unit: the built-in numbers and every type that describes
-/// itself through std::numeric_limits (multiprecision does).
 template <class T>
-concept number_type = std::is_arithmetic_v<T> || std::numeric_limits<T>::is_specialized;
+concept number_type = is_number<T>;
 
 /// The number type that quantities are kept in: integers become double, so that nothing is ever truncated.
 template <class T>

@@ -1,0 +1,169 @@
+// A part of a longer beam between two neighbouring nodes: a simple beam under its share of the loads, whose ends
+// carry moments and move. No formula of its own: end moments are couples, end movements settlements.
+#pragma once
+
+#include <sagitta/beam.hpp>
+#include <sagitta/detail/end_state.hpp>
+#include <sagitta/elastic_line.hpp>
+#include <sagitta/load.hpp>
+#include <sagitta/load_list.hpp>
+
+#include <algorithm>
+#include <utility>
+#include <vector>
+
+namespace sagitta::detail {
+
+template <class T>
+class beam_part {
+public:
+    using simple = beam<held::pinned, held::pinned, T>;
+    using inverse_force = typename boost::units::divide_typeof_helper<dimensionless, force>::type;
+
+    beam_part(const quantity<length, T>& from, const quantity<length, T>& to, const quantity<flexural_rigidity, T>& EI,
+              const quantity<inverse_force, T>& shear_flexibility)
+        : from_(from), to_(to), beam_(to - from, EI), shear_flexibility_(shear_flexibility) {}
+
+    [[nodiscard]] const quantity<length, T>& from() const { return from_; }
+    [[nodiscard]] const quantity<length, T>& to() const { return to_; }
+    [[nodiscard]] quantity<length, T> span() const { return beam_.span(); }
+    [[nodiscard]] const quantity<flexural_rigidity, T>& EI() const { return beam_.EI(); }
+    [[nodiscard]] const quantity<inverse_force, T>& shear_flexibility() const { return shear_flexibility_; }
+
+    // Loads that act on this part, in coordinates of the whole beam; stretches are cut to the part.
+
+    template <loads::action Action, class N>
+    void add(const loads::concentrated<Action, N>& load) {
+        const auto place = loads::position<T>{coherent<length, T>(load.at()) - from_};
+        const auto size = coherent<typename loads::concentrated<Action, N>::unit, T>(load.size());
+        loads_ += loads::concentrated<Action, T>(size, place);
+        if constexpr (Action == loads::action::couple) {
+            couples_.push_back({place.x, size});
+        }
+    }
+    template <class Load>
+    requires requires { Load::is_uniform; }
+    void add(const Load& load) {
+        const auto w_from = coherent<line_load, T>(load.size_from());
+        const auto w_to = coherent<line_load, T>(load.size_to());
+        const auto [a, b] = bounds(load);
+        const auto from = std::max(a, from_);
+        const auto to = std::min(b, to_);
+        if (!(from < to)) return;
+        const auto w_at = [&](const quantity<length, T>& x) -> quantity<line_load, T> {
+            if (x == a) return w_from;
+            if (x == b) return w_to;
+            return w_from + (w_to - w_from) * ((x - a) / (b - a));
+        };
+        const loads::stretch<T> where{from - from_, to - from_};
+        if constexpr (Load::is_uniform) {
+            loads_ += loads::uniform<T, loads::stretch<T>>(w_from, where);
+        } else {
+            loads_ += loads::linear<T, loads::stretch<T>>(w_at(from), w_at(to), where);
+        }
+    }
+    template <class N, class Where>
+    void add(const loads::imposed_curvature<N, Where>& load) {
+        const auto [a, b] = bounds(load);
+        const auto from = std::max(a, from_);
+        const auto to = std::min(b, to_);
+        if (!(from < to)) return;
+        loads_ += loads::imposed_curvature<T, loads::stretch<T>>(coherent<curvature, T>(load.size()),
+                                                                 {from - from_, to - from_});
+    }
+
+    /// The part as a simple beam under its loads alone.
+    [[nodiscard]] auto simply_supported() const { return beam_.under(loads_); }
+
+    /// What shear adds to the turning of a section: the mean shear of the loads, which end moments change by their
+    /// difference over the span.
+    [[nodiscard]] quantity<plane_angle, T> shear_turn() const {
+        return as_angle(sum_of_couples(span(), side::just_right) / span() * shear_flexibility_);
+    }
+
+    /// Fixes the part in the whole beam: sagging moments at its ends and how far they have moved down.
+    void place(const quantity<moment, T>& M_left, const quantity<moment, T>& M_right, const quantity<length, T>& v_left,
+               const quantity<length, T>& v_right) {
+        auto all = loads_;
+        using couple = loads::concentrated<loads::action::couple, T>;
+        all += couple(M_left, {quantity<length, T>{}});
+        all += couple(-M_right, {span()});
+        all += loads::movement<end::left_end, loads::motion::settlement, T>(v_left);
+        all += loads::movement<end::right_end, loads::motion::settlement, T>(v_right);
+        placed_.emplace_back(beam_, all);
+        M_left_ = M_left;
+        M_right_ = M_right;
+    }
+
+    /// A response at x of the whole beam. At the ends of the part: the value inside it.
+    template <response R>
+    [[nodiscard]] response_quantity<R, T> at(const quantity<length, T>& x, side which) const {
+        const auto s = std::min(x - from_, span());
+        const auto& line = placed_.front();
+        if constexpr (R == response::deflection) {
+            return line.deflection(s) + shear_deflection(s);
+        } else if constexpr (R == response::slope) {
+            return line.slope(s) + as_angle((line.shear(s, inside(s, which)) - mean_shear()) * shear_flexibility_);
+        } else if constexpr (R == response::moment) {
+            return line.moment(s, inside(s, which));
+        } else {
+            return line.shear(s, inside(s, which));
+        }
+    }
+    [[nodiscard]] quantity<line_load, T> load(const quantity<length, T>& x, side which) const {
+        return placed_.front().load(std::min(x - from_, span()), which);
+    }
+    [[nodiscard]] quantity<curvature, T> imposed_curvature(const quantity<length, T>& x, side which) const {
+        return placed_.front().imposed_curvature(std::min(x - from_, span()), which);
+    }
+    /// Shear at the ends of the part, loads that stand right there included.
+    [[nodiscard]] quantity<force, T> outer_shear_left() const { return placed_.front().reaction(end::left); }
+    [[nodiscard]] quantity<force, T> outer_shear_right() const { return -placed_.front().reaction(end::right); }
+
+    [[nodiscard]] auto joints() const { return placed_.front().joints(); }
+
+private:
+    struct couple_at {
+        quantity<length, T> at;
+        quantity<moment, T> size;
+    };
+
+    template <class Load>
+    static std::pair<quantity<length, T>, quantity<length, T>> bounds(const Load& load) {
+        return {coherent<length, T>(load.where().from), coherent<length, T>(load.where().to)};
+    }
+
+    side inside(const quantity<length, T>& s, side which) const {
+        if (!(s > quantity<length, T>{})) return side::just_right;
+        return s < span() ? which : side::just_left;
+    }
+
+    quantity<moment, T> sum_of_couples(const quantity<length, T>& s, side which) const {
+        quantity<moment, T> sum{};
+        for (const auto& c : couples_) {
+            if (which == side::just_left ? c.at < s : c.at <= s) sum += c.size;
+        }
+        return sum;
+    }
+
+    quantity<force, T> mean_shear() const {
+        return (M_right_ - M_left_ - sum_of_couples(span(), side::just_right)) / span();
+    }
+
+    /// The integral of (shear - mean shear)/kGA up to s. Zero at both ends of the part.
+    quantity<length, T> shear_deflection(const quantity<length, T>& s) const {
+        const auto M = placed_.front().moment(s, inside(s, side::just_right));
+        const auto risen = M - M_left_ - sum_of_couples(s, inside(s, side::just_right));
+        return (risen - mean_shear() * s) * shear_flexibility_;
+    }
+
+    quantity<length, T> from_, to_;
+    simple beam_;
+    quantity<inverse_force, T> shear_flexibility_;
+    load_list<T> loads_;
+    std::vector<couple_at> couples_;
+    std::vector<elastic_line<simple, load_list<T>>> placed_;  // one, once placed
+    quantity<moment, T> M_left_{}, M_right_{};
+};
+
+}  // namespace sagitta::detail
