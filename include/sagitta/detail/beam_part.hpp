@@ -9,7 +9,6 @@
 #include <sagitta/load_list.hpp>
 
 #include <algorithm>
-#include <utility>
 #include <vector>
 
 namespace sagitta::detail {
@@ -46,7 +45,8 @@ public:
     void add(const Load& load) {
         const auto w_from = coherent<line_load, T>(load.size_from());
         const auto w_to = coherent<line_load, T>(load.size_to());
-        const auto [a, b] = bounds(load);
+        const auto a = coherent<length, T>(load.where().from);
+        const auto b = coherent<length, T>(load.where().to);
         const auto from = std::max(a, from_);
         const auto to = std::min(b, to_);
         if (!(from < to)) return;
@@ -64,9 +64,8 @@ public:
     }
     template <class N, class Where>
     void add(const loads::imposed_curvature<N, Where>& load) {
-        const auto [a, b] = bounds(load);
-        const auto from = std::max(a, from_);
-        const auto to = std::min(b, to_);
+        const auto from = std::max(coherent<length, T>(load.where().from), from_);
+        const auto to = std::min(coherent<length, T>(load.where().to), to_);
         if (!(from < to)) return;
         loads_ += loads::imposed_curvature<T, loads::stretch<T>>(coherent<curvature, T>(load.size()),
                                                                  {from - from_, to - from_});
@@ -127,11 +126,6 @@ private:
         quantity<length, T> at;
         quantity<moment, T> size;
     };
-
-    template <class Load>
-    static std::pair<quantity<length, T>, quantity<length, T>> bounds(const Load& load) {
-        return {coherent<length, T>(load.where().from), coherent<length, T>(load.where().to)};
-    }
 
     side inside(const quantity<length, T>& s, side which) const {
         if (!(s > quantity<length, T>{})) return side::just_right;

@@ -182,7 +182,7 @@ private:
     template <class End, loads::motion Motion, class N>
     void put(const loads::movement<End, Motion, N>& movement) {
         auto& held = std::is_same_v<End, end::left_end> ? nodes_.front() : nodes_.back();
-        if constexpr (movement.is_rotation) {
+        if constexpr (Motion == loads::motion::rotation) {
             if (held.turning == T(0)) [[unlikely]]
                 detail::refuse("support_rotation", movement.size(), "needs a clamped end; this end turns freely");
             held.turned += movement.size().value();
