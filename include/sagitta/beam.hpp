@@ -11,6 +11,8 @@ namespace sagitta {
 
 template <class Beam, class Loads>
 class elastic_line;
+template <class Left, class Right, class T>
+class shear_flexible_beam;
 
 /// A prismatic beam of one span. Left and Right are ways to hold an end (held::fixed, held::pinned, held::free).
 template <class Left, class Right, class T = double>
@@ -38,6 +40,12 @@ public:
     template <class Loads>
     [[nodiscard, gnu::always_inline]] constexpr auto under(const Loads& loads) const {
         return elastic_line<beam, Loads>(*this, loads);
+    }
+
+    /// The beam that also deforms in shear, with the shear rigidity kGA (a force; shear_flexible.hpp).
+    template <class S>
+    [[nodiscard]] constexpr auto with_shear_rigidity(const S& kGA) const {
+        return shear_flexible_beam<Left, Right, T>(*this, detail::expect_force<T>(kGA));
     }
 
 private:

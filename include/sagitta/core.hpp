@@ -14,6 +14,7 @@
 #include <sagitta/moment_area.hpp>
 #include <sagitta/piecewise.hpp>
 #include <sagitta/series.hpp>
+#include <sagitta/shear_flexible.hpp>
 #include <sagitta/units.hpp>
 #include <sagitta/version.hpp>
 #include <sagitta/zeros.hpp>

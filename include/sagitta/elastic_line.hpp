@@ -222,6 +222,20 @@ public:
         });
     }
 
+    /// The sum of the couples applied from the left end up to and at x, clockwise positive (force times length).
+    template <class X>
+    [[nodiscard]] constexpr quantity<sagitta::moment, number> couples_up_to(const X& x) const {
+        const auto place = on_beam(x);
+        using result = quantity<sagitta::moment, number>;
+        return superposed_.template sum<result>([&](const auto& effect) -> result {
+            if constexpr (requires { effect.couple_up_to(place); }) {
+                return effect.couple_up_to(place);
+            } else {
+                return {};
+            }
+        });
+    }
+
     /// The force that the support at an end exerts on the beam, upward positive; 0 at a free end. Loads that
     /// stand right at the support are part of it.
     [[nodiscard]] constexpr quantity<force, number> reaction(end::left_end) const {

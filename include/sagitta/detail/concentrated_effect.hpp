@@ -12,7 +12,7 @@ class load_effect<loads::concentrated<Action, N>, Left, Right, T> {
 
 public:
     [[gnu::always_inline]] constexpr load_effect(const load& acting, const beam<Left, Right, T>& b)
-        : at_(coherent<length, T>(acting.at())) {
+        : at_(coherent<length, T>(acting.at())), size_(coherent<typename load::unit, T>(acting.size())) {
         const auto L = b.span();
         const auto rest = L - at_;
         if (!(rest.value() >= T(0))) [[unlikely]]
@@ -20,14 +20,13 @@ public:
                    "must not lie beyond the span of the beam, ", L);
         const T near = ratio(at_, L);
         const T far = ratio(rest, L);
-        const auto size = coherent<typename load::unit, T>(acting.size());
         if constexpr (load::is_couple) {
-            const auto F = size / L;
+            const auto F = size_ / L;
             left_ = state<Left, Right, 1>(F, near, far, b);
             right_ = state<Right, Left, 1>(-F, far, near, b);
         } else {
-            left_ = state<Left, Right, 0>(size, near, far, b);
-            right_ = state<Right, Left, 0>(size, far, near, b);
+            left_ = state<Left, Right, 0>(size_, near, far, b);
+            right_ = state<Right, Left, 0>(size_, far, near, b);
         }
     }
 
@@ -39,6 +38,9 @@ public:
         return seen_from_right<R>(right_.template at<R>(b.span() - x, b.EI()));
     }
 
+    constexpr quantity<moment, T> couple_up_to(const quantity<length, T>& x) const requires(load::is_couple) {
+        return at_ <= x ? size_ : quantity<moment, T>{};
+    }
     constexpr quantity<length, T> start(const beam<Left, Right, T>&) const { return at_; }
     constexpr quantity<length, T> stop(const beam<Left, Right, T>&) const { return at_; }
 
@@ -52,6 +54,7 @@ private:
     }
 
     quantity<length, T> at_;
+    quantity<typename load::unit, T> size_;
     end_state<Left, T> left_{};
     end_state<Right, T> right_{};
 };
