@@ -1,0 +1,16 @@
+# Every public header but the umbrellas has a test of its name: cmake -D include=... -D tests=... -P each_has_a_test.cmake
+cmake_minimum_required(VERSION 3.20)
+
+file(GLOB headers RELATIVE ${include} ${include}/sagitta/*.hpp)
+list(REMOVE_ITEM headers sagitta/core.hpp sagitta/sagitta.hpp)
+set(missing)
+foreach(header IN LISTS headers)
+  string(REGEX REPLACE "\\.hpp$" ".cpp" test ${header})
+  if(NOT EXISTS ${tests}/${test})
+    list(APPEND missing tests/${test})
+  endif()
+endforeach()
+if(missing)
+  list(JOIN missing "\n  " missing)
+  message(FATAL_ERROR "public headers without a test; missing are\n  ${missing}")
+endif()
