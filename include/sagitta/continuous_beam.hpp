@@ -42,7 +42,7 @@ public:
     /// Supports it rigidly at x.
     template <class X>
     continuous_beam& support_at(const X& x) {
-        return hold(on_beam(x), rigid);
+        return hold(on_beam(x), rigid());
     }
     /// Supports it at x by a spring of a stiffness (force per length; 0 to infinite).
     template <class X, class S>
@@ -66,13 +66,13 @@ public:
     template <class End>
     continuous_beam& clamp(End which) {
         node_type& clamped = end_node(which);
-        clamped.turning = rigid;
-        return hold(clamped.at, rigid);
+        clamped.turning = rigid();
+        return hold(clamped.at, rigid());
     }
     /// Guides an end: free to move, not to rotate.
     template <class End>
     continuous_beam& guide(End which) {
-        end_node(which).turning = rigid;
+        end_node(which).turning = rigid();
         return *this;
     }
     /// Holds an end against rotation by a spring of a stiffness (moment per angle; 0 to infinite).
@@ -137,7 +137,7 @@ private:
         quantity<length, T> from;
         quantity<flexural_rigidity, T> EI;
     };
-    static constexpr T rigid = std::numeric_limits<T>::infinity();
+    static T rigid() { return std::numeric_limits<T>::infinity(); }
 
     template <class K>
     static quantity<flexural_rigidity, T> positive_rigidity(const K& rigidity) {

@@ -4,6 +4,7 @@
 
 #include <algorithm>
 #include <cstddef>
+#include <limits>
 #include <vector>
 
 namespace sagitta::detail {
@@ -31,7 +32,7 @@ public:
             for (std::size_t i = k + 1; i <= last; ++i) {
                 if (magnitude((*this)(i, k)) > magnitude((*this)(pivot, k))) pivot = i;
             }
-            if (!(magnitude((*this)(pivot, k)) > smallest_pivot)) return k;
+            if (!(magnitude((*this)(pivot, k)) > smallest_pivot())) return k;
             const std::size_t stop = std::min(n_ - 1, k + 2 * reach);
             if (pivot != k) {
                 for (std::size_t j = k; j <= stop; ++j) std::swap((*this)(k, j), (*this)(pivot, j));
@@ -56,7 +57,8 @@ public:
 
 private:
     static T magnitude(const T& x) { return x < T(0) ? -x : x; }
-    static inline const T smallest_pivot = T(1e-13);  // the equations are scaled to 1
+    /// The equations are scaled to 1, so that less is rounding: some 1e-13 in double.
+    static T smallest_pivot() { return T(512) * std::numeric_limits<T>::epsilon(); }
 
     std::size_t n_;
     std::vector<T> rows_;

@@ -72,7 +72,7 @@ private:
         if constexpr (R == response::deflection) {
             return size * number;
         } else if constexpr (R == response::slope) {
-            return as_angle(size / L * number);
+            return as_angle(size * number / L);
         } else if constexpr (R == response::moment) {
             return -(b.EI() * size / L / L * number);
         } else {
