@@ -48,6 +48,7 @@ TEST_CASE("closed forms and integrator agree to 1e-12 for every load case on eve
         const double tiny = 1e-6 * L;
         const double w = EI / L / L / L / L;
         std::vector<scene::load> cases{{scene::kind::uniform, w},
+                                       {scene::kind::curvature, 0.003 / L},
                                        {scene::kind::linear_whole, w, 0},
                                        {scene::kind::linear_whole, 0, w},
                                        {scene::kind::settlement_left, 0.01},
@@ -69,6 +70,7 @@ TEST_CASE("closed forms and integrator agree to 1e-12 for every load case on eve
             cases.push_back({scene::kind::partial_uniform, w, 0, from, to});
             cases.push_back({scene::kind::linear, w, 0, from, to});
             cases.push_back({scene::kind::linear, 0, w, from, to});
+            cases.push_back({scene::kind::partial_curvature, 0.003 / L, 0, from, to});
         }
         scene::with_each_beam(L, EI, [&](const std::string& name, const auto& b, auto left, auto right) {
             for (const auto& one : cases) {

@@ -59,7 +59,9 @@ std::vector<load> every_load(double L, double EI, scene::chance& random) {
         all.push_back({kind::linear, P / L, 0, from, to});
         all.push_back({kind::linear, 0, P / L, from, to});
         all.push_back({kind::linear, -P / L, P / L, from, to});
+        all.push_back({kind::partial_curvature, 0.003 / L, 0, from, to});
     }
+    all.push_back({kind::curvature, 0.003 / L});
     all.push_back({kind::settlement_left, 0.013 * L});
     all.push_back({kind::settlement_right, -0.013 * L});
     all.push_back({kind::rotation_left, 0.0021});
@@ -116,7 +118,15 @@ void compare(const Beam& b, hold left, hold right, const std::vector<load>& load
     const auto dense = scene::reference_of<cpp_bin_float_100>(left, right, L, b.EI().value(), loads);
     const auto exact = scene::reference_of<T>(left, right, L, b.EI().value(), loads);
     const auto places = sections(L, scene::joints_of(L, loads), random);
-    const auto greatest = greatest_values(dense, L, places);
+    auto greatest = greatest_values(dense, L, places);
+    for (const auto& l : loads) {
+        if (l.what != kind::curvature && l.what != kind::partial_curvature) continue;
+        // Clamped ends undo an imposed curvature, all of it where it runs from end to end: what is left may vanish
+        // along the whole beam, and the size is that of what they undo.
+        const double turned = l.size * (l.what == kind::curvature ? L : l.to - l.from);
+        const double implied[] = {turned * L, turned, turned * b.EI().value() / L, turned * b.EI().value() / L / L};
+        for (std::size_t q = 0; q < 4; ++q) greatest[q] = std::max(greatest[q], implied[q]);
+    }
     const auto note = [&](double& slot, double computed, const T& truth, quantity what) {
         slot = std::max(slot, relative_error(computed, truth, greatest[static_cast<std::size_t>(what)]));
         ++worst.comparisons;

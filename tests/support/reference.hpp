@@ -39,6 +39,11 @@ public:
         lines_.push_back({T(size_from), growth, T(start)});
         lines_.push_back({-T(size_to), -growth, T(stop)});
     }
+    /// A curvature over a stretch that sags the beam without load: EI (v'' + curvature) = -M.
+    void add_curvature(double size, double start, double stop) {
+        kinks_.push_back({T(size), T(start)});
+        kinks_.push_back({-T(size), T(stop)});
+    }
     void add_settlement(bool at_left, double size) { (at_left ? left_settlement_ : right_settlement_) += T(size); }
     void add_rotation(bool at_left, double size) { (at_left ? left_rotation_ : right_rotation_) += T(size); }
 
@@ -141,6 +146,12 @@ private:
                     break;
             }
         }
+        for (const auto& kink : kinks_) {
+            if (!(x > kink.at)) continue;
+            const T s = x - kink.at;
+            if (what == quantity::deflection) sum -= kink.size * s * s / T(2);
+            if (what == quantity::slope) sum -= kink.size * s;
+        }
         for (const auto& line : lines_) {
             if (!(x > line.at)) continue;
             const T s = x - line.at;
@@ -185,6 +196,7 @@ private:
     std::vector<concentrated> forces_;
     std::vector<concentrated> couples_;
     std::vector<ramp> lines_;
+    std::vector<concentrated> kinks_;
     T left_settlement_{0}, right_settlement_{0}, left_rotation_{0}, right_rotation_{0};
     std::array<T, 4> initial_{};
 };

@@ -23,7 +23,9 @@ enum class kind {
     settlement_left,
     settlement_right,
     rotation_left,
-    rotation_right
+    rotation_right,
+    curvature,
+    partial_curvature
 };
 
 struct load {
@@ -35,8 +37,9 @@ struct load {
 };
 
 inline std::string text(const load& l) {
-    const char* const names[] = {"point",  "couple",          "uniform",          "partial uniform", "linear whole",
-                                 "linear", "settlement left", "settlement right", "rotation left",   "rotation right"};
+    const char* const names[] = {"point",         "couple",         "uniform",         "partial uniform",
+                                 "linear whole",  "linear",         "settlement left", "settlement right",
+                                 "rotation left", "rotation right", "curvature",       "partial curvature"};
     return std::string(names[static_cast<int>(l.what)]) + " " + std::to_string(l.size) + ", " +
            std::to_string(l.size_to) + " from " + std::to_string(l.from) + " to " + std::to_string(l.to);
 }
@@ -91,6 +94,12 @@ inline void add(sagitta::load_list<>& list, const load& l) {
         case kind::rotation_right:
             list += support_rotation(end::right, l.size * rad);
             return;
+        case kind::curvature:
+            list += imposed_curvature(l.size / m);
+            return;
+        case kind::partial_curvature:
+            list += imposed_curvature(l.size / m, between(l.from * m, l.to * m));
+            return;
     }
 }
 
@@ -132,6 +141,12 @@ reference::beam<T> reference_of(reference::hold left, reference::hold right, dou
             case kind::rotation_right:
                 b.add_rotation(l.what == kind::rotation_left, l.size);
                 break;
+            case kind::curvature:
+                b.add_curvature(l.size, 0, L);
+                break;
+            case kind::partial_curvature:
+                b.add_curvature(l.size, l.from, l.to);
+                break;
         }
     }
     b.solve();
@@ -143,7 +158,7 @@ inline std::vector<double> joints_of(double L, const std::vector<load>& all) {
     std::vector<double> places{0, L};
     for (const auto& l : all) {
         if (l.what == kind::point || l.what == kind::couple) places.push_back(l.from);
-        if (l.what == kind::partial_uniform || l.what == kind::linear) {
+        if (l.what == kind::partial_uniform || l.what == kind::linear || l.what == kind::partial_curvature) {
             places.push_back(l.from);
             places.push_back(l.to);
         }
@@ -184,7 +199,9 @@ private:
 
 /// A load of any kind, of either sign, anywhere on a span; the deflections of all kinds are of a like size.
 inline load random_load(chance& random, double L, double EI) {
-    const auto what = static_cast<kind>(random.whole(0, 9));
+    // A curvature over the whole beam is left out: alone on a fixed beam nothing of it is left but rounding.
+    const int number = random.whole(0, 10);
+    const auto what = number == 10 ? kind::partial_curvature : static_cast<kind>(number);
     const double sign = random.toss() ? 1 : -1;
     load l{what};
     switch (what) {
@@ -203,7 +220,8 @@ inline load random_load(chance& random, double L, double EI) {
             l.size = sign * random.in(0.01, 0.1) * (what >= kind::rotation_left ? 1 : L) / L;
             break;
         default: {
-            l.size = sign * random.in(1, 10) * EI / L / L / L / L;
+            const bool bends = what >= kind::curvature;
+            l.size = sign * random.in(1, 10) / L / L * (bends ? 0.1 : EI / L / L);
             l.size_to = random.in(-10, 10) * EI / L / L / L / L;
             const double a = random.in(0, L);
             const double b = random.in(0, L);
