@@ -38,6 +38,12 @@ struct pinned {
     static constexpr bool against_rotation = false;
 };
 
+/// Free to move, not to rotate.
+struct guided {
+    static constexpr bool against_deflection = false;
+    static constexpr bool against_rotation = true;
+};
+
 /// Not held at all.
 struct free {
     static constexpr bool against_deflection = false;

@@ -60,6 +60,30 @@ struct influence<held::free, held::fixed> {
     using slope = shape<-2, 1, 0, 0>;         // -f^2 / 2
 };
 
+template <>
+struct influence<held::guided, held::fixed> {
+    using deflection = shape<12, 1, 3, 0, 0>;  // f^2 (f + 3n) / 12
+    using moment = shape<2, 1, 0, 0>;          // f^2 / 2
+};
+
+template <>
+struct influence<held::fixed, held::guided> {
+    using moment = shape<-2, 0, 2, 1>;  // -n (2f + n) / 2
+    using shear = shape<1, 1>;          // 1
+};
+
+template <>
+struct influence<held::guided, held::pinned> {
+    using deflection = shape<6, 2, 6, 3, 0>;  // f (2f^2 + 6 n f + 3 n^2) / 6
+    using moment = shape<1, 1, 0>;            // f
+};
+
+template <>
+struct influence<held::pinned, held::guided> {
+    using slope = shape<2, 0, 2, 1>;  // n (2f + n) / 2
+    using shear = shape<1, 1>;        // 1
+};
+
 /// A pair of ends that has no rows cannot carry load: it is a mechanism.
 template <class Left, class Right>
 concept stable_ends = requires {

@@ -105,6 +105,10 @@ private:
     static constexpr bool left_redundant = carried_by_both && Left::against_rotation;
     static constexpr bool right_redundant = carried_by_both && Right::against_rotation;
 
+    /// Where only one end carries and the other is guided, the same moment may be added everywhere.
+    static constexpr bool left_guided = !Left::against_deflection && Left::against_rotation;
+    static constexpr bool right_guided = !Right::against_deflection && Right::against_rotation;
+
     using deflected = slope_and_deflection<T>;
 
     struct panel {
@@ -181,6 +185,22 @@ private:
     /// other does on the curvature the work (slope of that end) - (slope of the chord).
     void solve_redundants(const acting_loads<T>& acting) {
         for (auto& p : panels_) p.curvature = bending(p.from, p.to);
+        if constexpr (left_guided || right_guided) {
+            if constexpr (Left::against_rotation && Right::against_rotation) {
+                // The angle between the ends is imposed.
+                T flexibility(0);
+                for (const auto& p : panels_) {
+                    flexibility += integrate(p.from, p.to, [&](const section& x) { return T(1) / EI_at(x.x()); }).area;
+                }
+                redundant_left_ = (acting.rotation_left - acting.rotation_right - total_angle()) / flexibility;
+            } else {
+                // The pinned end passes no moment on.
+                const section pinned{left_guided ? L_ : T(0)};
+                redundant_left_ = -statics_at(pinned, left_guided ? just_right : just_left).moment;
+            }
+            redundant_right_ = redundant_left_;
+            for (auto& p : panels_) p.curvature = bending(p.from, p.to);
+        }
         if constexpr (left_redundant || right_redundant) {
             const auto of_panel = [](const panel& p) -> const panel_moments<T>& { return p.curvature; };
             const auto unit_left = [&](const panel& p) {
@@ -229,6 +249,7 @@ private:
             }
         } else if constexpr (Left::against_deflection) {
             deflected here{acting.rotation_left, acting.settlement_left};
+            if constexpr (!Left::against_rotation) here.slope = acting.rotation_right + total_angle();
             for (auto& p : panels_) {
                 p.at_from = here;
                 here = forward(here, p.to - p.from, p.curvature);
@@ -236,6 +257,7 @@ private:
             }
         } else {
             deflected here{acting.rotation_right, acting.settlement_right};
+            if constexpr (!Right::against_rotation) here.slope = acting.rotation_left - total_angle();
             for (std::size_t i = panels_.size(); i-- > 0;) {
                 auto& p = panels_[i];
                 p.at_to = here;
@@ -243,6 +265,13 @@ private:
                 p.at_from = here;
             }
         }
+    }
+
+    /// By how much the slope falls from end to end.
+    T total_angle() const {
+        T sum(0);
+        for (const auto& p : panels_) sum += p.curvature.area;
+        return sum;
     }
 
     static T about_left(const T& from, const panel_moments<T>& c) { return c.area * from + c.about_from; }

@@ -20,12 +20,18 @@ template <class Left, class Right, class T>
 carried carrier_of(const acting_load<T>& load, const T& L) {
     constexpr bool left_clamped = Left::against_rotation;
     constexpr bool right_clamped = Right::against_rotation;
+    const bool nearer_left = load.centre() <= L / T(2);
+    // A guided end takes moments, no forces.
+    constexpr bool guided =
+        (left_clamped && !Left::against_deflection) || (right_clamped && !Right::against_deflection);
+    if (guided && load.kind == acting_kind::couple) {
+        return nearer_left ? carried::from_left : carried::from_right;
+    }
     if constexpr (!Right::against_deflection) {
         return carried::from_left;
     } else if constexpr (!Left::against_deflection) {
         return carried::from_right;
     } else {
-        const bool nearer_left = load.centre() <= L / T(2);
         if (nearer_left && left_clamped) return carried::from_left;
         if (!nearer_left && right_clamped) return carried::from_right;
         return carried::by_both;
