@@ -15,6 +15,7 @@
 #include <sagitta/piecewise.hpp>
 #include <sagitta/series.hpp>
 #include <sagitta/shear_flexible.hpp>
+#include <sagitta/tolerance_not_reached.hpp>
 #include <sagitta/units.hpp>
 #include <sagitta/version.hpp>
 #include <sagitta/zeros.hpp>

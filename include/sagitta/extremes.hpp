@@ -50,9 +50,8 @@ constexpr void for_each_candidate(const Line& line, const quantity<length, typen
                                   const quantity<length, typename Line::number>& last, const Consider& consider) {
     using T = typename Line::number;
     for_each_stretch(line, first, last, [&](const quantity<length, T>& from, const quantity<length, T>& to) {
-        const auto rate = normalized<R>(elastic_segment<T>(line, from, to)).derivative();
         consider(from, answer_of<R>(line, from, just_right));
-        for (const auto& turning : roots_between_0_and_1(rate, rate.noise())) {
+        for (const auto& turning : turning_points(profile_between<R>(line, from, to))) {
             const auto x = from + (to - from) * turning.at;
             consider(x, answer_of<R>(line, x, just_right));
         }

@@ -6,11 +6,14 @@
 #include <sagitta/detail/acting_loads.hpp>
 #include <sagitta/detail/expect.hpp>
 #include <sagitta/detail/integrator.hpp>
+#include <sagitta/detail/numeric_profile.hpp>
 #include <sagitta/detail/refuse.hpp>
 #include <sagitta/elastic_line.hpp>
 #include <sagitta/units.hpp>
 
 #include <initializer_list>
+#include <limits>
+#include <type_traits>
 #include <vector>
 
 namespace sagitta {
@@ -33,9 +36,12 @@ class integrated_line {
 public:
     using number = T;
 
-    integrated_line(const quantity<length, T>& span, const detail::acting_loads<T>& acting, const Rigidity& rigidity,
-                    const std::vector<T>& steps = {})
-        : integrator_(span.value(), acting, rigidity, steps) {}
+    /// Deflection and slope are no polynomials: questions bracket their zeros instead.
+    static constexpr bool is_numeric = true;
+
+    integrated_line(const beam<Left, Right, T>& b, const detail::acting_loads<T>& acting, const Rigidity& rigidity,
+                    const std::vector<T>& steps = {}, const T& tolerance = T(0))
+        : beam_(b), integrator_(b.span().value(), acting, rigidity, steps, tolerance) {}
 
     /// Deflection, downward positive.
     template <class X>
@@ -66,6 +72,28 @@ public:
         return shear(x, inner_side(on_beam(x)));
     }
 
+    template <class X>
+    [[nodiscard]] quantity<line_load, T> load(const X& x, side which = just_right) const {
+        return quantity<line_load, T>::from_value(integrator_.load_at(on_beam(x), which));
+    }
+    template <class X>
+    [[nodiscard]] quantity<curvature, T> imposed_curvature(const X& x, side which = just_right) const {
+        return quantity<curvature, T>::from_value(integrator_.imposed_at(on_beam(x), which));
+    }
+    template <class X>
+    [[nodiscard]] quantity<flexural_rigidity, T> rigidity(const X& x) const {
+        return quantity<flexural_rigidity, T>::from_value(integrator_.rigidity_at(on_beam(x)));
+    }
+
+    /// The estimated error of the integration, relative to the integral of the magnitude of M/EI; 0 where it is but
+    /// rounding. The deflection of a clamped beam, a small difference of such integrals, may be off by ten times that.
+    [[nodiscard]] const T& error_estimate() const { return integrator_.error_estimate(); }
+
+    /// The beam whose supports these are; its constant EI is not what was integrated.
+    [[nodiscard]] const beam<Left, Right, T>& supported() const { return beam_; }
+    [[nodiscard]] std::vector<quantity<length, T>> joints() const { return lengths(integrator_.joints()); }
+    [[nodiscard]] std::vector<quantity<length, T>> panel_bounds() const { return lengths(integrator_.panel_bounds()); }
+
     /// The moment-area theorems between two points, in either order.
     template <class From, class To>
     [[nodiscard]] moment_area_result<T> between(const From& first, const To& second) const {
@@ -90,11 +118,18 @@ private:
     }
     side inner_side(const T& x) const { return x < integrator_.span() ? just_right : just_left; }
 
+    static std::vector<quantity<length, T>> lengths(const std::vector<T>& numbers) {
+        std::vector<quantity<length, T>> places;
+        for (const T& number : numbers) places.push_back(quantity<length, T>::from_value(number));
+        return places;
+    }
+
     static moment_area_result<T> result(const T& angle, const T& of_second, const T& of_first) {
         return {quantity<plane_angle, T>::from_value(angle), quantity<length, T>::from_value(of_second),
                 quantity<length, T>::from_value(of_first)};
     }
 
+    beam<Left, Right, T> beam_;
     detail::integrator<Left, Right, T, Rigidity> integrator_;
 };
 
@@ -102,21 +137,26 @@ private:
 template <class Left, class Right, class T, class Loads>
 [[nodiscard]] auto integrate_moment_area(const beam<Left, Right, T>& b, const Loads& loads) {
     const detail::acting_loads<T> acting(loads, b.span().value());
-    return integrated_line<Left, Right, T, T>(b.span(), acting, b.EI().value());
+    return integrated_line<Left, Right, T, T>(b, acting, b.EI().value());
 }
 
-/// The same with a stiffness that varies: EI is a function from a length x to a flexural rigidity, which
-/// replaces the beam's own. The places where it jumps must be given, as lengths on the beam.
-/// Throws invalid_input where EI is not greater than 0 or a step is not on the beam.
+/// The same with a stiffness that varies: EI is a function from a length x to a flexural rigidity, which replaces the
+/// beam's own. The places where it jumps should be given, as lengths on the beam. The tolerance is the relative error
+/// allowed to the integrals of M/EI; the line tells its estimate.
+/// Throws invalid_input where EI is not greater than 0 or a step is not on the beam, tolerance_not_reached where the
+/// estimate stays above the tolerance.
 template <class Left, class Right, class T, class Loads, class Stiffness>
 [[nodiscard]] auto integrate_moment_area(const beam<Left, Right, T>& b, const Loads& loads, const Stiffness& EI,
-                                         std::initializer_list<quantity<length, T>> steps = {}) {
+                                         std::initializer_list<quantity<length, T>> steps = {},
+                                         const T& tolerance = T(1000) * std::numeric_limits<T>::epsilon()) {
     std::vector<T> places;
     for (const auto& step : steps) {
         if (!(step.value() > T(0) && step < b.span())) [[unlikely]]
             detail::refuse("step of EI", step, "must lie between the ends of the beam, 0 m and ", b.span());
         places.push_back(step.value());
     }
+    if (!detail::is_positive(tolerance)) [[unlikely]]
+        detail::refuse("tolerance", tolerance, "must be greater than 0 and finite");
     const auto rigidity_at = [EI](const T& x) {
         const auto place = quantity<length, T>::from_value(x);
         const auto here = detail::expect_rigidity<T>(EI(place));
@@ -125,8 +165,8 @@ template <class Left, class Right, class T, class Loads, class Stiffness>
         return here.value();
     };
     const detail::acting_loads<T> acting(loads, b.span().value());
-    return integrated_line<Left, Right, T, std::remove_const_t<decltype(rigidity_at)>>(b.span(), acting, rigidity_at,
-                                                                                       places);
+    return integrated_line<Left, Right, T, std::remove_const_t<decltype(rigidity_at)>>(b, acting, rigidity_at, places,
+                                                                                       tolerance);
 }
 
 /// Angle change and tangential deviations between two points of an elastic line, by the moment-area

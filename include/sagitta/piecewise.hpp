@@ -175,6 +175,22 @@ constexpr auto normalized(const elastic_segment<T>& segment) {
         coefficients);
 }
 
+template <response R, class Line>
+class numeric_profile;
+
+/// A response between two joints as a function of t from 0 to 1: a polynomial, but for the deflection and slope of
+/// a line whose stiffness varies (detail/numeric_profile.hpp).
+template <response R, class Line>
+constexpr auto profile_between(const Line& line, const quantity<length, typename Line::number>& from,
+                               const quantity<length, typename Line::number>& to) {
+    constexpr bool bends = R == response::deflection || R == response::slope;
+    if constexpr (bends && requires { requires Line::is_numeric; }) {
+        return numeric_profile<R, Line>(line, from, to);
+    } else {
+        return normalized<R>(elastic_segment<typename Line::number>(line, from, to));
+    }
+}
+
 }  // namespace detail
 
 /// The segments of an elastic line from left to right, without gaps. An array-like list without allocation

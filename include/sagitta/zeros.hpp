@@ -22,15 +22,24 @@ struct zero_place {
 namespace detail {
 
 /// What counts as zero for a response of a line: rounding of its greatest coefficients.
-template <response R, class Segments>
-constexpr auto zero_tolerance(const Segments& segments) {
-    using T = typename Segments::value_type::number;
+template <response R, class Line>
+constexpr auto zero_tolerance(const Line& line) {
+    using T = typename Line::number;
     T tolerance(0);
-    for (const auto& segment : segments) {
-        const T noise = normalized<R>(segment).noise();
+    for_each_stretch(line, {}, line.supported().span(), [&](const auto& from, const auto& to) {
+        const T noise = profile_between<R>(line, from, to).noise();
         if (noise > tolerance) tolerance = noise;
-    }
+    });
     return tolerance;
+}
+
+template <class Profile, class T>
+constexpr auto all_roots(const Profile& profile, const T& tolerance) {
+    if constexpr (requires { profile.roots(tolerance); }) {
+        return profile.roots(tolerance);
+    } else {
+        return roots_between_0_and_1(profile, tolerance);
+    }
 }
 
 /// Walks a response from left to right as runs of one sign and keeps the places between them.
@@ -73,32 +82,27 @@ private:
 template <response R, class Line>
 constexpr auto zeros_of(const Line& line) {
     using T = typename Line::number;
-    const auto segments = piecewise_form(line);
-    const T tolerance = zero_tolerance<R>(segments);
+    const T tolerance = zero_tolerance<R>(line);
     const auto sign_of = [&](const T& value) { return value > tolerance ? 1 : value < -tolerance ? -1 : 0; };
     // Within a segment at most as many roots as the degree, and the joint before it.
     list_along<zero_place<T>, 6, Line> places;
     sign_walk<T, decltype(places)> walk(places);
     T at_end(0);
-    for (const auto& segment : segments) {
-        const auto p = normalized<R>(segment);
-        const auto width = segment.to() - segment.from();
+    for_each_stretch(line, {}, line.supported().span(), [&](const auto& start, const auto& stop) {
+        const auto profile = profile_between<R>(line, start, stop);
+        auto from = start;
         T low(0);
-        bool zero_at_low = sign_of(p(T(0))) == 0;
-        const auto step = [&](const T& high, const quantity<length, T>& from, const quantity<length, T>& to) {
-            walk.run(from, to, sign_of(p((low + high) / T(2))), zero_at_low);
+        bool zero_at_low = sign_of(profile(T(0))) == 0;
+        const auto step = [&](const T& high, const quantity<length, T>& to) {
+            walk.run(from, to, sign_of(profile((low + high) / T(2))), zero_at_low);
+            from = to;
             low = high;
             zero_at_low = true;
         };
-        auto from = segment.from();
-        for (const auto& root : roots_between_0_and_1(p, tolerance)) {
-            const auto to = segment.from() + width * root.at;
-            step(root.at, from, to);
-            from = to;
-        }
-        step(T(1), from, segment.to());
-        at_end = p(T(1));
-    }
+        for (const auto& root : all_roots(profile, tolerance)) step(root.at, start + (stop - start) * root.at);
+        step(T(1), stop);
+        at_end = profile(T(1));
+    });
     if (sign_of(at_end) == 0) walk.stop_at_zero(line.supported().span());
     return places;
 }

@@ -5,12 +5,16 @@
 
 #include <sagitta/detail/acting_loads.hpp>
 #include <sagitta/detail/panel.hpp>
+#include <sagitta/detail/refuse.hpp>
 #include <sagitta/detail/statics.hpp>
 #include <sagitta/ends.hpp>
+#include <sagitta/tolerance_not_reached.hpp>
 
 #include <algorithm>
+#include <array>
 #include <cstddef>
 #include <iterator>
+#include <limits>
 #include <type_traits>
 #include <vector>
 
@@ -29,12 +33,13 @@ template <class Left, class Right, class T, class Rigidity>
 class integrator {
     static constexpr bool is_prismatic = std::is_same_v<Rigidity, T>;
     static constexpr std::size_t points = is_prismatic ? 3 : 20;
-    static constexpr int panels_between_joints = is_prismatic ? 3 : 8;
+    static constexpr int panels_between_joints = is_prismatic ? 3 : 4;
 
 public:
     using section = detail::section<T>;
 
-    integrator(const T& span, const acting_loads<T>& acting, const Rigidity& rigidity, const std::vector<T>& steps = {})
+    integrator(const T& span, const acting_loads<T>& acting, const Rigidity& rigidity, const std::vector<T>& steps = {},
+               const T& tolerance = T(0))
         : L_(span), EI_(rigidity) {
         balanced_.reserve(acting.loads.size());
         for (const auto& load : acting.loads) {
@@ -42,11 +47,34 @@ public:
         }
         curvatures_ = acting.curvatures;
         make_panels(acting, steps);
+        if constexpr (!is_prismatic) refine(tolerance);
         solve_redundants(acting);
         march(acting);
     }
 
     [[nodiscard]] const T& span() const { return L_; }
+
+    /// Estimated relative error of the integrals of curvature; 0 for a prismatic beam, whose integration is exact.
+    [[nodiscard]] const T& error_estimate() const { return error_estimate_; }
+
+    [[nodiscard]] T rigidity_at(const T& x) const { return EI_at(x); }
+
+    [[nodiscard]] T imposed_at(const T& x, side which) const {
+        T imposed(0);
+        for (const auto& each : curvatures_) {
+            const bool covered =
+                which == side::just_left ? x > each.from && x <= each.to : x >= each.from && x < each.to;
+            if (covered) imposed += each.size;
+        }
+        return imposed;
+    }
+    [[nodiscard]] T load_at(const T& x, side which) const {
+        T w(0);
+        for (const auto& each : balanced_) w += each.intensity(x, which);
+        return w;
+    }
+    /// The bounds of loads, imposed curvatures and steps, and the ends, ascending.
+    [[nodiscard]] const std::vector<T>& joints() const { return joints_; }
 
     /// Shear and moment, just left or just right of the section where they jump.
     [[nodiscard]] shear_and_moment<T> statics_at(const section& x, side which) const {
@@ -142,7 +170,8 @@ private:
     }
 
     void make_panels(const acting_loads<T>& acting, const std::vector<T>& steps) {
-        std::vector<T> joints{T(0), L_};
+        std::vector<T>& joints = joints_;
+        joints = {T(0), L_};
         joints.reserve(2 + 2 * acting.loads.size() + steps.size());
         for (const auto& load : acting.loads) {
             joints.push_back(load.from);
@@ -166,6 +195,60 @@ private:
             }
             panels_.push_back({from, joints[i]});
         }
+    }
+
+    /// Halves panels until the curvatures of the loads and of the unit redundants, integrated over a panel and over
+    /// its halves, agree within the tolerance (relative to the whole beam).
+    void refine(const T& tolerance) {
+        const auto fields = [&](const T& from, const T& to) {
+            std::array<panel_moments<T>, 3> sums;
+            sums[0] = bending(from, to);
+            sums[1] = integrate(from, to, [&](const section& x) { return x.ahead_of(L_) / L_ / EI_at(x.x()); });
+            sums[2] = integrate(from, to, [&](const section& x) { return x.x() / L_ / EI_at(x.x()); });
+            return sums;
+        };
+        const auto magnitude = [](const T& x) { return x < T(0) ? -x : x; };
+        // The unit redundants matter only where there are any: a beam tapered to a point may have none.
+        constexpr std::size_t field_count = left_redundant || right_redundant || left_guided || right_guided ? 3 : 1;
+        std::array<T, 3> size{};
+        std::vector<panel> pending(panels_.rbegin(), panels_.rend());
+        for (const auto& p : pending) {
+            const auto sums = fields(p.from, p.to);
+            for (std::size_t k = 0; k < field_count; ++k) size[k] += magnitude(sums[k].area);
+        }
+        panels_.clear();
+        constexpr std::size_t panel_limit = 20000;
+        while (!pending.empty()) {
+            const panel p = pending.back();
+            pending.pop_back();
+            const T middle = (p.from + p.to) / T(2);
+            const auto whole = fields(p.from, p.to);
+            const auto first = fields(p.from, middle);
+            const auto second = fields(middle, p.to);
+            T error(0);
+            for (std::size_t k = 0; k < field_count; ++k) {
+                if (size[k] == T(0)) continue;
+                const T half = middle - p.from;
+                const T area = whole[k].area - first[k].area - second[k].area;
+                const T lever =
+                    whole[k].about_from - first[k].about_from - second[k].about_from - second[k].area * half;
+                error = std::max(error, (magnitude(area) + magnitude(lever) / (p.to - p.from)) / size[k]);
+            }
+            const T rounding = T(16) * std::numeric_limits<T>::epsilon();
+            const bool fine = error <= std::max(tolerance / T(8), rounding);
+            if (fine || !(p.from < middle && middle < p.to) || panels_.size() + pending.size() > panel_limit) {
+                if (error > rounding) error_estimate_ += error;
+                panels_.push_back(p);
+            } else {
+                pending.push_back({middle, p.to});
+                pending.push_back({p.from, middle});
+            }
+        }
+        if (error_estimate_ > tolerance && tolerance > T(0)) [[unlikely]]
+            throw tolerance_not_reached("integration of M/EI: asked for a relative error of " +
+                                            number_text(as_double(tolerance)) + ", reached " +
+                                            number_text(as_double(error_estimate_)),
+                                        as_double(error_estimate_));
     }
 
     /// The integral over the beam of a curvature times a moment that varies linearly from end to end: the
@@ -303,7 +386,9 @@ private:
     Rigidity EI_;
     std::vector<balanced_load<T>> balanced_;
     std::vector<acting_curvature<T>> curvatures_;
+    std::vector<T> joints_;
     std::vector<panel> panels_;
+    T error_estimate_{};
     T redundant_left_{}, redundant_right_{};
     struct {
         T left{}, right{};

@@ -72,32 +72,24 @@ constexpr T bracketed_root(const polynomial<T, Degree>& p, T low, T high) {
     return last >= low && last <= high ? last : t;
 }
 
-/// All roots in the open interval (0, 1), ascending. Values up to tolerance count as zero: a turning point with
-/// such a value is one double root; at the ends of the interval they are left to the caller.
-template <class T, std::size_t Degree>
-constexpr bounded_list<root<T>, Degree> roots_between_0_and_1(const polynomial<T, Degree>& p, const T& tolerance) {
-    // Turning points cut the interval into monotone stretches; one with opposite signs at its ends has a root.
-    bounded_list<T, Degree + 1> cuts;
-    cuts.push_back(T(0));
-    if constexpr (Degree > 1) {
-        const auto d = p.derivative();
-        for (const auto& turning : roots_between_0_and_1(d, d.noise())) cuts.push_back(turning.at);
-    }
-    cuts.push_back(T(1));
-
+/// The roots of a function between cuts from 0 to 1 that part it into monotone stretches, ascending. Values up to
+/// tolerance count as zero: a cut with such a value is one root, without a crossing if the function has the same sign
+/// on both sides; at 0 and 1 they are left to the caller. solve(low, high) finds the root of a stretch that has one.
+template <class Roots, class Function, class Cuts, class T, class Solve>
+constexpr Roots roots_between_cuts(const Function& f, const Cuts& cuts, const T& tolerance, const Solve& solve) {
     const auto sign_at = [&](const T& t) {
-        const T value = p(t);
+        const T value = f(t);
         return value > tolerance ? 1 : value < -tolerance ? -1 : 0;
     };
-    bounded_list<root<T>, Degree> roots;
+    Roots roots;
     int sign = sign_at(cuts[0]);
     int before = sign;  // the last sign that was not zero
     for (std::size_t i = 1; i < cuts.size(); ++i) {
         const int next = sign_at(cuts[i]);
-        const bool turning = i + 1 < cuts.size();
+        const bool inside = i + 1 < cuts.size();
         if (sign * next < 0) {
-            roots.push_back({bracketed_root(p, cuts[i - 1], cuts[i]), true});
-        } else if (next == 0 && turning && (sign != 0 || i == 1)) {
+            roots.push_back({solve(cuts[i - 1], cuts[i]), true});
+        } else if (next == 0 && inside && (sign != 0 || i == 1)) {
             roots.push_back({cuts[i], false});
         } else if (sign == 0 && next * before < 0 && !roots.empty()) {
             roots.back().crosses = true;  // a flat passage through zero
@@ -106,6 +98,27 @@ constexpr bounded_list<root<T>, Degree> roots_between_0_and_1(const polynomial<T
         if (sign != 0) before = sign;
     }
     return roots;
+}
+
+/// All roots in the open interval (0, 1), ascending. Values up to tolerance count as zero.
+template <class T, std::size_t Degree>
+constexpr bounded_list<root<T>, Degree> roots_between_0_and_1(const polynomial<T, Degree>& p, const T& tolerance) {
+    bounded_list<T, Degree + 1> cuts;
+    cuts.push_back(T(0));
+    if constexpr (Degree > 1) {
+        const auto d = p.derivative();
+        for (const auto& turning : roots_between_0_and_1(d, d.noise())) cuts.push_back(turning.at);
+    }
+    cuts.push_back(T(1));
+    return roots_between_cuts<bounded_list<root<T>, Degree>>(
+        p, cuts, tolerance, [&](const T& low, const T& high) { return bracketed_root(p, low, high); });
+}
+
+/// The places in (0, 1) where p turns.
+template <class T, std::size_t Degree>
+constexpr auto turning_points(const polynomial<T, Degree>& p) {
+    const auto d = p.derivative();
+    return roots_between_0_and_1(d, d.noise());
 }
 
 }  // namespace sagitta::detail

@@ -99,6 +99,13 @@ public:
                 left_ * x.x() - integral(T(0), past_start, past_start, T(-1))};
     }
 
+    T intensity(const T& x, side which) const {
+        if (load_.kind != acting_kind::line) return T(0);
+        const bool covered =
+            which == side::just_left ? x > load_.from && x <= load_.to : x >= load_.from && x < load_.to;
+        return covered ? load_.intensity(x - load_.from) : T(0);
+    }
+
 private:
     /// What lies right of the section hangs on the part left of it.
     shear_and_moment<T> held_on_the_left(const T& past_start, bool before) const {
