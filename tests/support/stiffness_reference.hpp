@@ -120,9 +120,10 @@ public:
     }
 
     /// How far the elements are from fitting together and from balance: the values at the end of each, integrated
-    /// from its start, against those of the node there, relative to the greatest value of each.
+    /// from its start, against those of the node there; all as moments, relative to the greatest.
     [[nodiscard]] double misfit() const {
-        std::array<T, 4> greatest{}, gap{};
+        T greatest(0), gap(0);
+        const T L0(span_);
         const auto take = [](T& slot, const T& x) { slot = std::max(slot, x < T(0) ? T(-x) : x); };
         for (const element& e : elements_) {
             const T L = e.to - e.from;
@@ -131,16 +132,14 @@ public:
                                               e.value(quantity::moment, L, shear_flexibility_),
                                               e.value(quantity::shear, L, shear_flexibility_)};
             const std::array<T, 4> there{moved_[e.unknown[2]], moved_[e.unknown[3]], -ends[3], ends[2]};
+            const std::array<T, 4> start{e.v, e.turn, e.M, e.V};
+            const std::array<T, 4> to_moment{e.EI / (L0 * L0), e.EI / L0, T(1), L0};
             for (std::size_t q = 0; q < 4; ++q) {
-                take(greatest[q], there[q]);
-                take(gap[q], integrated[q] - there[q]);
+                take(greatest, start[q] * to_moment[q]);
+                take(gap, (integrated[q] - there[q]) * to_moment[q]);
             }
         }
-        double worst = 0;
-        for (std::size_t q = 0; q < 4; ++q) {
-            if (gap[q] != T(0)) worst = std::max(worst, static_cast<double>(T(gap[q] / greatest[q])));
-        }
-        return worst;
+        return gap == T(0) ? 0 : static_cast<double>(T(gap / greatest));
     }
 
     [[nodiscard]] const std::vector<double>& places() const { return places_; }
