@@ -1,4 +1,4 @@
-// expect the compiler's: no member named 'deflection'
+// expect the compiler's: no member named '
 #include "twin.hpp"
 
 #ifdef WRONG
