@@ -20,6 +20,23 @@
 namespace sagitta {
 namespace detail {
 
+/// What none of the loads adds to a sum.
+struct nothing {
+    template <class Q>
+    friend constexpr Q operator+(nothing, const Q& q) {
+        return q;
+    }
+    template <class Q>
+    requires(!std::is_same_v<Q, nothing>) friend constexpr Q operator+(const Q& q, nothing) { return q; }
+};
+
+/// A sum of effects, those of forces and those of imposed movements and curvatures apart: on a unit beam.
+template <class Forced, class Imposed>
+struct effect_sums {
+    Forced forced;
+    Imposed imposed;
+};
+
 /// The effects of loads known when compiling: a tuple, no allocation.
 template <class Beam, class Loads>
 class superposition;
@@ -28,11 +45,11 @@ template <class Left, class Right, class N, loads::load_expression Loads>
 class superposition<beam<Left, Right, N>, Loads> {
 public:
     using number = std::common_type_t<N, typename Loads::number>;
-    using beam_type = beam<Left, Right, number>;
+    using seen_beam = unit_beam<number>;
 
     // Written without std::apply and kept inline: then the compiler sees through the tuple, leaves out what an
     // answer does not need (half of every effect), and composing costs what the formulas cost.
-    [[gnu::always_inline]] constexpr superposition(const beam_type& b, const Loads& loads)
+    [[gnu::always_inline]] constexpr superposition(const seen_beam& b, const Loads& loads)
         : superposition(b, loads::cases_of(loads), all{}) {}
 
     template <class Sum, class Response>
@@ -40,8 +57,13 @@ public:
         return sum_over<Sum>(response_of, all{});
     }
 
+    template <class Sum, class Response>
+    [[gnu::always_inline]] constexpr auto sums(const Response& response_of) const {
+        return sums_over<Sum>(response_of, all{});
+    }
+
     /// The places where the elastic line changes its polynomial, both ends included, ascending.
-    constexpr auto joints(const beam_type& b) const {
+    constexpr auto joints(const seen_beam& b) const {
         return std::apply(
             [&](const auto&... single) {
                 std::array<quantity<length, number>, 2 * sizeof...(single) + 2> places{
@@ -61,16 +83,31 @@ private:
     using all = std::make_index_sequence<std::tuple_size_v<effects>>;
 
     template <class Cases, std::size_t... i>
-    [[gnu::always_inline]] constexpr superposition(const beam_type& b, const Cases& cases, std::index_sequence<i...>)
+    [[gnu::always_inline]] constexpr superposition(const seen_beam& b, const Cases& cases, std::index_sequence<i...>)
         : effects_(effect(std::get<i>(cases), b)...) {}
 
     template <class Sum, class Response, std::size_t... i>
     [[gnu::always_inline]] constexpr Sum sum_over(const Response& response_of, std::index_sequence<i...>) const {
         return (response_of(std::get<i>(effects_)) + ...);
     }
+    template <class Sum, class Response, std::size_t... i>
+    [[gnu::always_inline]] constexpr auto sums_over(const Response& response_of, std::index_sequence<i...>) const {
+        const auto forced = (nothing{} + ... + part<false, i>(response_of));
+        const auto imposed = (nothing{} + ... + part<true, i>(response_of));
+        return effect_sums<std::remove_const_t<decltype(forced)>, std::remove_const_t<decltype(imposed)>>{forced,
+                                                                                                          imposed};
+    }
+    template <bool imposed, std::size_t i, class Response>
+    [[gnu::always_inline]] constexpr auto part([[maybe_unused]] const Response& response_of) const {
+        if constexpr (std::tuple_element_t<i, effects>::is_imposed == imposed) {
+            return response_of(std::get<i>(effects_));
+        } else {
+            return nothing{};
+        }
+    }
 
     template <class L>
-    [[gnu::always_inline]] static constexpr effect_of<L> effect(const L& single, const beam_type& b) {
+    [[gnu::always_inline]] static constexpr effect_of<L> effect(const L& single, const seen_beam& b) {
         if constexpr (requires { requires L::is_rotation; }) {
             static_assert(can_act_on<L, Left, Right>,
                           "sagitta: a support rotation needs a clamped end; this end turns freely");
@@ -89,9 +126,9 @@ template <class Left, class Right, class N, class M>
 class superposition<beam<Left, Right, N>, load_list<M>> {
 public:
     using number = std::common_type_t<N, M>;
-    using beam_type = beam<Left, Right, number>;
+    using seen_beam = unit_beam<number>;
 
-    superposition(const beam_type& b, const load_list<M>& list) {
+    superposition(const seen_beam& b, const load_list<M>& list) {
         effects_.reserve(list.cases().size());
         for (const auto& any : list.cases()) {
             std::visit([&](const auto& single) { add(single, b); }, any);
@@ -106,8 +143,18 @@ public:
         }
         return total;
     }
+    template <class Sum, class Response>
+    effect_sums<Sum, Sum> sums(const Response& response_of) const {
+        effect_sums<Sum, Sum> total{};
+        for (const auto& any : effects_) {
+            std::visit(
+                [&](const auto& single) { (single.is_imposed ? total.imposed : total.forced) += response_of(single); },
+                any);
+        }
+        return total;
+    }
 
-    std::vector<quantity<length, number>> joints(const beam_type& b) const {
+    std::vector<quantity<length, number>> joints(const seen_beam& b) const {
         std::vector<quantity<length, number>> places{quantity<length, number>{}, b.span()};
         for (const auto& any : effects_) {
             std::visit(
@@ -123,7 +170,7 @@ public:
 
 private:
     template <class L>
-    void add(const L& single, const beam_type& b) {
+    void add(const L& single, const seen_beam& b) {
         if constexpr (can_act_on<L, Left, Right>) {
             effects_.emplace_back(load_effect<L, Left, Right, number>(single, b));
         } else {
@@ -163,7 +210,7 @@ public:
     [[gnu::always_inline]] constexpr elastic_line(const beam<Left, Right, N>& b, const Loads& loads)
         : beam_(detail::coherent<length, number>(b.span()), detail::coherent<flexural_rigidity, number>(b.EI())),
           loads_(loads),
-          superposed_(beam_, loads) {}
+          superposed_(seen(), loads) {}
 
     /// Deflection, downward positive (a length).
     template <class X>
@@ -201,8 +248,8 @@ public:
         const auto place = on_beam(x);
         using result = quantity<line_load, number>;
         return superposed_.template sum<result>([&](const auto& effect) -> result {
-            if constexpr (requires { effect.intensity(place, beam_, which); }) {
-                return effect.intensity(place, beam_, which);
+            if constexpr (requires { effect.intensity(place, seen(), which); }) {
+                return effect.intensity(place, seen(), which);
             } else {
                 return {};
             }
@@ -214,8 +261,8 @@ public:
         const auto place = on_beam(x);
         using result = quantity<curvature, number>;
         return superposed_.template sum<result>([&](const auto& effect) -> result {
-            if constexpr (requires { effect.imposed(place, beam_, which); }) {
-                return effect.imposed(place, beam_, which);
+            if constexpr (requires { effect.imposed(place, seen(), which); }) {
+                return effect.imposed(place, seen(), which);
             } else {
                 return {};
             }
@@ -265,7 +312,7 @@ public:
 
     /// The places where the elastic line passes from one polynomial to the next, both ends included, ascending
     /// and possibly repeated (an array, or a vector where the loads are a load_list).
-    [[nodiscard]] constexpr auto joints() const { return superposed_.joints(beam_); }
+    [[nodiscard]] constexpr auto joints() const { return superposed_.joints(seen()); }
 
 private:
     template <class X>
@@ -280,11 +327,26 @@ private:
         return x < beam_.span() ? just_right : just_left;
     }
 
+    [[gnu::always_inline]] constexpr detail::unit_beam<number> seen() const { return {beam_.span()}; }
+
     template <response R>
     [[gnu::always_inline]] constexpr detail::response_quantity<R, number> answer(const quantity<length, number>& x,
                                                                                  side which) const {
-        return superposed_.template sum<detail::response_quantity<R, number>>([&](
-            const auto& effect) __attribute__((always_inline)) { return effect.template at<R>(x, beam_, which); });
+        constexpr bool is_deformation = R == response::deflection || R == response::slope;
+        const auto b = seen();
+        const auto sums = superposed_.template sums<detail::response_quantity<R, number>>([&](
+            const auto& effect) __attribute__((always_inline)) { return effect.template at<R>(x, b, which); });
+        const number& EI = beam_.EI().value();
+        return with_rigidity<is_deformation>(sums.forced, [&](const auto& q) { return q / EI; }) +
+               with_rigidity<!is_deformation>(sums.imposed, [&](const auto& q) { return q * EI; });
+    }
+    template <bool matters, class Sum, class Apply>
+    [[gnu::always_inline]] static constexpr Sum with_rigidity(const Sum& sum, const Apply& apply) {
+        if constexpr (matters && !std::is_same_v<Sum, detail::nothing>) {
+            return apply(sum);
+        } else {
+            return sum;
+        }
     }
 
     beam_type beam_;

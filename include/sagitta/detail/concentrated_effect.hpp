@@ -11,7 +11,9 @@ class load_effect<loads::concentrated<Action, N>, Left, Right, T> {
     using load = loads::concentrated<Action, N>;
 
 public:
-    [[gnu::always_inline]] constexpr load_effect(const load& acting, const beam<Left, Right, T>& b)
+    static constexpr bool is_imposed = false;
+
+    [[gnu::always_inline]] constexpr load_effect(const load& acting, const unit_beam<T>& b)
         : at_(coherent<length, T>(acting.at())), size_(coherent<typename load::unit, T>(acting.size())) {
         const auto L = b.span();
         const auto rest = L - at_;
@@ -31,8 +33,8 @@ public:
     }
 
     template <response R>
-    [[gnu::always_inline]] constexpr response_quantity<R, T> at(const quantity<length, T>& x,
-                                                                const beam<Left, Right, T>& b, side which) const {
+    [[gnu::always_inline]] constexpr response_quantity<R, T> at(const quantity<length, T>& x, const unit_beam<T>& b,
+                                                                side which) const {
         const bool before = which == side::just_left ? x <= at_ : x < at_;
         if (before) return left_.template at<R>(x, b.EI());
         return seen_from_right<R>(right_.template at<R>(b.span() - x, b.EI()));
@@ -41,13 +43,13 @@ public:
     constexpr quantity<moment, T> couple_up_to(const quantity<length, T>& x) const requires(load::is_couple) {
         return at_ <= x ? size_ : quantity<moment, T>{};
     }
-    constexpr quantity<length, T> start(const beam<Left, Right, T>&) const { return at_; }
-    constexpr quantity<length, T> stop(const beam<Left, Right, T>&) const { return at_; }
+    constexpr quantity<length, T> start(const unit_beam<T>&) const { return at_; }
+    constexpr quantity<length, T> stop(const unit_beam<T>&) const { return at_; }
 
 private:
     template <class Here, class There, int order>
     [[gnu::always_inline]] static constexpr end_state<Here, T> state(const quantity<force, T>& F, const T& near,
-                                                                     const T& far, const beam<Left, Right, T>& b) {
+                                                                     const T& far, const unit_beam<T>& b) {
         using across = derivative_t<decltype(across_row<Here, There>()), order>;
         using turning = derivative_t<decltype(turning_row<Here, There>()), order>;
         return state_from<Here>(F, across::value(near, far), turning::value(near, far), b);

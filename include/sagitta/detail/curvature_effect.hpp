@@ -13,7 +13,9 @@ class load_effect<loads::imposed_curvature<N, Where>, Left, Right, T> : public s
     using base = stretch_effect<Where, Left, Right, T>;
 
 public:
-    constexpr load_effect(const load& acting, const beam<Left, Right, T>& b)
+    static constexpr bool is_imposed = true;
+
+    constexpr load_effect(const load& acting, const unit_beam<T>& b)
         : base(acting.where(), b), size_(coherent<curvature, T>(acting.size())) {
         const auto seen = this->seen(b);
         this->left_ = state<Left, Right>(seen, b);
@@ -21,7 +23,7 @@ public:
     }
 
     template <response R>
-    constexpr response_quantity<R, T> at(const quantity<length, T>& x, const beam<Left, Right, T>& b, side) const {
+    constexpr response_quantity<R, T> at(const quantity<length, T>& x, const unit_beam<T>& b, side) const {
         const auto bend = [&](const quantity<length, T>& s) -> response_quantity<R, T> {
             if constexpr (R == response::deflection) {
                 return -(size_ * s * s / T(2));
@@ -34,14 +36,13 @@ public:
         return this->template at_with<R>(x, b, bend, bend);
     }
 
-    constexpr quantity<curvature, T> imposed(const quantity<length, T>& x, const beam<Left, Right, T>&,
-                                             side which) const {
+    constexpr quantity<curvature, T> imposed(const quantity<length, T>& x, const unit_beam<T>&, side which) const {
         return this->covers(x, which) ? size_ : quantity<curvature, T>{};
     }
 
 private:
     template <class Here, class There>
-    constexpr end_state<Here, T> state(const fractions<T>& seen, const beam<Left, Right, T>& b) const {
+    constexpr end_state<Here, T> state(const fractions<T>& seen, const unit_beam<T>& b) const {
         using across = derivative_t<decltype(across_row<Here, There>()), 2>;
         using turning = derivative_t<decltype(turning_row<Here, There>()), 2>;
         const auto L = b.span();

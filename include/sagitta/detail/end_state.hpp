@@ -47,6 +47,15 @@ constexpr response_quantity<R, T> scale_of_force(const quantity<force, T>& F, co
     }
 }
 
+template <class T>
+constexpr T half() {
+    return T(1) / T(2);
+}
+template <class T>
+constexpr T sixth() {
+    return T(1) / T(6);
+}
+
 /// What stands at an end held like End, seen with x running away from it. Values that the end does not allow
 /// are zero and not stored: a pinned end has a slope and a shear, a clamped one a moment and a shear, a free
 /// one a deflection and a slope.
@@ -85,11 +94,11 @@ private:
     constexpr quantity<length, T> deflection(const quantity<length, T>& s,
                                              const quantity<flexural_rigidity, T>& EI) const {
         if constexpr (has_shear && has_moment) {
-            return -(s * s) * (turning / T(2) + across * s / T(6)) / EI;
+            return -(s * s) * (turning * half<T>() + across * s * sixth<T>()) / EI;
         } else if constexpr (has_shear) {
-            return s * (as_ratio(turning) - across * (s * s / (T(6) * EI)));
+            return s * (as_ratio(turning) - across * (s * s * sixth<T>() / EI));
         } else if constexpr (has_moment) {
-            return across - turning * (s * s / (T(2) * EI));
+            return across - turning * (s * s * half<T>() / EI);
         } else {
             return across + as_ratio(turning) * s;
         }
@@ -100,7 +109,7 @@ private:
         if constexpr (has_shear && has_moment) {
             return as_angle(-s * (turning + across * s / T(2)) / EI);
         } else if constexpr (has_shear) {
-            return turning - as_angle(across * (s * s / (T(2) * EI)));
+            return turning - as_angle(across * (s * s * half<T>() / EI));
         } else if constexpr (has_moment) {
             return as_angle(-turning * s / EI);
         } else {

@@ -48,7 +48,9 @@ class load_effect<Load, Left, Right, T> : public stretch_effect<typename Load::w
     using profile = intensity_profile<T, is_uniform>;
 
 public:
-    [[gnu::always_inline]] constexpr load_effect(const Load& acting, const beam<Left, Right, T>& b)
+    static constexpr bool is_imposed = false;
+
+    [[gnu::always_inline]] constexpr load_effect(const Load& acting, const unit_beam<T>& b)
         : base(acting.where(), b),
           w_from_(coherent<line_load, T>(acting.size_from())),
           w_to_(coherent<line_load, T>(acting.size_to())) {
@@ -58,8 +60,8 @@ public:
     }
 
     template <response R>
-    [[gnu::always_inline]] constexpr response_quantity<R, T> at(const quantity<length, T>& x,
-                                                                const beam<Left, Right, T>& b, side) const {
+    [[gnu::always_inline]] constexpr response_quantity<R, T> at(const quantity<length, T>& x, const unit_beam<T>& b,
+                                                                side) const {
         return this->template at_with<R>(
             x, b,
             [&](const quantity<length, T>& s) __attribute__((always_inline)) {
@@ -70,8 +72,7 @@ public:
             });
     }
 
-    constexpr quantity<line_load, T> intensity(const quantity<length, T>& x, const beam<Left, Right, T>&,
-                                               side which) const {
+    constexpr quantity<line_load, T> intensity(const quantity<length, T>& x, const unit_beam<T>&, side which) const {
         if (!this->covers(x, which)) return {};
         return profile{w_from_, gradient()}.over(x - this->from_, 1, 1);
     }
@@ -89,7 +90,7 @@ private:
     [[gnu::always_inline]] constexpr end_state<Here, T> state(const fractions<T>& seen,
                                                               const quantity<line_load, T>& w_from,
                                                               const quantity<line_load, T>& w_to,
-                                                              const beam<Left, Right, T>& b) const {
+                                                              const unit_beam<T>& b) const {
         using across = decltype(across_row<Here, There>());
         using turning = decltype(turning_row<Here, There>());
         const auto width = this->to_ - this->from_;

@@ -15,6 +15,16 @@ constexpr T ratio(const quantity<length, T>& part, const quantity<length, T>& wh
     return (part / whole).value();
 }
 
+/// A beam as the effects of loads see it: its rigidity is 1. The elastic line divides by the rigidity once, after it
+/// has summed: then an uncertain rigidity (an interval) enters an answer once and widens it no more than it must.
+template <class T>
+struct unit_beam {
+    quantity<length, T> L;
+
+    constexpr const quantity<length, T>& span() const { return L; }
+    static constexpr quantity<flexural_rigidity, T> EI() { return quantity<flexural_rigidity, T>::from_value(T(1)); }
+};
+
 /// A response as seen from the right end has x running the other way: slope and shear change their sign.
 template <response R, class Q>
 constexpr Q seen_from_right(const Q& q) {
@@ -26,9 +36,9 @@ constexpr Q seen_from_right(const Q& q) {
 }
 
 /// The end state that a resultant force F makes at the end Here, given the pure numbers of its two rows.
-template <class Here, class Left, class Right, class T>
+template <class Here, class T>
 constexpr end_state<Here, T> state_from(const quantity<force, T>& F, const T& across, const T& turning,
-                                        const beam<Left, Right, T>& b) {
+                                        const unit_beam<T>& b) {
     using state = end_state<Here, T>;
     return {scale_of_force<state::across_kind>(F, b.span(), b.EI()) * across,
             scale_of_force<state::turning_kind>(F, b.span(), b.EI()) * turning};
@@ -37,6 +47,8 @@ constexpr end_state<Here, T> state_from(const quantity<force, T>& F, const T& ac
 /// The effect of one load case on one beam. Every specialization answers
 ///   at<R>(x, beam, side)     the response R at x,
 ///   start(beam), stop(beam)  where its polynomial begins and ends,
+///   is_imposed               whether it sets a deflection instead of a force, so that rigidity multiplies
+///                            its moment and shear instead of dividing its slope and deflection,
 /// and, where it has one, intensity(x, beam, side) or imposed(x, beam, side).
 template <class Load, class Left, class Right, class T>
 class load_effect;
@@ -47,8 +59,7 @@ class stretch_effect {
 public:
     static constexpr bool is_whole = std::is_same_v<Where, loads::whole_beam>;
 
-    [[gnu::always_inline]] constexpr stretch_effect([[maybe_unused]] const Where& where,
-                                                    const beam<Left, Right, T>& b) {
+    [[gnu::always_inline]] constexpr stretch_effect([[maybe_unused]] const Where& where, const unit_beam<T>& b) {
         if constexpr (is_whole) {
             to_ = b.span();
         } else {
@@ -59,11 +70,11 @@ public:
         }
     }
 
-    constexpr quantity<length, T> start(const beam<Left, Right, T>&) const { return from_; }
-    constexpr quantity<length, T> stop(const beam<Left, Right, T>&) const { return to_; }
+    constexpr quantity<length, T> start(const unit_beam<T>&) const { return from_; }
+    constexpr quantity<length, T> stop(const unit_beam<T>&) const { return to_; }
 
 protected:
-    [[gnu::always_inline]] constexpr fractions<T> seen(const beam<Left, Right, T>& b) const {
+    [[gnu::always_inline]] constexpr fractions<T> seen(const unit_beam<T>& b) const {
         if constexpr (is_whole) {
             return {T(1) / T(2), T(1) / T(2), T(1)};
         } else {
@@ -81,8 +92,7 @@ protected:
     /// over at the supports. part_left(s) is measured from the start of the stretch, part_right(s) from its stop.
     template <response R, class PartLeft, class PartRight>
     [[gnu::always_inline]] constexpr response_quantity<R, T> at_with(const quantity<length, T>& x,
-                                                                     const beam<Left, Right, T>& b,
-                                                                     const PartLeft& part_left,
+                                                                     const unit_beam<T>& b, const PartLeft& part_left,
                                                                      const PartRight& part_right) const {
         const auto back = b.span() - x;
         if constexpr (!is_whole) {

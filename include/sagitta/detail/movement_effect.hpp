@@ -23,12 +23,14 @@ class load_effect<loads::movement<End, Motion, N>, Left, Right, T> {
     using there = std::conditional_t<is_left, Right, Left>;
 
 public:
-    constexpr load_effect(const load& imposed, const beam<Left, Right, T>&)
+    static constexpr bool is_imposed = true;
+
+    constexpr load_effect(const load& imposed, const unit_beam<T>&)
         : size_(coherent<typename load::unit, T>(imposed.size())) {}
 
     template <response R>
-    [[gnu::always_inline]] constexpr response_quantity<R, T> at(const quantity<length, T>& x,
-                                                                const beam<Left, Right, T>& b, side) const {
+    [[gnu::always_inline]] constexpr response_quantity<R, T> at(const quantity<length, T>& x, const unit_beam<T>& b,
+                                                                side) const {
         const auto L = b.span();
         if constexpr (!can_act_on<load, Left, Right>) {
             return {};
@@ -39,8 +41,8 @@ public:
         }
     }
 
-    constexpr quantity<length, T> start(const beam<Left, Right, T>&) const { return {}; }
-    constexpr quantity<length, T> stop(const beam<Left, Right, T>& b) const { return b.span(); }
+    constexpr quantity<length, T> start(const unit_beam<T>&) const { return {}; }
+    constexpr quantity<length, T> stop(const unit_beam<T>& b) const { return b.span(); }
 
 private:
     static constexpr auto shape_of_movement() {
@@ -65,7 +67,7 @@ private:
 
     template <response R>
     static constexpr response_quantity<R, T> along(const quantity<length, T>& size, const T& near, const T& far,
-                                                   const beam<Left, Right, T>& b) {
+                                                   const unit_beam<T>& b) {
         using shape = derivative_t<decltype(shape_of_movement()), static_cast<int>(R)>;
         const T number = shape::value(near, far);
         const auto L = b.span();
