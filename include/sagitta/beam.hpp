@@ -16,7 +16,7 @@ class shear_flexible_beam;
 
 /// A prismatic beam of one span. Left and Right are ways to hold an end (held::fixed, held::pinned, held::free).
 template <class Left, class Right, class T = double>
-class beam {
+class prismatic_beam {
 public:
     static_assert(detail::stable_ends<Left, Right>,
                   "sagitta: a beam held like this is a mechanism; it needs a clamped end or two supports");
@@ -26,20 +26,22 @@ public:
     using right_type = Right;
 
     /// Throws invalid_input unless the span and EI are greater than 0 and finite.
-    constexpr beam(const quantity<length, T>& span, const quantity<flexural_rigidity, T>& EI) : span_(span), EI_(EI) {
+    constexpr prismatic_beam(const quantity<dimension::length, T>& span,
+                             const quantity<dimension::flexural_rigidity, T>& EI)
+        : span_(span), EI_(EI) {
         if (!detail::is_positive(span.value())) [[unlikely]]
             detail::refuse("span", span, "must be greater than 0 m and finite");
         if (!detail::is_positive(EI.value())) [[unlikely]]
             detail::refuse("EI", EI, "must be greater than 0 N*m^2 and finite");
     }
 
-    [[nodiscard]] constexpr const quantity<length, T>& span() const { return span_; }
-    [[nodiscard]] constexpr const quantity<flexural_rigidity, T>& EI() const { return EI_; }
+    [[nodiscard]] constexpr const quantity<dimension::length, T>& span() const { return span_; }
+    [[nodiscard]] constexpr const quantity<dimension::flexural_rigidity, T>& EI() const { return EI_; }
 
     /// The elastic line under a load case, a composition of load cases or a load_list (elastic_line.hpp).
     template <class Loads>
     [[nodiscard, gnu::always_inline]] constexpr auto under(const Loads& loads) const {
-        return elastic_line<beam, Loads>(*this, loads);
+        return elastic_line<prismatic_beam, Loads>(*this, loads);
     }
 
     /// The beam that also deforms in shear, with the shear rigidity kGA (a force; shear_flexible.hpp).
@@ -49,8 +51,8 @@ public:
     }
 
 private:
-    quantity<length, T> span_;
-    quantity<flexural_rigidity, T> EI_;
+    quantity<dimension::length, T> span_;
+    quantity<dimension::flexural_rigidity, T> EI_;
 };
 
 /// A beam from the ways its two ends are held, left then right: beam_with_ends<held::pinned, held::fixed>(L, EI).
@@ -58,7 +60,7 @@ private:
 template <class Left, class Right, class L, class K>
 [[nodiscard]] constexpr auto beam_with_ends(const L& span, const K& EI) {
     using T = detail::common_number<L, K>;
-    return beam<Left, Right, T>(detail::expect_length<T>(span), detail::expect_rigidity<T>(EI));
+    return prismatic_beam<Left, Right, T>(detail::expect_length<T>(span), detail::expect_rigidity<T>(EI));
 }
 
 /// Supported at both ends, free to rotate there.
@@ -87,8 +89,11 @@ template <class L, class K>
 
 /// The same beam with its ends exchanged.
 template <class Left, class Right, class T>
-[[nodiscard]] constexpr beam<Right, Left, T> mirrored(const beam<Left, Right, T>& b) {
+[[nodiscard]] constexpr prismatic_beam<Right, Left, T> mirrored(const prismatic_beam<Left, Right, T>& b) {
     return {b.span(), b.EI()};
 }
+
+template <class Left, class Right, class T = double>  // PHASE2
+using beam = prismatic_beam<Left, Right, T>;          // PHASE2
 
 }  // namespace sagitta

@@ -14,28 +14,28 @@ namespace sagitta {
 template <class T>
 class straight_line {
 public:
-    constexpr straight_line(const quantity<length, T>& x0, const quantity<length, T>& v,
-                            const quantity<plane_angle, T>& slope)
+    constexpr straight_line(const quantity<dimension::length, T>& x0, const quantity<dimension::length, T>& v,
+                            const quantity<dimension::plane_angle, T>& slope)
         : x0_(x0), v_(v), slope_(slope) {}
 
-    [[nodiscard]] constexpr const quantity<plane_angle, T>& slope() const { return slope_; }
+    [[nodiscard]] constexpr const quantity<dimension::plane_angle, T>& slope() const { return slope_; }
 
     /// Its deflection at x (a length from the left end of the beam, also beyond the beam; downward positive).
     template <class X>
-    [[nodiscard]] constexpr quantity<length, T> deflection(const X& x) const {
+    [[nodiscard]] constexpr quantity<dimension::length, T> deflection(const X& x) const {
         return v_ + detail::as_ratio(slope_) * (detail::expect_length<T>(x) - x0_);
     }
 
     /// Where it meets the undeformed line, which may be beyond the beam; nothing if it is level.
-    [[nodiscard]] constexpr std::optional<quantity<length, T>> meets_undeformed_line() const {
+    [[nodiscard]] constexpr std::optional<quantity<dimension::length, T>> meets_undeformed_line() const {
         if (slope_.value() == T(0)) return std::nullopt;
         return x0_ - v_ / detail::as_ratio(slope_);
     }
 
 private:
-    quantity<length, T> x0_;
-    quantity<length, T> v_;
-    quantity<plane_angle, T> slope_;
+    quantity<dimension::length, T> x0_;
+    quantity<dimension::length, T> v_;
+    quantity<dimension::plane_angle, T> slope_;
 };
 
 /// The tangent to an elastic line at x (a length on the beam, else invalid_input).

@@ -27,14 +27,14 @@ namespace sagitta {
 template <class T = double>
 class continuous_beam {
 public:
-    using number = T;
+    using number = typename detail::in_order<T>::number;
 
     /// A beam of a length L (a length) with flexural rigidity EI, held nowhere yet.
     template <class L, class K>
     continuous_beam(const L& span, const K& rigidity) : L_(detail::expect_length<T>(span)) {
         if (!detail::is_positive(L_.value())) [[unlikely]]
             detail::refuse("span", L_, "must be greater than 0 m and finite");
-        steps_.push_back({quantity<length, T>{}, positive_rigidity(rigidity)});
+        steps_.push_back({quantity<dimension::length, T>{}, positive_rigidity(rigidity)});
         nodes_.push_back({});
         nodes_.push_back({L_});
     }
@@ -85,7 +85,7 @@ public:
     template <class X>
     continuous_beam& hinge_at(const X& x) {
         const auto place = on_beam(x);
-        if (!(place > quantity<length, T>{} && place < L_)) [[unlikely]]
+        if (!(place > quantity<dimension::length, T>{} && place < L_)) [[unlikely]]
             detail::refuse("hinge_at: x", place, "must lie between the ends of the beam, 0 m and ", L_);
         node_at(place).is_hinge = true;
         return *this;
@@ -113,12 +113,13 @@ public:
         return *this;
     }
 
-    [[nodiscard]] const quantity<length, T>& span() const { return L_; }
-    [[nodiscard]] const std::vector<node<T>>& nodes() const { return nodes_; }
+    [[nodiscard]] const quantity<dimension::length, T>& span() const { return L_; }
+    [[nodiscard]] const std::vector<detail::node<T>>& nodes() const { return nodes_; }
     [[nodiscard]] const auto& shear_flexibility() const { return shear_flexibility_; }
 
     /// The flexural rigidity just right of x.
-    [[nodiscard]] const quantity<flexural_rigidity, T>& rigidity_after(const quantity<length, T>& x) const {
+    [[nodiscard]] const quantity<dimension::flexural_rigidity, T>& rigidity_after(
+        const quantity<dimension::length, T>& x) const {
         return std::prev(step_behind(x))->EI;
     }
 
@@ -132,15 +133,15 @@ public:
     }
 
 private:
-    using node_type = node<T>;
+    using node_type = detail::node<T>;
     struct step {
-        quantity<length, T> from;
-        quantity<flexural_rigidity, T> EI;
+        quantity<dimension::length, T> from;
+        quantity<dimension::flexural_rigidity, T> EI;
     };
     static T rigid() { return std::numeric_limits<T>::infinity(); }
 
     template <class K>
-    static quantity<flexural_rigidity, T> positive_rigidity(const K& rigidity) {
+    static quantity<dimension::flexural_rigidity, T> positive_rigidity(const K& rigidity) {
         const auto EI = detail::expect_rigidity<T>(rigidity);
         if (!detail::is_positive(EI.value())) [[unlikely]]
             detail::refuse("EI", EI, "must be greater than 0 N*m^2 and finite");
@@ -148,15 +149,15 @@ private:
     }
     template <class S>
     static T expect_stiffness(const S& k) {
-        static_assert(detail::has_dimension<S, spring_stiffness>,
+        static_assert(detail::has_dimension<S, dimension::spring_stiffness>,
                       "sagitta: a spring stiffness (force per length) is expected here, such as 8.0*kN/mm");
-        return not_negative(detail::coherent<spring_stiffness, T>(k).value());
+        return not_negative(detail::coherent<dimension::spring_stiffness, T>(k).value());
     }
     template <class S>
     static T expect_turning_stiffness(const S& k) {
-        static_assert(detail::has_dimension<S, rotational_stiffness>,
+        static_assert(detail::has_dimension<S, dimension::rotational_stiffness>,
                       "sagitta: a rotational stiffness (moment per angle) is expected here, such as 500.0*kN*m/rad");
-        return not_negative(detail::coherent<rotational_stiffness, T>(k).value());
+        return not_negative(detail::coherent<dimension::rotational_stiffness, T>(k).value());
     }
     static T not_negative(const T& k) {
         if (!(k >= T(0))) [[unlikely]]
@@ -165,21 +166,21 @@ private:
     }
 
     template <class X>
-    quantity<length, T> on_beam(const X& x) const {
+    quantity<dimension::length, T> on_beam(const X& x) const {
         const auto place = detail::expect_length<T>(x);
         if (!(place.value() >= T(0) && place <= L_)) [[unlikely]]
             detail::refuse("x", place, "must lie on the beam, from 0 m to ", L_);
         return place;
     }
-    auto step_behind(const quantity<length, T>& x) const {
+    auto step_behind(const quantity<dimension::length, T>& x) const {
         return std::upper_bound(steps_.begin(), steps_.end(), x,
                                 [](const auto& place, const step& s) { return place < s.from; });
     }
-    auto step_behind(const quantity<length, T>& x) {
+    auto step_behind(const quantity<dimension::length, T>& x) {
         return steps_.begin() + (std::as_const(*this).step_behind(x) - steps_.cbegin());
     }
 
-    continuous_beam& hold(const quantity<length, T>& place, const T& stiffness) {
+    continuous_beam& hold(const quantity<dimension::length, T>& place, const T& stiffness) {
         node_type& support = node_at(place);
         support.transverse = stiffness;
         support.is_support = true;
@@ -189,13 +190,13 @@ private:
     node_type& end_node(end::right_end) { return nodes_.back(); }
 
     /// The node at a place, made if there is none.
-    node_type& node_at(const quantity<length, T>& place) {
+    node_type& node_at(const quantity<dimension::length, T>& place) {
         const auto here = std::lower_bound(nodes_.begin(), nodes_.end(), place,
                                            [](const node_type& n, const auto& x) { return n.at < x; });
         return here->at == place ? *here : *nodes_.insert(here, node_type{place});
     }
 
-    quantity<length, T> L_;
+    quantity<dimension::length, T> L_;
     std::vector<node_type> nodes_;
     std::vector<step> steps_;
     quantity<typename detail::beam_part<T>::inverse_force, T> shear_flexibility_{};

@@ -56,14 +56,14 @@ struct discrepancy {
 /// deflection of a fixed beam under a constant curvature) is measured against what its neighbours in the chain
 /// imply, such as M/L for V.
 template <class Left, class Right, class N, class Loads>
-[[nodiscard]] auto cross_check(const elastic_line<beam<Left, Right, N>, Loads>& line) {
-    using T = typename elastic_line<beam<Left, Right, N>, Loads>::number;
+[[nodiscard]] auto cross_check(const elastic_line<prismatic_beam<Left, Right, N>, Loads>& line) {
+    using T = typename detail::in_order<typename elastic_line<prismatic_beam<Left, Right, N>, Loads>::number>::number;
     const T L = line.supported().span().value();
     const T EI = line.supported().EI().value();
     const detail::integrator<Left, Right, T, T> integrated(L, detail::acting_loads<T>(line.loads(), L), EI);
     detail::discrepancy<T> of_shear, of_moment, of_slope, of_deflection;
     for (const T& place : integrated.panel_bounds()) {
-        const auto x = quantity<length, T>::from_value(place);
+        const auto x = quantity<dimension::length, T>::from_value(place);
         for (const side which : {just_left, just_right}) {
             const auto balanced = integrated.statics_at({place}, which);
             of_shear.compare(line.shear(x, which).value(), balanced.shear);

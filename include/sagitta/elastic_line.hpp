@@ -41,8 +41,8 @@ struct effect_sums {
 template <class Beam, class Loads>
 class superposition;
 
-template <class Left, class Right, class N, loads::load_expression Loads>
-class superposition<beam<Left, Right, N>, Loads> {
+template <class Left, class Right, class N, load_types::load_expression Loads>
+class superposition<prismatic_beam<Left, Right, N>, Loads> {
 public:
     using number = std::common_type_t<N, typename Loads::number>;
     using seen_beam = unit_beam<number>;
@@ -50,7 +50,7 @@ public:
     // Written without std::apply and kept inline: then the compiler sees through the tuple, leaves out what an
     // answer does not need (half of every effect), and composing costs what the formulas cost.
     [[gnu::always_inline]] constexpr superposition(const seen_beam& b, const Loads& loads)
-        : superposition(b, loads::cases_of(loads), all{}) {}
+        : superposition(b, load_types::cases_of(loads), all{}) {}
 
     template <class Sum, class Response>
     [[gnu::always_inline]] constexpr Sum sum(const Response& response_of) const {
@@ -66,8 +66,8 @@ public:
     constexpr auto joints(const seen_beam& b) const {
         return std::apply(
             [&](const auto&... single) {
-                std::array<quantity<length, number>, 2 * sizeof...(single) + 2> places{
-                    quantity<length, number>{}, b.span(), single.start(b)..., single.stop(b)...};
+                std::array<quantity<dimension::length, number>, 2 * sizeof...(single) + 2> places{
+                    quantity<dimension::length, number>{}, b.span(), single.start(b)..., single.stop(b)...};
                 std::sort(places.begin(), places.end());
                 return places;
             },
@@ -79,7 +79,7 @@ private:
     using effect_of = load_effect<L, Left, Right, number>;
     template <class... L>
     static std::tuple<effect_of<L>...> effects_of(const std::tuple<L...>&);
-    using effects = decltype(effects_of(loads::cases_of(std::declval<const Loads&>())));
+    using effects = decltype(effects_of(load_types::cases_of(std::declval<const Loads&>())));
     using all = std::make_index_sequence<std::tuple_size_v<effects>>;
 
     template <class Cases, std::size_t... i>
@@ -123,7 +123,7 @@ private:
 
 /// The effects of a load_list.
 template <class Left, class Right, class N, class M>
-class superposition<beam<Left, Right, N>, load_list<M>> {
+class superposition<prismatic_beam<Left, Right, N>, load_list<M>> {
 public:
     using number = std::common_type_t<N, M>;
     using seen_beam = unit_beam<number>;
@@ -154,8 +154,8 @@ public:
         return total;
     }
 
-    std::vector<quantity<length, number>> joints(const seen_beam& b) const {
-        std::vector<quantity<length, number>> places{quantity<length, number>{}, b.span()};
+    std::vector<quantity<dimension::length, number>> joints(const seen_beam& b) const {
+        std::vector<quantity<dimension::length, number>> places{quantity<dimension::length, number>{}, b.span()};
         for (const auto& any : effects_) {
             std::visit(
                 [&](const auto& single) {
@@ -182,7 +182,7 @@ private:
 
     template <class... L>
     static std::variant<load_effect<L, Left, Right, number>...> any_effect_of(const std::variant<L...>&);
-    using any_effect = decltype(any_effect_of(std::declval<const loads::any_load<M>&>()));
+    using any_effect = decltype(any_effect_of(std::declval<const load_types::any_load<M>&>()));
 
     std::vector<any_effect> effects_;
 };
@@ -199,54 +199,56 @@ private:
 /// Accuracy in double: within 1e-13 of the greatest value of the same response in the same beam for each load
 /// case; errors of superposed cases add.
 template <class Left, class Right, class N, class Loads>
-class elastic_line<beam<Left, Right, N>, Loads> {
-    using superposed = detail::superposition<beam<Left, Right, N>, Loads>;
+class elastic_line<prismatic_beam<Left, Right, N>, Loads> {
+    using superposed = detail::superposition<prismatic_beam<Left, Right, N>, Loads>;
     using response = detail::response;
 
 public:
     using number = typename superposed::number;
-    using beam_type = beam<Left, Right, number>;
+    using beam_type = prismatic_beam<Left, Right, number>;
 
-    [[gnu::always_inline]] constexpr elastic_line(const beam<Left, Right, N>& b, const Loads& loads)
-        : beam_(detail::coherent<length, number>(b.span()), detail::coherent<flexural_rigidity, number>(b.EI())),
+    [[gnu::always_inline]] constexpr elastic_line(const prismatic_beam<Left, Right, N>& b, const Loads& loads)
+        : beam_(detail::coherent<dimension::length, number>(b.span()),
+                detail::coherent<dimension::flexural_rigidity, number>(b.EI())),
           loads_(loads),
           superposed_(seen(), loads) {}
 
     /// Deflection, downward positive (a length).
     template <class X>
-    [[nodiscard, gnu::always_inline]] constexpr quantity<length, number> deflection(const X& x) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<dimension::length, number> deflection(const X& x) const {
         return answer<response::deflection>(on_beam(x), just_right);
     }
     /// Slope dv/dx, clockwise positive (a plane angle).
     template <class X>
-    [[nodiscard, gnu::always_inline]] constexpr quantity<plane_angle, number> slope(const X& x) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<dimension::plane_angle, number> slope(const X& x) const {
         return answer<response::slope>(on_beam(x), just_right);
     }
     /// Bending moment, sagging positive (force times length).
     template <class X>
-    [[nodiscard, gnu::always_inline]] constexpr quantity<sagitta::moment, number> moment(const X& x) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<dimension::moment, number> moment(const X& x) const {
         const auto place = on_beam(x);
         return answer<response::moment>(place, inner_side(place));
     }
     template <class X>
-    [[nodiscard, gnu::always_inline]] constexpr quantity<sagitta::moment, number> moment(const X& x, side which) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<dimension::moment, number> moment(const X& x,
+                                                                                           side which) const {
         return answer<response::moment>(on_beam(x), which);
     }
     /// Shear force V = dM/dx.
     template <class X>
-    [[nodiscard, gnu::always_inline]] constexpr quantity<force, number> shear(const X& x) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<dimension::force, number> shear(const X& x) const {
         const auto place = on_beam(x);
         return answer<response::shear>(place, inner_side(place));
     }
     template <class X>
-    [[nodiscard, gnu::always_inline]] constexpr quantity<force, number> shear(const X& x, side which) const {
+    [[nodiscard, gnu::always_inline]] constexpr quantity<dimension::force, number> shear(const X& x, side which) const {
         return answer<response::shear>(on_beam(x), which);
     }
     /// The line load at x, downward positive (force per length).
     template <class X>
-    [[nodiscard]] constexpr quantity<line_load, number> load(const X& x, side which = just_right) const {
+    [[nodiscard]] constexpr quantity<dimension::line_load, number> load(const X& x, side which = just_right) const {
         const auto place = on_beam(x);
-        using result = quantity<line_load, number>;
+        using result = quantity<dimension::line_load, number>;
         return superposed_.template sum<result>([&](const auto& effect) -> result {
             if constexpr (requires { effect.intensity(place, seen(), which); }) {
                 return effect.intensity(place, seen(), which);
@@ -257,9 +259,10 @@ public:
     }
     /// The imposed curvature at x, sagging positive (1 per length).
     template <class X>
-    [[nodiscard]] constexpr quantity<curvature, number> imposed_curvature(const X& x, side which = just_right) const {
+    [[nodiscard]] constexpr quantity<dimension::curvature, number> imposed_curvature(const X& x,
+                                                                                     side which = just_right) const {
         const auto place = on_beam(x);
-        using result = quantity<curvature, number>;
+        using result = quantity<dimension::curvature, number>;
         return superposed_.template sum<result>([&](const auto& effect) -> result {
             if constexpr (requires { effect.imposed(place, seen(), which); }) {
                 return effect.imposed(place, seen(), which);
@@ -271,9 +274,9 @@ public:
 
     /// The sum of the couples applied from the left end up to and at x, clockwise positive (force times length).
     template <class X>
-    [[nodiscard]] constexpr quantity<sagitta::moment, number> couples_up_to(const X& x) const {
+    [[nodiscard]] constexpr quantity<dimension::moment, number> couples_up_to(const X& x) const {
         const auto place = on_beam(x);
-        using result = quantity<sagitta::moment, number>;
+        using result = quantity<dimension::moment, number>;
         return superposed_.template sum<result>([&](const auto& effect) -> result {
             if constexpr (requires { effect.couple_up_to(place); }) {
                 return effect.couple_up_to(place);
@@ -285,25 +288,25 @@ public:
 
     /// The force that the support at an end exerts on the beam, upward positive; 0 at a free end. Loads that
     /// stand right at the support are part of it.
-    [[nodiscard]] constexpr quantity<force, number> reaction(end::left_end) const {
+    [[nodiscard]] constexpr quantity<dimension::force, number> reaction(end::left_end) const {
         return answer<response::shear>({}, just_left);
     }
-    [[nodiscard]] constexpr quantity<force, number> reaction(end::right_end) const {
+    [[nodiscard]] constexpr quantity<dimension::force, number> reaction(end::right_end) const {
         return -answer<response::shear>(beam_.span(), just_right);
     }
 
     /// The bending moment at the support of an end, sagging positive; 0 unless the end is clamped. A couple
     /// that stands right at the support lies between this value and the beam's own.
-    [[nodiscard]] constexpr quantity<sagitta::moment, number> end_moment(end::left_end) const {
+    [[nodiscard]] constexpr quantity<dimension::moment, number> end_moment(end::left_end) const {
         return answer<response::moment>({}, just_left);
     }
-    [[nodiscard]] constexpr quantity<sagitta::moment, number> end_moment(end::right_end) const {
+    [[nodiscard]] constexpr quantity<dimension::moment, number> end_moment(end::right_end) const {
         return answer<response::moment>(beam_.span(), just_right);
     }
 
     /// Flexural rigidity, the same at every x.
     template <class X>
-    [[nodiscard]] constexpr const quantity<flexural_rigidity, number>& rigidity(const X&) const {
+    [[nodiscard]] constexpr const quantity<dimension::flexural_rigidity, number>& rigidity(const X&) const {
         return beam_.EI();
     }
 
@@ -316,22 +319,22 @@ public:
 
 private:
     template <class X>
-    [[gnu::always_inline]] constexpr quantity<length, number> on_beam(const X& x) const {
+    [[gnu::always_inline]] constexpr quantity<dimension::length, number> on_beam(const X& x) const {
         const auto place = detail::expect_length<number>(x);
         if (!(place.value() >= number(0) && place <= beam_.span())) [[unlikely]]
             detail::refuse("x", place, "must lie on the beam, from 0 m to ", beam_.span());
         return place;
     }
 
-    constexpr side inner_side(const quantity<length, number>& x) const {
+    constexpr side inner_side(const quantity<dimension::length, number>& x) const {
         return x < beam_.span() ? just_right : just_left;
     }
 
     [[gnu::always_inline]] constexpr detail::unit_beam<number> seen() const { return {beam_.span()}; }
 
     template <response R>
-    [[gnu::always_inline]] constexpr detail::response_quantity<R, number> answer(const quantity<length, number>& x,
-                                                                                 side which) const {
+    [[gnu::always_inline]] constexpr detail::response_quantity<R, number> answer(
+        const quantity<dimension::length, number>& x, side which) const {
         constexpr bool is_deformation = R == response::deflection || R == response::slope;
         const auto b = seen();
         const auto sums = superposed_.template sums<detail::response_quantity<R, number>>([&](

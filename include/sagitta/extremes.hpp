@@ -11,7 +11,7 @@ namespace sagitta {
 /// A value and the place where it stands.
 template <class Dimension, class T>
 struct extreme {
-    quantity<length, T> at;
+    quantity<dimension::length, T> at;
     quantity<Dimension, T> value;
 };
 
@@ -46,26 +46,28 @@ constexpr auto answer_of(const Line& line, const X& x, side which) {
 /// Offers to consider(x, value) every place between first and last where a response can be extreme: both sides
 /// of every joint, and every turning point between joints.
 template <response R, class Line, class Consider>
-constexpr void for_each_candidate(const Line& line, const quantity<length, typename Line::number>& first,
-                                  const quantity<length, typename Line::number>& last, const Consider& consider) {
+constexpr void for_each_candidate(const Line& line, const quantity<dimension::length, typename Line::number>& first,
+                                  const quantity<dimension::length, typename Line::number>& last,
+                                  const Consider& consider) {
     using T = typename Line::number;
-    for_each_stretch(line, first, last, [&](const quantity<length, T>& from, const quantity<length, T>& to) {
-        consider(from, answer_of<R>(line, from, just_right));
-        for (const auto& turning : turning_points(profile_between<R>(line, from, to))) {
-            const auto x = from + (to - from) * turning.at;
-            consider(x, answer_of<R>(line, x, just_right));
-        }
-        consider(to, answer_of<R>(line, to, just_left));
-    });
+    for_each_stretch(line, first, last,
+                     [&](const quantity<dimension::length, T>& from, const quantity<dimension::length, T>& to) {
+                         consider(from, answer_of<R>(line, from, just_right));
+                         for (const auto& turning : turning_points(profile_between<R>(line, from, to))) {
+                             const auto x = from + (to - from) * turning.at;
+                             consider(x, answer_of<R>(line, x, just_right));
+                         }
+                         consider(to, answer_of<R>(line, to, just_left));
+                     });
 }
 
 template <response R, class Line>
-constexpr auto extremes_between(const Line& line, const quantity<length, typename Line::number>& first,
-                                const quantity<length, typename Line::number>& last) {
-    using T = typename Line::number;
+constexpr auto extremes_between(const Line& line, const quantity<dimension::length, typename Line::number>& first,
+                                const quantity<dimension::length, typename Line::number>& last) {
+    using T = typename in_order<typename Line::number>::number;
     const auto start = answer_of<R>(line, first, just_right);
     extreme_pair<unit_of_response<R>, T> found{{first, start}, {first, start}};
-    for_each_candidate<R>(line, first, last, [&](const quantity<length, T>& x, const auto& value) {
+    for_each_candidate<R>(line, first, last, [&](const quantity<dimension::length, T>& x, const auto& value) {
         if (value > found.greatest.value) found.greatest = {x, value};
         if (value < found.least.value) found.least = {x, value};
     });
@@ -117,10 +119,11 @@ template <class Line, class... Stretch>
 /// The deflection that is greatest in magnitude, with its sign, and where it is; of equal ones the leftmost.
 template <class Line>
 [[nodiscard]] constexpr auto greatest_deflection(const Line& line) {
-    using T = typename Line::number;
-    extreme<length, T> greatest{};
+    using T = typename detail::in_order<typename Line::number>::number;
+    extreme<dimension::length, T> greatest{};
     detail::for_each_candidate<detail::response::deflection>(
-        line, {}, line.supported().span(), [&](const quantity<length, T>& x, const quantity<length, T>& v) {
+        line, {}, line.supported().span(),
+        [&](const quantity<dimension::length, T>& x, const quantity<dimension::length, T>& v) {
             if (abs(v) > abs(greatest.value)) greatest = {x, v};
         });
     return greatest;

@@ -15,7 +15,7 @@
 #include <type_traits>
 
 namespace sagitta {
-namespace loads {
+namespace load_types {
 
 template <load_expression A, load_expression B>
 [[nodiscard, gnu::always_inline]] constexpr auto operator+(const A& a, const B& b) {
@@ -44,7 +44,7 @@ template <load_expression A, load_expression B>
     return a + (-b);
 }
 
-}  // namespace loads
+}  // namespace load_types
 
 // Places are bounded by the beam as well, but only beam.under(...) knows its span and refuses what lies beyond.
 
@@ -55,7 +55,7 @@ template <class X>
     const auto place = detail::expect_length<T>(x);
     if (!(place.value() >= T(0))) [[unlikely]]
         detail::refuse("at", place, "must be a distance from the left end, not less than 0 m");
-    return loads::position<T>{place};
+    return load_types::position<T>{place};
 }
 
 /// A stretch for a line load: two distances from the left end (lengths, not negative, from < to).
@@ -68,7 +68,7 @@ template <class From, class To>
         detail::refuse("between: from", start, "must be a distance from the left end, not less than 0 m");
     if (!(start.value() < stop.value())) [[unlikely]]
         detail::refuse("between: to", stop, "must be a distance from the left end, greater than from = ", start);
-    return loads::stretch<T>{start, stop};
+    return load_types::stretch<T>{start, stop};
 }
 
 namespace detail {
@@ -78,20 +78,20 @@ struct number_of_place {
     using type = double;
 };
 template <class T>
-struct number_of_place<loads::position<T>> {
+struct number_of_place<load_types::position<T>> {
     using type = T;
 };
 template <class T>
-struct number_of_place<loads::stretch<T>> {
+struct number_of_place<load_types::stretch<T>> {
     using type = T;
 };
 
 template <class T, class P>
-constexpr loads::position<T> expect_position([[maybe_unused]] const P& place) {
+constexpr load_types::position<T> expect_position([[maybe_unused]] const P& place) {
     constexpr bool right = requires { place.x; };
     static_assert(right, "sagitta: a place on the beam is expected here: write at(3.0*m)");
     if constexpr (right) {
-        return {coherent<length, T>(place.x)};
+        return {coherent<dimension::length, T>(place.x)};
     } else {
         return {};
     }
@@ -102,9 +102,10 @@ constexpr auto expect_stretch(const P& place) {
     constexpr bool right = requires { place.from, place.to; };
     static_assert(right, "sagitta: a stretch of the beam is expected here: write between(1.2*m, 4.8*m)");
     if constexpr (right) {
-        return loads::stretch<T>{coherent<length, T>(place.from), coherent<length, T>(place.to)};
+        return load_types::stretch<T>{coherent<dimension::length, T>(place.from),
+                                      coherent<dimension::length, T>(place.to)};
     } else {
-        return loads::stretch<T>{};
+        return load_types::stretch<T>{};
     }
 }
 
@@ -114,60 +115,61 @@ constexpr auto expect_stretch(const P& place) {
 template <class F, class P>
 [[nodiscard]] constexpr auto point_load(const F& size, const P& place) {
     using T = std::common_type_t<detail::common_number<F>, typename detail::number_of_place<P>::type>;
-    return loads::concentrated<loads::action::point_force, T>(detail::expect_force<T>(size),
-                                                              detail::expect_position<T>(place));
+    return load_types::concentrated<load_types::action::point_force, T>(detail::expect_force<T>(size),
+                                                                        detail::expect_position<T>(place));
 }
 
 /// A concentrated couple (force times length, clockwise positive) at a place: applied_couple(8.0*kN*m, at(7.2*m)).
 template <class C, class P>
 [[nodiscard]] constexpr auto applied_couple(const C& size, const P& place) {
     using T = std::common_type_t<detail::common_number<C>, typename detail::number_of_place<P>::type>;
-    return loads::concentrated<loads::action::couple, T>(detail::expect_moment<T>(size),
-                                                         detail::expect_position<T>(place));
+    return load_types::concentrated<load_types::action::couple, T>(detail::expect_moment<T>(size),
+                                                                   detail::expect_position<T>(place));
 }
 
 /// A line load w (force per length, downward positive) over the whole beam.
 template <class W>
 [[nodiscard]] constexpr auto uniform_load(const W& size) {
     using T = detail::common_number<W>;
-    return loads::uniform<T, loads::whole_beam>(detail::expect_line_load<T>(size), {});
+    return load_types::uniform<T, load_types::whole_beam>(detail::expect_line_load<T>(size), {});
 }
 
 /// A line load w over a stretch: partial_uniform_load(9.0*kN/m, between(1.2*m, 4.8*m)).
 template <class W, class S>
 [[nodiscard]] constexpr auto partial_uniform_load(const W& size, const S& where) {
     using T = std::common_type_t<detail::common_number<W>, typename detail::number_of_place<S>::type>;
-    return loads::uniform<T, loads::stretch<T>>(detail::expect_line_load<T>(size), detail::expect_stretch<T>(where));
+    return load_types::uniform<T, load_types::stretch<T>>(detail::expect_line_load<T>(size),
+                                                          detail::expect_stretch<T>(where));
 }
 
 /// A line load that varies linearly from its first size to its second over a stretch (trapezoidal, triangular).
 template <class W1, class W2, class S>
 [[nodiscard]] constexpr auto linear_load(const W1& size_from, const W2& size_to, const S& where) {
     using T = std::common_type_t<detail::common_number<W1, W2>, typename detail::number_of_place<S>::type>;
-    return loads::linear<T, loads::stretch<T>>(detail::expect_line_load<T>(size_from),
-                                               detail::expect_line_load<T>(size_to), detail::expect_stretch<T>(where));
+    return load_types::linear<T, load_types::stretch<T>>(
+        detail::expect_line_load<T>(size_from), detail::expect_line_load<T>(size_to), detail::expect_stretch<T>(where));
 }
 
 /// The same over the whole beam.
 template <class W1, class W2>
 [[nodiscard]] constexpr auto linear_load(const W1& size_from, const W2& size_to) {
     using T = detail::common_number<W1, W2>;
-    return loads::linear<T, loads::whole_beam>(detail::expect_line_load<T>(size_from),
-                                               detail::expect_line_load<T>(size_to), {});
+    return load_types::linear<T, load_types::whole_beam>(detail::expect_line_load<T>(size_from),
+                                                         detail::expect_line_load<T>(size_to), {});
 }
 
 /// An end that moves down by a given length (downward positive): settlement(end::right, 5.0*mm).
 template <class End, class D>
 [[nodiscard]] constexpr auto settlement(End, const D& size) {
     using T = detail::common_number<D>;
-    return loads::movement<End, loads::motion::settlement, T>(detail::expect_length<T>(size));
+    return load_types::movement<End, load_types::motion::settlement, T>(detail::expect_length<T>(size));
 }
 
 /// A clamped end that is turned by a given angle (clockwise positive): support_rotation(end::left, 0.5*mrad).
 template <class End, class R>
 [[nodiscard]] constexpr auto support_rotation(End, const R& size) {
     using T = detail::common_number<R>;
-    return loads::movement<End, loads::motion::rotation, T>(detail::expect_angle<T>(size));
+    return load_types::movement<End, load_types::motion::rotation, T>(detail::expect_angle<T>(size));
 }
 
 /// A curvature (1 per length, sagging positive) that a cause other than load imposes over a stretch, such as
@@ -175,15 +177,15 @@ template <class End, class R>
 template <class C, class S>
 [[nodiscard]] constexpr auto imposed_curvature(const C& size, const S& where) {
     using T = std::common_type_t<detail::common_number<C>, typename detail::number_of_place<S>::type>;
-    return loads::imposed_curvature<T, loads::stretch<T>>(detail::expect_curvature<T>(size),
-                                                          detail::expect_stretch<T>(where));
+    return load_types::imposed_curvature<T, load_types::stretch<T>>(detail::expect_curvature<T>(size),
+                                                                    detail::expect_stretch<T>(where));
 }
 
 /// The same over the whole beam.
 template <class C>
 [[nodiscard]] constexpr auto imposed_curvature(const C& size) {
     using T = detail::common_number<C>;
-    return loads::imposed_curvature<T, loads::whole_beam>(detail::expect_curvature<T>(size), {});
+    return load_types::imposed_curvature<T, load_types::whole_beam>(detail::expect_curvature<T>(size), {});
 }
 
 /// The side of a section that is the warmer one.
@@ -200,7 +202,7 @@ template <class A, class D, class H, class... Stretch>
     if (!detail::is_positive(h.value())) [[unlikely]]
         detail::refuse("temperature_gradient: depth", h, "must be greater than 0 m and finite");
     const T strain = detail::expect_expansion<T>(expansion).value() * detail::expect_temperature<T>(difference).value();
-    const auto size = quantity<curvature, T>::from_value(strain / h.value());
+    const auto size = quantity<dimension::curvature, T>::from_value(strain / h.value());
     return sagitta::imposed_curvature(warm == warm_side::bottom ? size : -size, where...);
 }
 

@@ -7,7 +7,7 @@
 #include <vector>
 
 namespace sagitta {
-namespace loads {
+namespace load_types {
 
 /// Any one load case, held by value.
 template <class T>
@@ -18,7 +18,7 @@ using any_load =
                  movement<end::left_end, motion::rotation, T>, movement<end::right_end, motion::rotation, T>,
                  imposed_curvature<T, whole_beam>, imposed_curvature<T, stretch<T>>>;
 
-}  // namespace loads
+}  // namespace load_types
 
 /// Load cases acting together, their number known at run time. The same vector space as the compositions of
 /// load.hpp: += - * / and beam.under(list).
@@ -30,15 +30,15 @@ public:
     load_list() = default;
 
     /// A list that starts with a load case or a composition of them.
-    template <loads::load_expression L>
+    template <load_types::load_expression L>
     load_list(const L& load) {  // NOLINT(google-explicit-constructor): so that lists and compositions add up
         *this += load;
     }
 
     /// Adds a load case, a composition of them, or another list.
-    template <loads::load_expression L>
+    template <load_types::load_expression L>
     load_list& operator+=(const L& load) {
-        std::apply([this](const auto&... single) { (cases_.emplace_back(single), ...); }, loads::cases_of(load));
+        std::apply([this](const auto&... single) { (cases_.emplace_back(single), ...); }, load_types::cases_of(load));
         return *this;
     }
     load_list& operator+=(const load_list& other) {
@@ -63,15 +63,15 @@ public:
     [[nodiscard]] friend load_list operator*(const T& factor, load_list list) { return list *= factor; }
     [[nodiscard]] friend load_list operator/(load_list list, const T& divisor) { return list /= divisor; }
 
-    [[nodiscard]] const std::vector<loads::any_load<T>>& cases() const { return cases_; }
+    [[nodiscard]] const std::vector<load_types::any_load<T>>& cases() const { return cases_; }
     void reserve(std::size_t count) { cases_.reserve(count); }
     void clear() { cases_.clear(); }
 
 private:
-    std::vector<loads::any_load<T>> cases_;
+    std::vector<load_types::any_load<T>> cases_;
 };
 
-template <loads::load_expression L>
+template <load_types::load_expression L>
 load_list(const L&) -> load_list<typename L::number>;
 
 }  // namespace sagitta

@@ -22,11 +22,11 @@ namespace sagitta {
 template <class T>
 struct moment_area_result {
     /// Slope at the second point less the slope at the first.
-    quantity<plane_angle, T> angle_change;
+    quantity<dimension::plane_angle, T> angle_change;
     /// Tangential deviation: of the second point from the tangent at the first, downward positive.
-    quantity<length, T> deviation;
+    quantity<dimension::length, T> deviation;
     /// Of the first point from the tangent at the second.
-    quantity<length, T> deviation_of_first;
+    quantity<dimension::length, T> deviation_of_first;
 };
 
 /// A beam under loads, integrated numerically (integrate_moment_area makes one). Answers as elastic_line does:
@@ -34,55 +34,55 @@ struct moment_area_result {
 template <class Left, class Right, class T, class Rigidity>
 class integrated_line {
 public:
-    using number = T;
+    using number = typename detail::in_order<T>::number;
 
     /// Deflection and slope are no polynomials: questions bracket their zeros instead.
     static constexpr bool is_numeric = true;
 
-    integrated_line(const beam<Left, Right, T>& b, const detail::acting_loads<T>& acting, const Rigidity& rigidity,
-                    const std::vector<T>& steps = {}, const T& tolerance = T(0))
+    integrated_line(const prismatic_beam<Left, Right, T>& b, const detail::acting_loads<T>& acting,
+                    const Rigidity& rigidity, const std::vector<T>& steps = {}, const T& tolerance = T(0))
         : beam_(b), integrator_(b.span().value(), acting, rigidity, steps, tolerance) {}
 
     /// Deflection, downward positive.
     template <class X>
-    [[nodiscard]] quantity<length, T> deflection(const X& x) const {
-        return quantity<length, T>::from_value(integrator_.state_at(on_beam(x)).deflection);
+    [[nodiscard]] quantity<dimension::length, T> deflection(const X& x) const {
+        return quantity<dimension::length, T>::from_value(integrator_.state_at(on_beam(x)).deflection);
     }
     /// Slope, clockwise positive.
     template <class X>
-    [[nodiscard]] quantity<plane_angle, T> slope(const X& x) const {
-        return quantity<plane_angle, T>::from_value(integrator_.state_at(on_beam(x)).slope);
+    [[nodiscard]] quantity<dimension::plane_angle, T> slope(const X& x) const {
+        return quantity<dimension::plane_angle, T>::from_value(integrator_.state_at(on_beam(x)).slope);
     }
     /// Bending moment, sagging positive.
     template <class X>
-    [[nodiscard]] quantity<sagitta::moment, T> moment(const X& x, side which) const {
-        return quantity<sagitta::moment, T>::from_value(integrator_.statics_at({on_beam(x)}, which).moment);
+    [[nodiscard]] quantity<dimension::moment, T> moment(const X& x, side which) const {
+        return quantity<dimension::moment, T>::from_value(integrator_.statics_at({on_beam(x)}, which).moment);
     }
     template <class X>
-    [[nodiscard]] quantity<sagitta::moment, T> moment(const X& x) const {
+    [[nodiscard]] quantity<dimension::moment, T> moment(const X& x) const {
         return moment(x, inner_side(on_beam(x)));
     }
     /// Shear force V = dM/dx.
     template <class X>
-    [[nodiscard]] quantity<force, T> shear(const X& x, side which) const {
-        return quantity<force, T>::from_value(integrator_.statics_at({on_beam(x)}, which).shear);
+    [[nodiscard]] quantity<dimension::force, T> shear(const X& x, side which) const {
+        return quantity<dimension::force, T>::from_value(integrator_.statics_at({on_beam(x)}, which).shear);
     }
     template <class X>
-    [[nodiscard]] quantity<force, T> shear(const X& x) const {
+    [[nodiscard]] quantity<dimension::force, T> shear(const X& x) const {
         return shear(x, inner_side(on_beam(x)));
     }
 
     template <class X>
-    [[nodiscard]] quantity<line_load, T> load(const X& x, side which = just_right) const {
-        return quantity<line_load, T>::from_value(integrator_.load_at(on_beam(x), which));
+    [[nodiscard]] quantity<dimension::line_load, T> load(const X& x, side which = just_right) const {
+        return quantity<dimension::line_load, T>::from_value(integrator_.load_at(on_beam(x), which));
     }
     template <class X>
-    [[nodiscard]] quantity<curvature, T> imposed_curvature(const X& x, side which = just_right) const {
-        return quantity<curvature, T>::from_value(integrator_.imposed_at(on_beam(x), which));
+    [[nodiscard]] quantity<dimension::curvature, T> imposed_curvature(const X& x, side which = just_right) const {
+        return quantity<dimension::curvature, T>::from_value(integrator_.imposed_at(on_beam(x), which));
     }
     template <class X>
-    [[nodiscard]] quantity<flexural_rigidity, T> rigidity(const X& x) const {
-        return quantity<flexural_rigidity, T>::from_value(integrator_.rigidity_at(on_beam(x)));
+    [[nodiscard]] quantity<dimension::flexural_rigidity, T> rigidity(const X& x) const {
+        return quantity<dimension::flexural_rigidity, T>::from_value(integrator_.rigidity_at(on_beam(x)));
     }
 
     /// The estimated error of the integration, relative to the integral of the magnitude of M/EI; 0 where it is but
@@ -90,9 +90,11 @@ public:
     [[nodiscard]] const T& error_estimate() const { return integrator_.error_estimate(); }
 
     /// The beam whose supports these are; its constant EI is not what was integrated.
-    [[nodiscard]] const beam<Left, Right, T>& supported() const { return beam_; }
-    [[nodiscard]] std::vector<quantity<length, T>> joints() const { return lengths(integrator_.joints()); }
-    [[nodiscard]] std::vector<quantity<length, T>> panel_bounds() const { return lengths(integrator_.panel_bounds()); }
+    [[nodiscard]] const prismatic_beam<Left, Right, T>& supported() const { return beam_; }
+    [[nodiscard]] std::vector<quantity<dimension::length, T>> joints() const { return lengths(integrator_.joints()); }
+    [[nodiscard]] std::vector<quantity<dimension::length, T>> panel_bounds() const {
+        return lengths(integrator_.panel_bounds());
+    }
 
     /// The moment-area theorems between two points, in either order.
     template <class From, class To>
@@ -113,29 +115,30 @@ private:
         const auto place = detail::expect_length<T>(x);
         if (!(place.value() >= T(0) && place.value() <= integrator_.span())) [[unlikely]]
             detail::refuse("x", place, "must lie on the beam, from 0 m to ",
-                           quantity<length, T>::from_value(integrator_.span()));
+                           quantity<dimension::length, T>::from_value(integrator_.span()));
         return place.value();
     }
     side inner_side(const T& x) const { return x < integrator_.span() ? just_right : just_left; }
 
-    static std::vector<quantity<length, T>> lengths(const std::vector<T>& numbers) {
-        std::vector<quantity<length, T>> places;
-        for (const T& number : numbers) places.push_back(quantity<length, T>::from_value(number));
+    static std::vector<quantity<dimension::length, T>> lengths(const std::vector<T>& numbers) {
+        std::vector<quantity<dimension::length, T>> places;
+        for (const T& number : numbers) places.push_back(quantity<dimension::length, T>::from_value(number));
         return places;
     }
 
     static moment_area_result<T> result(const T& angle, const T& of_second, const T& of_first) {
-        return {quantity<plane_angle, T>::from_value(angle), quantity<length, T>::from_value(of_second),
-                quantity<length, T>::from_value(of_first)};
+        return {quantity<dimension::plane_angle, T>::from_value(angle),
+                quantity<dimension::length, T>::from_value(of_second),
+                quantity<dimension::length, T>::from_value(of_first)};
     }
 
-    beam<Left, Right, T> beam_;
+    prismatic_beam<Left, Right, T> beam_;
     detail::integrator<Left, Right, T, Rigidity> integrator_;
 };
 
 /// Integrates a prismatic beam under loads.
 template <class Left, class Right, class T, class Loads>
-[[nodiscard]] auto integrate_moment_area(const beam<Left, Right, T>& b, const Loads& loads) {
+[[nodiscard]] auto integrate_moment_area(const prismatic_beam<Left, Right, T>& b, const Loads& loads) {
     const detail::acting_loads<T> acting(loads, b.span().value());
     return integrated_line<Left, Right, T, T>(b, acting, b.EI().value());
 }
@@ -146,8 +149,9 @@ template <class Left, class Right, class T, class Loads>
 /// Throws invalid_input where EI is not greater than 0 or a step is not on the beam, tolerance_not_reached where the
 /// estimate stays above the tolerance.
 template <class Left, class Right, class T, class Loads, class Stiffness>
-[[nodiscard]] auto integrate_moment_area(const beam<Left, Right, T>& b, const Loads& loads, const Stiffness& EI,
-                                         std::initializer_list<quantity<length, T>> steps = {},
+[[nodiscard]] auto integrate_moment_area(const prismatic_beam<Left, Right, T>& b, const Loads& loads,
+                                         const Stiffness& EI,
+                                         std::initializer_list<quantity<dimension::length, T>> steps = {},
                                          const T& tolerance = T(1000) * std::numeric_limits<T>::epsilon()) {
     std::vector<T> places;
     for (const auto& step : steps) {
@@ -158,7 +162,7 @@ template <class Left, class Right, class T, class Loads, class Stiffness>
     if (!detail::is_positive(tolerance)) [[unlikely]]
         detail::refuse("tolerance", tolerance, "must be greater than 0 and finite");
     const auto rigidity_at = [EI](const T& x) {
-        const auto place = quantity<length, T>::from_value(x);
+        const auto place = quantity<dimension::length, T>::from_value(x);
         const auto here = detail::expect_rigidity<T>(EI(place));
         if (!detail::is_positive(here.value())) [[unlikely]]
             detail::refuse("EI", here, "must be greater than 0 N*m^2 and finite, also at x = ", place);

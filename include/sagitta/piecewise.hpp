@@ -20,8 +20,8 @@ namespace sagitta {
 /// polynomials run in s = x - from; all follow from the values at its start.
 template <class T>
 class elastic_segment {
-    using per_length = typename boost::units::divide_typeof_helper<line_load, length>::type;
-    using per_force = typename boost::units::divide_typeof_helper<dimensionless, force>::type;
+    using per_length = typename boost::units::divide_typeof_helper<dimension::line_load, dimension::length>::type;
+    using per_force = typename boost::units::divide_typeof_helper<dimension::dimensionless, dimension::force>::type;
 
 public:
     using number = T;
@@ -30,7 +30,8 @@ public:
 
     /// The segment of a line between two places that have no joint between them.
     template <class Line>
-    constexpr elastic_segment(const Line& whole_line, const quantity<length, T>& from, const quantity<length, T>& to)
+    constexpr elastic_segment(const Line& whole_line, const quantity<dimension::length, T>& from,
+                              const quantity<dimension::length, T>& to)
         : from_(from),
           to_(to),
           EI_(whole_line.rigidity(from)),
@@ -44,8 +45,8 @@ public:
         if constexpr (requires { whole_line.shear_flexibility(); }) shear_flexibility_ = whole_line.shear_flexibility();
     }
 
-    [[nodiscard]] constexpr const quantity<length, T>& from() const { return from_; }
-    [[nodiscard]] constexpr const quantity<length, T>& to() const { return to_; }
+    [[nodiscard]] constexpr const quantity<dimension::length, T>& from() const { return from_; }
+    [[nodiscard]] constexpr const quantity<dimension::length, T>& to() const { return to_; }
 
     // The coefficients of s^0, s^1, ... as quantities, each with its own dimension.
 
@@ -69,34 +70,34 @@ public:
     // Values at a place x (a length from the left end of the beam; the polynomials go on beyond the segment).
 
     template <class X>
-    [[nodiscard]] constexpr quantity<length, T> deflection(const X& x) const {
+    [[nodiscard]] constexpr quantity<dimension::length, T> deflection(const X& x) const {
         return value(deflection_coefficients(), x);
     }
     template <class X>
-    [[nodiscard]] constexpr quantity<plane_angle, T> slope(const X& x) const {
+    [[nodiscard]] constexpr quantity<dimension::plane_angle, T> slope(const X& x) const {
         return detail::as_angle(value(slope_coefficients(), x));
     }
     template <class X>
-    [[nodiscard]] constexpr quantity<sagitta::moment, T> moment(const X& x) const {
+    [[nodiscard]] constexpr quantity<dimension::moment, T> moment(const X& x) const {
         return value(moment_coefficients(), x);
     }
     template <class X>
-    [[nodiscard]] constexpr quantity<force, T> shear(const X& x) const {
+    [[nodiscard]] constexpr quantity<dimension::force, T> shear(const X& x) const {
         return value(shear_coefficients(), x);
     }
     template <class X>
-    [[nodiscard]] constexpr quantity<line_load, T> load(const X& x) const {
+    [[nodiscard]] constexpr quantity<dimension::line_load, T> load(const X& x) const {
         return value(load_coefficients(), x);
     }
 
 private:
     /// Minus the second and third derivative of v at the start: bending, and where the beam deforms in shear the
     /// change of V/kGA.
-    constexpr quantity<curvature, T> turning() const { return bend_ + w_ * shear_flexibility_; }
+    constexpr quantity<dimension::curvature, T> turning() const { return bend_ + w_ * shear_flexibility_; }
     constexpr auto turning_growth() const { return V_ / EI_ + growth_ * shear_flexibility_; }
 
     template <std::size_t i = 0, class... C>
-    static constexpr auto horner(const std::tuple<C...>& c, const quantity<length, T>& s) {
+    static constexpr auto horner(const std::tuple<C...>& c, const quantity<dimension::length, T>& s) {
         if constexpr (i + 1 == sizeof...(C)) {
             return std::get<i>(c);
         } else {
@@ -108,14 +109,14 @@ private:
         return horner(c, detail::expect_length<T>(x) - from_);
     }
 
-    quantity<length, T> from_{}, to_{};
-    quantity<flexural_rigidity, T> EI_{};
-    quantity<length, T> v_{};
-    quantity<plane_angle, T> slope_{};
-    quantity<sagitta::moment, T> M_{};
-    quantity<curvature, T> bend_{};  // of load and imposed
-    quantity<force, T> V_{};
-    quantity<line_load, T> w_{};
+    quantity<dimension::length, T> from_{}, to_{};
+    quantity<dimension::flexural_rigidity, T> EI_{};
+    quantity<dimension::length, T> v_{};
+    quantity<dimension::plane_angle, T> slope_{};
+    quantity<dimension::moment, T> M_{};
+    quantity<dimension::curvature, T> bend_{};  // of load and imposed
+    quantity<dimension::force, T> V_{};
+    quantity<dimension::line_load, T> w_{};
     quantity<per_length, T> growth_{};
     quantity<per_force, T> shear_flexibility_{};
 };
@@ -136,8 +137,8 @@ using list_along = typename list_by_segment<Value, a_segment, decltype(std::decl
 
 /// Calls visit(from, to) for every stretch without joints between two places, in order.
 template <class Line, class Visit>
-constexpr void for_each_stretch(const Line& line, const quantity<length, typename Line::number>& first,
-                                const quantity<length, typename Line::number>& last, const Visit& visit) {
+constexpr void for_each_stretch(const Line& line, const quantity<dimension::length, typename Line::number>& first,
+                                const quantity<dimension::length, typename Line::number>& last, const Visit& visit) {
     auto from = first;
     const auto joints = line.joints();
     for (const auto& joint : joints) {
@@ -181,8 +182,8 @@ class numeric_profile;
 /// A response between two joints as a function of t from 0 to 1: a polynomial, but for the deflection and slope of
 /// a line whose stiffness varies (detail/numeric_profile.hpp).
 template <response R, class Line>
-constexpr auto profile_between(const Line& line, const quantity<length, typename Line::number>& from,
-                               const quantity<length, typename Line::number>& to) {
+constexpr auto profile_between(const Line& line, const quantity<dimension::length, typename Line::number>& from,
+                               const quantity<dimension::length, typename Line::number>& to) {
     constexpr bool bends = R == response::deflection || R == response::slope;
     if constexpr (bends && requires { requires Line::is_numeric; }) {
         return numeric_profile<R, Line>(line, from, to);

@@ -24,8 +24,11 @@
 
 namespace sagitta {
 
-// The dimensions of beam theory, each as its coherent SI unit. A moment is force times length: the torque of
-// Boost.Units is divided by an angle and is another thing.
+/// The dimensions of beam theory, each as its coherent SI unit. A moment is force times length: the torque of
+/// Boost.Units is divided by an angle and is another thing. (In a namespace of their own, so that a program may call
+/// its variables length, area or moment.)
+namespace dimension {
+
 using dimensionless = boost::units::si::dimensionless;
 using length = boost::units::si::length;
 using plane_angle = boost::units::si::plane_angle;
@@ -34,18 +37,25 @@ using moment = boost::units::si::energy;
 using line_load = boost::units::si::surface_tension;
 using stress = boost::units::si::pressure;
 using area = boost::units::si::area;
-using second_moment_of_area =
-    boost::units::power_typeof_helper<boost::units::si::length, boost::units::static_rational<4>>::type;
+using second_moment_of_area = boost::units::power_typeof_helper<length, boost::units::static_rational<4>>::type;
 using curvature = boost::units::si::wavenumber;
 using temperature = boost::units::si::temperature;
 using expansion_coefficient = boost::units::divide_typeof_helper<dimensionless, temperature>::type;
 using flexural_rigidity = boost::units::multiply_typeof_helper<stress, second_moment_of_area>::type;
+using spring_stiffness = boost::units::divide_typeof_helper<force, length>::type;
+using rotational_stiffness = boost::units::divide_typeof_helper<moment, plane_angle>::type;
 
-/// A value of one dimension: quantity<length>, quantity<moment, float>.
+}  // namespace dimension
+
+using namespace dimension;  // PHASE2
+
+/// A value of one dimension: quantity<dimension::length>, quantity<dimension::moment, float>.
 template <class Dimension, class T = double>
 using quantity = boost::units::quantity<Dimension, T>;
 
 namespace detail {
+
+using namespace dimension;
 
 template <class Q>
 inline constexpr bool is_quantity = false;
@@ -126,7 +136,7 @@ template <class D1, class N, class D2, detail::scale S>
 template <detail::number_type N, class D, detail::scale S>
 [[nodiscard]] constexpr auto operator/(const N& number, unit_constant<D, S>) {
     using T = detail::real_number<N>;
-    using inverse = typename boost::units::divide_typeof_helper<dimensionless, D>::type;
+    using inverse = typename boost::units::divide_typeof_helper<dimension::dimensionless, D>::type;
     return quantity<inverse, T>::from_value(detail::to_coherent<S.inverse()>(static_cast<T>(number)));
 }
 
@@ -169,31 +179,31 @@ requires(detail::is_quantity<boost::units::quantity<Dimension, T>>)
 /// The unit constants. Import them where you write numbers: using namespace sagitta::units.
 namespace units {
 
-inline constexpr unit_constant<length> m{};
-inline constexpr unit_constant<length, detail::scale{.tens = -2}> cm{};
-inline constexpr unit_constant<length, detail::scale{.tens = -3}> mm{};
-inline constexpr unit_constant<length, detail::scale{.tens = 3}> km{};
-inline constexpr unit_constant<length, detail::scale{.inches = 1}> in{};
-inline constexpr unit_constant<length, detail::scale{.twelves = 1, .inches = 1}> ft{};
+inline constexpr unit_constant<dimension::length> m{};
+inline constexpr unit_constant<dimension::length, detail::scale{.tens = -2}> cm{};
+inline constexpr unit_constant<dimension::length, detail::scale{.tens = -3}> mm{};
+inline constexpr unit_constant<dimension::length, detail::scale{.tens = 3}> km{};
+inline constexpr unit_constant<dimension::length, detail::scale{.inches = 1}> in{};
+inline constexpr unit_constant<dimension::length, detail::scale{.twelves = 1, .inches = 1}> ft{};
 
-inline constexpr unit_constant<force> N{};
-inline constexpr unit_constant<force, detail::scale{.tens = 3}> kN{};
-inline constexpr unit_constant<force, detail::scale{.tens = 6}> MN{};
-inline constexpr unit_constant<force, detail::scale{.pounds = 1}> lbf{};
-inline constexpr unit_constant<force, detail::scale{.tens = 3, .pounds = 1}> kip{};
+inline constexpr unit_constant<dimension::force> N{};
+inline constexpr unit_constant<dimension::force, detail::scale{.tens = 3}> kN{};
+inline constexpr unit_constant<dimension::force, detail::scale{.tens = 6}> MN{};
+inline constexpr unit_constant<dimension::force, detail::scale{.pounds = 1}> lbf{};
+inline constexpr unit_constant<dimension::force, detail::scale{.tens = 3, .pounds = 1}> kip{};
 
-inline constexpr unit_constant<stress> Pa{};
-inline constexpr unit_constant<stress, detail::scale{.tens = 3}> kPa{};
-inline constexpr unit_constant<stress, detail::scale{.tens = 6}> MPa{};
-inline constexpr unit_constant<stress, detail::scale{.tens = 9}> GPa{};
-inline constexpr unit_constant<stress, detail::scale{.inches = -2, .pounds = 1}> psi{};
-inline constexpr unit_constant<stress, detail::scale{.tens = 3, .inches = -2, .pounds = 1}> ksi{};
+inline constexpr unit_constant<dimension::stress> Pa{};
+inline constexpr unit_constant<dimension::stress, detail::scale{.tens = 3}> kPa{};
+inline constexpr unit_constant<dimension::stress, detail::scale{.tens = 6}> MPa{};
+inline constexpr unit_constant<dimension::stress, detail::scale{.tens = 9}> GPa{};
+inline constexpr unit_constant<dimension::stress, detail::scale{.inches = -2, .pounds = 1}> psi{};
+inline constexpr unit_constant<dimension::stress, detail::scale{.tens = 3, .inches = -2, .pounds = 1}> ksi{};
 
-inline constexpr unit_constant<plane_angle> rad{};
-inline constexpr unit_constant<plane_angle, detail::scale{.tens = -3}> mrad{};
-inline constexpr unit_constant<plane_angle, detail::scale{.degrees = 1}> deg{};
+inline constexpr unit_constant<dimension::plane_angle> rad{};
+inline constexpr unit_constant<dimension::plane_angle, detail::scale{.tens = -3}> mrad{};
+inline constexpr unit_constant<dimension::plane_angle, detail::scale{.degrees = 1}> deg{};
 
-inline constexpr unit_constant<temperature> K{};
+inline constexpr unit_constant<dimension::temperature> K{};
 
 inline constexpr auto m2 = m * m;
 inline constexpr auto cm2 = cm * cm;

@@ -17,6 +17,6 @@ struct version_number {
     friend constexpr auto operator<=>(const version_number&, const version_number&) = default;
 };
 
-inline constexpr version_number version{SAGITTA_VERSION_MAJOR, SAGITTA_VERSION_MINOR, SAGITTA_VERSION_PATCH};
+inline constexpr version_number library_version{SAGITTA_VERSION_MAJOR, SAGITTA_VERSION_MINOR, SAGITTA_VERSION_PATCH};
 
 }  // namespace sagitta

@@ -12,8 +12,8 @@ namespace sagitta {
 /// A place (from = to) or a whole stretch where a response is zero.
 template <class T>
 struct zero_place {
-    quantity<length, T> from;
-    quantity<length, T> to;
+    quantity<dimension::length, T> from;
+    quantity<dimension::length, T> to;
     /// True where the response has different signs on the two sides; false where it only touches zero, and at
     /// the ends of the beam.
     bool changes_sign;
@@ -49,7 +49,8 @@ public:
     constexpr explicit sign_walk(Places& places) : places_(places) {}
 
     /// The response has this sign (-1, 0, 1) between two places; touches says that it is zero just at from.
-    constexpr void run(const quantity<length, T>& from, const quantity<length, T>& to, int sign, bool touches) {
+    constexpr void run(const quantity<dimension::length, T>& from, const quantity<dimension::length, T>& to, int sign,
+                       bool touches) {
         if (sign == 0) {
             if (open_) {
                 places_.back().to = to;
@@ -64,12 +65,12 @@ public:
         }
     }
     /// The response is zero at the right end of the beam.
-    constexpr void stop_at_zero(const quantity<length, T>& x) {
+    constexpr void stop_at_zero(const quantity<dimension::length, T>& x) {
         if (!open_) add(x, x);
     }
 
 private:
-    constexpr void add(const quantity<length, T>& from, const quantity<length, T>& to) {
+    constexpr void add(const quantity<dimension::length, T>& from, const quantity<dimension::length, T>& to) {
         places_.push_back({from, to, false});
         open_ = true;
     }
@@ -81,7 +82,7 @@ private:
 
 template <response R, class Line>
 constexpr auto zeros_of(const Line& line) {
-    using T = typename Line::number;
+    using T = typename in_order<typename Line::number>::number;
     const T tolerance = zero_tolerance<R>(line);
     const auto sign_of = [&](const T& value) { return value > tolerance ? 1 : value < -tolerance ? -1 : 0; };
     // Within a segment at most as many roots as the degree, and the joint before it.
@@ -93,7 +94,7 @@ constexpr auto zeros_of(const Line& line) {
         auto from = start;
         T low(0);
         bool zero_at_low = sign_of(profile(T(0))) == 0;
-        const auto step = [&](const T& high, const quantity<length, T>& to) {
+        const auto step = [&](const T& high, const quantity<dimension::length, T>& to) {
             walk.run(from, to, sign_of(profile((low + high) / T(2))), zero_at_low);
             from = to;
             low = high;

@@ -27,7 +27,7 @@ inline answers answers_of_this_unit() {
             fmt::format("{:.1f mm}", worst.value),
             &units::m,
             &end::left,
-            &sagitta::version,
+            &sagitta::library_version,
             reinterpret_cast<const void*>(&parse<length>)};
 }
 

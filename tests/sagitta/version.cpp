@@ -4,6 +4,6 @@
 
 // The build hands over the version that CMake read from the header.
 TEST_CASE("the version is the one that the package states") {
-    CHECK(sagitta::version.major_part == SAGITTA_VERSION_MAJOR);
-    CHECK(sagitta::version >= sagitta::version_number{0, 1, 0});
+    CHECK(sagitta::library_version.major_part == SAGITTA_VERSION_MAJOR);
+    CHECK(sagitta::library_version >= sagitta::version_number{0, 1, 0});
 }

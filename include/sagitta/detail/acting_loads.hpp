@@ -43,8 +43,8 @@ struct acting_loads {
 
     template <class Loads>
     acting_loads(const Loads& acting, const T& beam_span) {
-        if constexpr (loads::load_expression<Loads>) {
-            std::apply([&](const auto&... single) { (add(single, beam_span), ...); }, loads::cases_of(acting));
+        if constexpr (load_types::load_expression<Loads>) {
+            std::apply([&](const auto&... single) { (add(single, beam_span), ...); }, load_types::cases_of(acting));
         } else {
             loads.reserve(acting.cases().size());
             for (const auto& any : acting.cases()) std::visit([&](const auto& single) { add(single, beam_span); }, any);
@@ -52,8 +52,8 @@ struct acting_loads {
     }
 
 private:
-    template <loads::action Action, class N>
-    void add(const loads::concentrated<Action, N>& load, const T&) {
+    template <load_types::action Action, class N>
+    void add(const load_types::concentrated<Action, N>& load, const T&) {
         const T a = static_cast<T>(load.at().value());
         const T size = static_cast<T>(load.size().value());
         loads.push_back({load.is_couple ? acting_kind::couple : acting_kind::point_force, a, a, size, size});
@@ -67,7 +67,7 @@ private:
     }
 
     template <class N, class Where>
-    void add(const loads::imposed_curvature<N, Where>& load, const T& beam_span) {
+    void add(const load_types::imposed_curvature<N, Where>& load, const T& beam_span) {
         curvatures.push_back({start(load, T(0)), stop(load, beam_span), static_cast<T>(load.size().value())});
     }
 
@@ -88,8 +88,8 @@ private:
         }
     }
 
-    template <class End, loads::motion Motion, class N>
-    void add(const loads::movement<End, Motion, N>& movement, const T&) {
+    template <class End, load_types::motion Motion, class N>
+    void add(const load_types::movement<End, Motion, N>& movement, const T&) {
         constexpr bool is_left = std::is_same_v<End, end::left_end>;
         T& total = movement.is_rotation ? (is_left ? rotation_left : rotation_right)
                                         : (is_left ? settlement_left : settlement_right);

@@ -40,7 +40,6 @@ public:
             }
             for (std::size_t i = k + 1; i <= last; ++i) {
                 const T factor = (*this)(i, k) / (*this)(k, k);
-                if (factor == T(0)) continue;
                 for (std::size_t j = k; j <= stop; ++j) (*this)(i, j) -= factor * (*this)(k, j);
                 right_[i] -= factor * right_[k];
             }

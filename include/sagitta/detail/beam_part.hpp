@@ -16,7 +16,7 @@ namespace sagitta::detail {
 template <class T>
 class beam_part {
 public:
-    using simple = beam<held::pinned, held::pinned, T>;
+    using simple = prismatic_beam<held::pinned, held::pinned, T>;
     using inverse_force = typename boost::units::divide_typeof_helper<dimensionless, force>::type;
 
     beam_part(const quantity<length, T>& from, const quantity<length, T>& to, const quantity<flexural_rigidity, T>& EI,
@@ -31,12 +31,12 @@ public:
 
     // Loads that act on this part, in coordinates of the whole beam; stretches are cut to the part.
 
-    template <loads::action Action, class N>
-    void add(const loads::concentrated<Action, N>& load) {
-        const auto place = loads::position<T>{coherent<length, T>(load.at()) - from_};
-        const auto size = coherent<typename loads::concentrated<Action, N>::unit, T>(load.size());
-        loads_ += loads::concentrated<Action, T>(size, place);
-        if constexpr (Action == loads::action::couple) {
+    template <load_types::action Action, class N>
+    void add(const load_types::concentrated<Action, N>& load) {
+        const auto place = load_types::position<T>{coherent<length, T>(load.at()) - from_};
+        const auto size = coherent<typename load_types::concentrated<Action, N>::unit, T>(load.size());
+        loads_ += load_types::concentrated<Action, T>(size, place);
+        if constexpr (Action == load_types::action::couple) {
             couples_.push_back({place.x, size});
         }
     }
@@ -55,20 +55,20 @@ public:
             if (x == b) return w_to;
             return w_from + (w_to - w_from) * ((x - a) / (b - a));
         };
-        const loads::stretch<T> where{from - from_, to - from_};
+        const load_types::stretch<T> where{from - from_, to - from_};
         if constexpr (Load::is_uniform) {
-            loads_ += loads::uniform<T, loads::stretch<T>>(w_from, where);
+            loads_ += load_types::uniform<T, load_types::stretch<T>>(w_from, where);
         } else {
-            loads_ += loads::linear<T, loads::stretch<T>>(w_at(from), w_at(to), where);
+            loads_ += load_types::linear<T, load_types::stretch<T>>(w_at(from), w_at(to), where);
         }
     }
     template <class N, class Where>
-    void add(const loads::imposed_curvature<N, Where>& load) {
+    void add(const load_types::imposed_curvature<N, Where>& load) {
         const auto from = std::max(coherent<length, T>(load.where().from), from_);
         const auto to = std::min(coherent<length, T>(load.where().to), to_);
         if (!(from < to)) return;
-        loads_ += loads::imposed_curvature<T, loads::stretch<T>>(coherent<curvature, T>(load.size()),
-                                                                 {from - from_, to - from_});
+        loads_ += load_types::imposed_curvature<T, load_types::stretch<T>>(coherent<curvature, T>(load.size()),
+                                                                           {from - from_, to - from_});
     }
 
     /// The part as a simple beam under its loads alone.
@@ -84,11 +84,11 @@ public:
     void place(const quantity<moment, T>& M_left, const quantity<moment, T>& M_right, const quantity<length, T>& v_left,
                const quantity<length, T>& v_right) {
         auto all = loads_;
-        using couple = loads::concentrated<loads::action::couple, T>;
+        using couple = load_types::concentrated<load_types::action::couple, T>;
         all += couple(M_left, {quantity<length, T>{}});
         all += couple(-M_right, {span()});
-        all += loads::movement<end::left_end, loads::motion::settlement, T>(v_left);
-        all += loads::movement<end::right_end, loads::motion::settlement, T>(v_right);
+        all += load_types::movement<end::left_end, load_types::motion::settlement, T>(v_left);
+        all += load_types::movement<end::right_end, load_types::motion::settlement, T>(v_right);
         placed_.emplace_back(beam_, all);
         M_left_ = M_left;
         M_right_ = M_right;

@@ -6,9 +6,9 @@
 namespace sagitta::detail {
 
 /// A point load or a couple. The couple is the derivative of the point load with respect to its place.
-template <loads::action Action, class N, class Left, class Right, class T>
-class load_effect<loads::concentrated<Action, N>, Left, Right, T> {
-    using load = loads::concentrated<Action, N>;
+template <load_types::action Action, class N, class Left, class Right, class T>
+class load_effect<load_types::concentrated<Action, N>, Left, Right, T> {
+    using load = load_types::concentrated<Action, N>;
 
 public:
     static constexpr bool is_imposed = false;

@@ -14,22 +14,22 @@
 #include <algorithm>
 #include <cstddef>
 #include <iterator>
+#include <limits>
 #include <type_traits>
 #include <variant>
 #include <vector>
 
 namespace sagitta {
 
-using spring_stiffness = boost::units::divide_typeof_helper<force, length>::type;
-using rotational_stiffness = boost::units::divide_typeof_helper<moment, plane_angle>::type;
-
 template <class T>
 class continuous_beam;
+
+namespace detail {
 
 /// What holds a beam at one place. Stiffness 0 holds nothing, infinite stiffness holds rigidly.
 template <class T>
 struct node {
-    quantity<length, T> at{};
+    quantity<dimension::length, T> at{};
     T transverse = T(0);      // N/m
     T turning = T(0);         // N*m/rad, at the ends of the beam only
     T settled = T(0);         // m, downward
@@ -37,6 +37,8 @@ struct node {
     bool is_support = false;  // has a reaction to report
     bool is_hinge = false;
 };
+
+}  // namespace detail
 
 /// The elastic line of a continuous beam. Answers as elastic_line does; every question of floor 3 takes it.
 template <class T>
@@ -54,59 +56,61 @@ public:
     }
 
     template <class X>
-    [[nodiscard]] quantity<length, T> deflection(const X& x) const {
+    [[nodiscard]] quantity<dimension::length, T> deflection(const X& x) const {
         return answer<response::deflection>(x, just_right);
     }
     template <class X>
-    [[nodiscard]] quantity<plane_angle, T> slope(const X& x, side which = just_right) const {
+    [[nodiscard]] quantity<dimension::plane_angle, T> slope(const X& x, side which = just_right) const {
         return answer<response::slope>(x, which);
     }
     template <class X>
-    [[nodiscard]] quantity<sagitta::moment, T> moment(const X& x, side which = just_right) const {
+    [[nodiscard]] quantity<dimension::moment, T> moment(const X& x, side which = just_right) const {
         return answer<response::moment>(x, which);
     }
     template <class X>
-    [[nodiscard]] quantity<force, T> shear(const X& x, side which = just_right) const {
+    [[nodiscard]] quantity<dimension::force, T> shear(const X& x, side which = just_right) const {
         return answer<response::shear>(x, which);
     }
     template <class X>
-    [[nodiscard]] quantity<line_load, T> load(const X& x, side which = just_right) const {
+    [[nodiscard]] quantity<dimension::line_load, T> load(const X& x, side which = just_right) const {
         const auto place = on_beam(x);
         return part_at(place, which).load(place, which);
     }
     template <class X>
-    [[nodiscard]] quantity<curvature, T> imposed_curvature(const X& x, side which = just_right) const {
+    [[nodiscard]] quantity<dimension::curvature, T> imposed_curvature(const X& x, side which = just_right) const {
         const auto place = on_beam(x);
         return part_at(place, which).imposed_curvature(place, which);
     }
     /// Flexural rigidity at x.
     template <class X>
-    [[nodiscard]] quantity<flexural_rigidity, T> rigidity(const X& x, side which = just_right) const {
+    [[nodiscard]] quantity<dimension::flexural_rigidity, T> rigidity(const X& x, side which = just_right) const {
         return part_at(on_beam(x), which).EI();
     }
 
     /// The force of the support at x, upward positive; invalid_input where there is none.
     template <class X>
-    [[nodiscard]] quantity<force, T> reaction_at(const X& x) const {
+    [[nodiscard]] quantity<dimension::force, T> reaction_at(const X& x) const {
         const auto place = on_beam(x);
         const auto here = std::lower_bound(nodes_.begin(), nodes_.end(), place,
-                                           [](const node<T>& n, const auto& p) { return n.at < p; });
+                                           [](const detail::node<T>& n, const auto& p) { return n.at < p; });
         if (here->at != place || !here->is_support) [[unlikely]]
             detail::refuse("reaction_at: x", place, "must be a place where the beam is supported");
         return reaction_of(static_cast<std::size_t>(here - nodes_.begin()));
     }
-    [[nodiscard]] quantity<force, T> reaction(end::left_end) const { return reaction_of(0); }
-    [[nodiscard]] quantity<force, T> reaction(end::right_end) const { return reaction_of(nodes_.size() - 1); }
+    [[nodiscard]] quantity<dimension::force, T> reaction(end::left_end) const { return reaction_of(0); }
+    [[nodiscard]] quantity<dimension::force, T> reaction(end::right_end) const {
+        return reaction_of(nodes_.size() - 1);
+    }
     /// The bending moment that an end's support passes on, sagging positive.
-    [[nodiscard]] quantity<sagitta::moment, T> end_moment(end::left_end) const { return M_.front(); }
-    [[nodiscard]] quantity<sagitta::moment, T> end_moment(end::right_end) const { return M_.back(); }
+    [[nodiscard]] quantity<dimension::moment, T> end_moment(end::left_end) const { return M_.front(); }
+    [[nodiscard]] quantity<dimension::moment, T> end_moment(end::right_end) const { return M_.back(); }
 
     [[nodiscard]] const auto& shear_flexibility() const { return beam_.shear_flexibility(); }
 
     [[nodiscard]] const continuous_beam<T>& supported() const { return beam_; }
 
-    [[nodiscard]] std::vector<quantity<length, T>> joints() const {
-        std::vector<quantity<length, T>> places;
+    [[nodiscard]] std::vector<quantity<dimension::length, T>> joints() const {
+        std::vector<quantity<dimension::length, T>> places;
         for (const auto& p : parts_) {
             for (const auto& s : p.joints()) places.push_back(std::min(p.from() + s, p.to()));
         }
@@ -115,7 +119,7 @@ public:
 
 private:
     template <class X>
-    quantity<length, T> on_beam(const X& x) const {
+    quantity<dimension::length, T> on_beam(const X& x) const {
         const auto place = detail::expect_length<T>(x);
         if (!(place.value() >= T(0) && place <= beam_.span())) [[unlikely]]
             detail::refuse("x", place, "must lie on the beam, from 0 m to ", beam_.span());
@@ -123,12 +127,12 @@ private:
     }
 
     /// The part at x, at a node the one right of it.
-    std::size_t index_of(const quantity<length, T>& x) const {
+    std::size_t index_of(const quantity<dimension::length, T>& x) const {
         const auto after = std::upper_bound(parts_.begin(), parts_.end(), x,
                                             [](const auto& place, const part& p) { return place < p.from(); });
         return static_cast<std::size_t>(after - parts_.begin()) - 1;
     }
-    const part& part_at(const quantity<length, T>& x, side which) const {
+    const part& part_at(const quantity<dimension::length, T>& x, side which) const {
         const std::size_t i = index_of(x);
         return which == side::just_left && i > 0 && parts_[i].from() == x ? parts_[i - 1] : parts_[i];
     }
@@ -139,8 +143,8 @@ private:
         return part_at(place, which).template at<R>(place, which);
     }
 
-    quantity<force, T> reaction_of(std::size_t i) const {
-        quantity<force, T> up{};
+    quantity<dimension::force, T> reaction_of(std::size_t i) const {
+        quantity<dimension::force, T> up{};
         if (i < parts_.size()) up += parts_[i].outer_shear_left();
         if (i > 0) up -= parts_[i - 1].outer_shear_right();
         return up;
@@ -157,11 +161,11 @@ private:
     void distribute(const load_list<T>& loads) {
         for (const auto& any : loads.cases()) std::visit([&](const auto& single) { put(single); }, any);
     }
-    template <loads::action Action, class N>
-    void put(const loads::concentrated<Action, N>& load) {
+    template <load_types::action Action, class N>
+    void put(const load_types::concentrated<Action, N>& load) {
         if (!(load.at() <= beam_.span())) [[unlikely]]
             detail::refuse("at", load.at(), "must not lie beyond the span of the beam, ", beam_.span());
-        parts_[index_of(detail::coherent<length, T>(load.at()))].add(load);
+        parts_[index_of(detail::coherent<dimension::length, T>(load.at()))].add(load);
     }
     template <class Load>
     requires requires { typename Load::where_type; }
@@ -170,19 +174,19 @@ private:
             if (!(load.where().to <= beam_.span())) [[unlikely]]
                 detail::refuse("between: to", load.where().to, "must not lie beyond the span of the beam, ",
                                beam_.span());
-            const auto stop = detail::coherent<length, T>(load.where().to);
-            for (std::size_t i = index_of(detail::coherent<length, T>(load.where().from));
+            const auto stop = detail::coherent<dimension::length, T>(load.where().to);
+            for (std::size_t i = index_of(detail::coherent<dimension::length, T>(load.where().from));
                  i < parts_.size() && parts_[i].from() < stop; ++i) {
                 parts_[i].add(load);
             }
         } else {
-            put(load.over(loads::stretch<T>{quantity<length, T>{}, beam_.span()}));
+            put(load.over(load_types::stretch<T>{quantity<dimension::length, T>{}, beam_.span()}));
         }
     }
-    template <class End, loads::motion Motion, class N>
-    void put(const loads::movement<End, Motion, N>& movement) {
+    template <class End, load_types::motion Motion, class N>
+    void put(const load_types::movement<End, Motion, N>& movement) {
         auto& held = std::is_same_v<End, end::left_end> ? nodes_.front() : nodes_.back();
-        if constexpr (Motion == loads::motion::rotation) {
+        if constexpr (Motion == load_types::motion::rotation) {
             if (held.turning == T(0)) [[unlikely]]
                 detail::refuse("support_rotation", movement.size(), "needs a clamped end; this end turns freely");
             held.turned += movement.size().value();
@@ -197,9 +201,9 @@ private:
     void solve();
 
     continuous_beam<T> beam_;
-    std::vector<node<T>> nodes_;
+    std::vector<detail::node<T>> nodes_;
     std::vector<part> parts_;
-    std::vector<quantity<sagitta::moment, T>> M_;
+    std::vector<quantity<dimension::moment, T>> M_;
 };
 
 /// Two unknowns a node, its moment and its deflection, and two equations: the sections left and right of it turn
@@ -210,18 +214,24 @@ void continuous_line<T>::solve() {
     const std::size_t count = nodes_.size();
     const T L0 = beam_.span().value() / T(static_cast<double>(parts_.size()));
     const T EI0 = parts_.front().EI().value();
-    const auto stiff = [](const T& k) { return k > T(1) ? T(1) / (T(1) + T(1) / k) : k / (T(1) + k); };
-    const auto soft = [](const T& k) { return T(1) / (T(1) + k); };
+    // Nothing is computed with an infinite stiffness: inf * 0 would spoil what a number carries besides its value.
+    const auto is_rigid = [](const T& k) { return k > std::numeric_limits<T>::max(); };
+    const auto stiff = [&](const T& k) {
+        if (is_rigid(k)) return T(1);
+        return k > T(1) ? T(1) / (T(1) + T(1) / k) : k / (T(1) + k);
+    };
+    const auto soft = [&](const T& k) { return is_rigid(k) ? T(0) : T(1) / (T(1) + k); };
+    const auto scaled = [&](const T& k, const T& unit) { return is_rigid(k) ? k : k * unit; };
     const auto M = [](std::size_t i) { return 2 * i; };
     const auto v = [](std::size_t i) { return 2 * i + 1; };
     detail::banded_system<T, 3> equations(2 * count);
 
     std::vector<T> turning_weight(count, T(1)), balance_weight(count, T(1));
     for (std::size_t i = 0; i < count; ++i) {
-        const node<T>& here = nodes_[i];
+        const detail::node<T>& here = nodes_[i];
         const bool at_end = i == 0 || i + 1 == count;
-        const T k_turning = here.turning * L0 / EI0;
-        const T k_transverse = here.transverse * L0 * L0 * L0 / EI0;
+        const T k_turning = scaled(here.turning, L0 / EI0);
+        const T k_transverse = scaled(here.transverse, L0 * L0 * L0 / EI0);
         balance_weight[i] = soft(k_transverse);
         equations(v(i), v(i)) = -stiff(k_transverse);
         equations.right_hand_side(v(i)) = -stiff(k_transverse) * here.settled / L0;
@@ -257,7 +267,7 @@ void continuous_line<T>::solve() {
             equations(v(near), M(near)) -= b / L;
             equations.right_hand_side(v(near)) -= b * reaction * L0 * L0 / EI0;
         };
-        join(i, i + 1, 1, loaded.slope(quantity<length, T>{}).value(), loaded.reaction(end::left).value());
+        join(i, i + 1, 1, loaded.slope(quantity<dimension::length, T>{}).value(), loaded.reaction(end::left).value());
         join(i + 1, i, -1, loaded.slope(p.span()).value(), loaded.reaction(end::right).value());
     }
 
@@ -268,11 +278,11 @@ void continuous_line<T>::solve() {
                        free_unknown % 2 == 0 ? "can turn freely: the beam is a mechanism"
                                              : "can move freely: the beam is a mechanism");
     for (std::size_t i = 0; i < count; ++i) {
-        M_.push_back(quantity<sagitta::moment, T>::from_value(unknowns[M(i)] * EI0 / L0));
+        M_.push_back(quantity<dimension::moment, T>::from_value(unknowns[M(i)] * EI0 / L0));
     }
     for (std::size_t i = 0; i < parts_.size(); ++i) {
-        parts_[i].place(M_[i], M_[i + 1], quantity<length, T>::from_value(unknowns[v(i)] * L0),
-                        quantity<length, T>::from_value(unknowns[v(i + 1)] * L0));
+        parts_[i].place(M_[i], M_[i + 1], quantity<dimension::length, T>::from_value(unknowns[v(i)] * L0),
+                        quantity<dimension::length, T>::from_value(unknowns[v(i + 1)] * L0));
     }
 }
 

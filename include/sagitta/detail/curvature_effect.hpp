@@ -8,8 +8,9 @@ namespace sagitta::detail {
 /// An imposed curvature over a stretch. A kink acts like the second derivative of a point load -EI (angle) with
 /// respect to its place, and the mean of a second derivative of a cubic is its value in the middle.
 template <class N, class Where, class Left, class Right, class T>
-class load_effect<loads::imposed_curvature<N, Where>, Left, Right, T> : public stretch_effect<Where, Left, Right, T> {
-    using load = loads::imposed_curvature<N, Where>;
+class load_effect<load_types::imposed_curvature<N, Where>, Left, Right, T>
+    : public stretch_effect<Where, Left, Right, T> {
+    using load = load_types::imposed_curvature<N, Where>;
     using base = stretch_effect<Where, Left, Right, T>;
 
 public:

@@ -19,7 +19,9 @@ constexpr void require_load_factor(const N& factor) {
 
 }  // namespace detail
 
-namespace loads {
+namespace load_types {
+
+using namespace dimension;
 
 /// A place on the beam, measured from its left end.
 template <class T>
@@ -219,5 +221,7 @@ constexpr const std::tuple<L...>& cases_of(const load_sum<L...>& sum) {
     return sum.cases();
 }
 
-}  // namespace loads
+}  // namespace load_types
+namespace loads = load_types;  // PHASE2
+
 }  // namespace sagitta

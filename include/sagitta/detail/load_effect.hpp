@@ -57,7 +57,7 @@ class load_effect;
 template <class Where, class Left, class Right, class T>
 class stretch_effect {
 public:
-    static constexpr bool is_whole = std::is_same_v<Where, loads::whole_beam>;
+    static constexpr bool is_whole = std::is_same_v<Where, load_types::whole_beam>;
 
     [[gnu::always_inline]] constexpr stretch_effect([[maybe_unused]] const Where& where, const unit_beam<T>& b) {
         if constexpr (is_whole) {

@@ -8,16 +8,16 @@ namespace sagitta::detail {
 /// True where the end in question holds the beam against a movement, so that the movement can be imposed.
 template <class Load, class Left, class Right>
 inline constexpr bool can_act_on = true;
-template <class End, loads::motion Motion, class N, class Left, class Right>
-inline constexpr bool can_act_on<loads::movement<End, Motion, N>, Left, Right> = [] {
+template <class End, load_types::motion Motion, class N, class Left, class Right>
+inline constexpr bool can_act_on<load_types::movement<End, Motion, N>, Left, Right> = [] {
     using held = std::conditional_t<std::is_same_v<End, end::left_end>, Left, Right>;
-    return Motion == loads::motion::rotation ? held::against_rotation : held::against_deflection;
+    return Motion == load_types::motion::rotation ? held::against_rotation : held::against_deflection;
 }();
 
 /// An imposed movement of an end. Its deflected shape is an influence shape (reciprocal theorem).
-template <class End, loads::motion Motion, class N, class Left, class Right, class T>
-class load_effect<loads::movement<End, Motion, N>, Left, Right, T> {
-    using load = loads::movement<End, Motion, N>;
+template <class End, load_types::motion Motion, class N, class Left, class Right, class T>
+class load_effect<load_types::movement<End, Motion, N>, Left, Right, T> {
+    using load = load_types::movement<End, Motion, N>;
     static constexpr bool is_left = std::is_same_v<End, end::left_end>;
     using here = std::conditional_t<is_left, Left, Right>;
     using there = std::conditional_t<is_left, Right, Left>;

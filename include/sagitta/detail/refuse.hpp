@@ -46,11 +46,13 @@ inline std::string number_text(double number) {
                         limit_unit);
 }
 
-/// For messages only. A number type without a conversion to double is shown as nan.
+/// For messages only: bounds by their middle; a number type without a conversion to double is shown as nan.
 template <class T>
 constexpr double as_double(const T& x) {
     if constexpr (requires { static_cast<double>(x); }) {
         return static_cast<double>(x);
+    } else if constexpr (!is_ordered<T>) {
+        return (as_double(x.lower()) + as_double(x.upper())) / 2;
     } else {
         return std::numeric_limits<double>::quiet_NaN();
     }

@@ -13,9 +13,26 @@ namespace sagitta {
 template <class T>
 inline constexpr bool is_number = std::is_arithmetic_v<T> || std::numeric_limits<T>::is_specialized;
 
+/// True for numbers of which two can be compared. Bounds between which a number lies (an interval type, known by its
+/// lower() and upper()) cannot: which of two is greater may be open. Specialize it for other types of that sort.
+template <class T>
+inline constexpr bool is_ordered = !requires(const T& x) {
+    x.lower();
+    x.upper();
+};
+
 }  // namespace sagitta
 
 namespace sagitta::detail {
+
+/// The number type T of a question that has to put numbers in order.
+template <class T>
+struct in_order {
+    static_assert(is_ordered<T>,
+                  "sagitta: this question puts numbers in order, which bounds (intervals) do not allow: ask for "
+                  "deflection, slope, moment, shear or reaction of a single-span beam instead");
+    using number = T;
+};
 
 template <class T>
 concept number_type = is_number<T>;
