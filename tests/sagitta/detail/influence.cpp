@@ -57,7 +57,9 @@ void compare_all() {
         compare<Here, There>(solved<Here, There>([&](auto& b) { b.add_couple(1, a); }),
                              [&](auto row) { return detail::derivative_t<decltype(row)>::value(near, far); });
     }
-    for (const auto& [from, to] : stretches) {
+    for (const auto& stretch : stretches) {
+        const double from = stretch.first;
+        const double to = stretch.second;
         CAPTURE(from);
         CAPTURE(to);
         const cpp_rational width(to - from);
