@@ -104,8 +104,8 @@ private:
     }
 
     verdict verdict_on(const beam_outcome& outcome) const {
-        if (outcome.governing && outcome.governing->utilisation > 1) return verdict::exceeds;
         if (!(outcome.cross_check <= plausible_cross_check)) return verdict::doubtful;
+        if (outcome.governing && outcome.governing->utilisation > 1) return verdict::exceeds;
         return is_sure_ && outcome.governing ? verdict::ok : verdict::incomplete;
     }
 

@@ -22,7 +22,7 @@ enum class verdict {
     exceeds,
     refused,     // a row of the beam or of its loads cannot be accepted
     incomplete,  // within its limit, but a combination or a load may be missing
-    doubtful,    // within its limit, but the cross-check fails
+    doubtful,    // the cross-check fails: neither of the others can be said
 };
 
 [[nodiscard]] std::string_view name_of(verdict v);

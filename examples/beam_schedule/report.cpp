@@ -164,8 +164,9 @@ void append_reasons(std::string& out, const tally& count, const load_table& load
             counted(loads.rows_of_any_beam, "row of loads.csv is refused", "rows of loads.csv are refused"));
     }
     if (loads.rows_of_no_beam != 0) {
-        out += fmt::format("No beam carries the load of {} whose mark beams.csv does not have.\n",
-                           counted(loads.rows_of_no_beam, "row of loads.csv", "rows of loads.csv"));
+        out += fmt::format(
+            "{}: beams.csv does not have the mark.\n",
+            counted(loads.rows_of_no_beam, "row of loads.csv is on no beam", "rows of loads.csv are on no beam"));
     }
     if (count.count(verdict::doubtful) != 0) {
         out += "doubtful: closed forms and integration differ by more than rounding (!); do not use these results.\n";

@@ -111,8 +111,8 @@ TEST_CASE("a missing file or column, or no rows: nothing is overwritten") {
                                "loads.csv: line 1: found no column size_to, expected a header with the columns "
                                "mark,case,kind,size,size_to,from,to");
     write(project.path() / "loads.csv", "mark,case,kind,size,size_to,from,to,from\n");
-    check_that_nothing_is_done(project,
-                               "loads.csv: line 1, column 8 (from): found the same column again, expected every column once");
+    check_that_nothing_is_done(
+        project, "loads.csv: line 1, column 8 (from): found the same column again, expected every column once");
     write(project.path() / "loads.csv", "");
     check_that_nothing_is_done(
         project,
