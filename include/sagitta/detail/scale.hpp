@@ -8,11 +8,6 @@
 
 namespace sagitta {
 
-/// True for whatever may stand in front of a unit: the built-in numbers and every type that describes itself through
-/// std::numeric_limits (multiprecision does). Specialize it for a number type of your own that does not.
-template <class T>
-inline constexpr bool is_number = std::is_arithmetic_v<T> || std::numeric_limits<T>::is_specialized;
-
 /// True for numbers of which two can be compared. Bounds between which a number lies (an interval type, known by its
 /// lower() and upper()) cannot: which of two is greater may be open. Specialize it for other types of that sort.
 template <class T>
@@ -20,6 +15,11 @@ inline constexpr bool is_ordered = !requires(const T& x) {
     x.lower();
     x.upper();
 };
+
+/// True for whatever may stand in front of a unit: the built-in numbers, bounds, and every type that describes itself
+/// through std::numeric_limits (multiprecision does). Specialize it for a number type of your own that does not.
+template <class T>
+inline constexpr bool is_number = std::is_arithmetic_v<T> || std::numeric_limits<T>::is_specialized || !is_ordered<T>;
 
 }  // namespace sagitta
 
