@@ -5,6 +5,7 @@
 #include <algorithm>
 #include <cstddef>
 #include <limits>
+#include <type_traits>
 #include <vector>
 
 namespace sagitta::detail {
@@ -40,6 +41,8 @@ public:
             }
             for (std::size_t i = k + 1; i <= last; ++i) {
                 const T factor = (*this)(i, k) / (*this)(k, k);
+                // Other types may carry more than their value past a zero (a derivative).
+                if (std::is_floating_point_v<T> && factor == T(0)) continue;
                 for (std::size_t j = k; j <= stop; ++j) (*this)(i, j) -= factor * (*this)(k, j);
                 right_[i] -= factor * right_[k];
             }
