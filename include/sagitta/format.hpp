@@ -70,7 +70,7 @@ struct fmt::formatter<boost::units::quantity<boost::units::unit<D, System>, T>> 
     template <class Context>
     auto format(const boost::units::quantity<unit_type, T>& q, Context& context) const {
         using sagitta::detail::to_coherent;
-        const T coherent = q.value();
+        const T coherent = q.value() + T(0);  // writes -0 as 0
         auto unit = unit_;
         auto name = unit_name_;
         if (!unit.known) {
