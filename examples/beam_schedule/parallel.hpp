@@ -35,16 +35,16 @@ template <class Part, class Work, class After>
         }
     };
     const std::size_t processors = std::max(1u, std::thread::hardware_concurrency());
-    std::vector<std::thread> helpers;
+    std::vector<std::thread> threads;
     try {
-        while (helpers.size() + 1 < std::min(processors, parts.size())) {
-            helpers.emplace_back([&] { work_on_parts([] {}); });
+        while (threads.size() + 1 < std::min(processors, parts.size())) {
+            threads.emplace_back([&] { work_on_parts([] {}); });
         }
     } catch (const std::system_error&) {
         // No further thread to be had: those that run do the work.
     }
     work_on_parts(after_each);
-    for (auto& helper : helpers) helper.join();
+    for (auto& other : threads) other.join();
     if (failure) std::rethrow_exception(failure);
     return parts;
 }
