@@ -277,13 +277,16 @@ void continuous_line<T>::solve() {
         detail::refuse("continuous_beam: the place", nodes_[free_unknown / 2].at,
                        free_unknown % 2 == 0 ? "can turn freely: the beam is a mechanism"
                                              : "can move freely: the beam is a mechanism");
+    // What is known beforehand is exact: no moment in a hinge, no movement of a rigid support but its settlement.
+    std::vector<quantity<dimension::length, T>> moved;
     for (std::size_t i = 0; i < count; ++i) {
-        M_.push_back(quantity<dimension::moment, T>::from_value(unknowns[M(i)] * EI0 / L0));
+        const T& weight = turning_weight[i];
+        M_.push_back(quantity<dimension::moment, T>::from_value(weight == T(0) ? T(0) : unknowns[M(i)] * EI0 / L0));
+        const T settled = nodes_[i].settled;
+        moved.push_back(
+            quantity<dimension::length, T>::from_value(balance_weight[i] == T(0) ? settled : unknowns[v(i)] * L0));
     }
-    for (std::size_t i = 0; i < parts_.size(); ++i) {
-        parts_[i].place(M_[i], M_[i + 1], quantity<dimension::length, T>::from_value(unknowns[v(i)] * L0),
-                        quantity<dimension::length, T>::from_value(unknowns[v(i + 1)] * L0));
-    }
+    for (std::size_t i = 0; i < parts_.size(); ++i) parts_[i].place(M_[i], M_[i + 1], moved[i], moved[i + 1]);
 }
 
 }  // namespace sagitta
