@@ -35,7 +35,10 @@ public:
     template <response R>
     [[gnu::always_inline]] constexpr response_quantity<R, T> at(const quantity<length, T>& x, const unit_beam<T>& b,
                                                                 side which) const {
-        const bool before = which == side::just_left ? x <= at_ : x < at_;
+        // Just at a couple at the left end, what does not jump is seen from that end: supports stay where they are.
+        constexpr bool jumps = R == response::moment || R == response::shear;
+        const bool at_left_end = load::is_couple && !jumps && !(x > quantity<length, T>{});
+        const bool before = at_left_end || (which == side::just_left ? x <= at_ : x < at_);
         if (before) return left_.template at<R>(x, b.EI());
         return seen_from_right<R>(right_.template at<R>(b.span() - x, b.EI()));
     }
