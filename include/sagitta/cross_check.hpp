@@ -20,7 +20,14 @@ struct cross_check_result {
     T slope{};
     T deflection{};
 
-    [[nodiscard]] constexpr T greatest() const { return std::max({shear, moment, slope, deflection}); }
+    /// The greatest of the four; not-a-number if one of them is.
+    [[nodiscard]] constexpr T greatest() const {
+        T most = shear;
+        for (const T& each : {moment, slope, deflection}) {
+            if (!(each <= most) && most == most) most = each;
+        }
+        return most;
+    }
 };
 
 namespace detail {

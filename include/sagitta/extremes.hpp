@@ -44,21 +44,29 @@ constexpr auto answer_of(const Line& line, const X& x, side which) {
 }
 
 /// Offers to consider(x, value) every place between first and last where a response can be extreme: both sides
-/// of every joint, and every turning point between joints.
+/// of every joint, and every turning point between joints. invalid_input where a value is not finite.
 template <response R, class Line, class Consider>
 constexpr void for_each_candidate(const Line& line, const quantity<dimension::length, typename Line::number>& first,
                                   const quantity<dimension::length, typename Line::number>& last,
                                   const Consider& consider) {
-    using T = typename Line::number;
-    for_each_stretch(line, first, last,
-                     [&](const quantity<dimension::length, T>& from, const quantity<dimension::length, T>& to) {
-                         consider(from, answer_of<R>(line, from, just_right));
-                         for (const auto& turning : turning_points(profile_between<R>(line, from, to))) {
-                             const auto x = from + (to - from) * turning.at;
-                             consider(x, answer_of<R>(line, x, just_right));
-                         }
-                         consider(to, answer_of<R>(line, to, just_left));
-                     });
+    using place = quantity<dimension::length, typename Line::number>;
+    constexpr const char* name = R == response::deflection ? "deflection"
+                                 : R == response::slope    ? "slope"
+                                 : R == response::moment   ? "moment"
+                                                           : "shear";
+    for_each_stretch(line, first, last, [&](const place& from, const place& to) {
+        const auto offer = [&](const place& x, side which) {
+            const auto value = answer_of<R>(line, x, which);
+            require_finite(name, value);
+            consider(x, value);
+        };
+        offer(from, just_right);
+        for (const auto& turning : turning_points(profile_between<R>(line, from, to))) {
+            const auto x = from + (to - from) * turning.at;
+            if (x < to) offer(x, just_right);
+        }
+        offer(to, just_left);
+    });
 }
 
 template <response R, class Line>

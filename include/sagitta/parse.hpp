@@ -9,6 +9,7 @@
 
 #include <fmt/format.h>
 
+#include <array>
 #include <charconv>
 #include <cmath>
 #include <optional>
@@ -47,9 +48,22 @@ inline std::string units_that_would_do(const dimension_powers& powers) {
     return list;
 }
 
+/// A value that someone might write for a dimension.
 inline std::string number_with_unit(const dimension_powers& powers) {
+    struct instance {
+        dimension_powers powers;
+        std::string_view text;
+    };
+    constexpr std::array instances{
+        instance{{0, 1, 0}, "7.2 m"},    instance{{0, 4, 0}, "8356 cm4"},  instance{{1, 0, 0}, "22 kN"},
+        instance{{1, 1, 0}, "8 kN*m"},   instance{{1, -1, 0}, "4.5 kN/m"}, instance{{1, -2, 0}, "210 GPa"},
+        instance{{0, 0, 1}, "0.5 mrad"},
+    };
+    for (const auto& each : instances) {
+        if (each.powers == powers) return fmt::format("a number with a unit, such as '{}'", each.text);
+    }
     const std::string_view usual = usual_units(powers);
-    return fmt::format("a number with a unit, such as '7.2 {}'", usual.substr(0, usual.find(' ')));
+    return fmt::format("a number with a unit, such as '1 {}'", usual.substr(0, usual.find(' ')));
 }
 
 /// A number and its unit.
@@ -111,6 +125,10 @@ template <class Dimension>
         }
         const double further = detail::to_coherent(inches.value, inches.unit.size);
         coherent += std::signbit(first.value) ? -further : further;
+    }
+    if (!std::isfinite(coherent)) {
+        failure = {0, detail::quoted(detail::without_blanks(text)), "a number within the range of double"};
+        return std::nullopt;
     }
     return quantity<Dimension>::from_value(coherent);
 }

@@ -5,6 +5,7 @@
 #include <sagitta/piecewise.hpp>
 #include <sagitta/units.hpp>
 
+#include <algorithm>
 #include <cstddef>
 
 namespace sagitta {
@@ -100,7 +101,8 @@ constexpr auto zeros_of(const Line& line) {
             low = high;
             zero_at_low = true;
         };
-        for (const auto& root : all_roots(profile, tolerance)) step(root.at, start + (stop - start) * root.at);
+        for (const auto& root : all_roots(profile, tolerance))
+            step(root.at, std::min(start + (stop - start) * root.at, stop));
         step(T(1), stop);
         at_end = profile(T(1));
     });

@@ -61,6 +61,7 @@ template <class T>
 class balanced_load {
 public:
     balanced_load(const acting_load<T>& load, carried how, const T& L) : load_(load), how_(how), L_(L) {
+        if (load.kind == acting_kind::line) gradient_ = (load.size_to - load.size_from) / (load.to - load.from);
         if (how == carried::by_both) {
             switch (load.kind) {
                 case acting_kind::point_force:
@@ -72,8 +73,8 @@ public:
                     right_ = load.size_from / L;
                     break;
                 case acting_kind::line:
-                    left_ = integral(T(0), width(), L - load.from, T(-1)) / L;
-                    right_ = integral(T(0), width(), load.from, T(1)) / L;
+                    left_ = integral(T(0), width(), L - load.from, T(-1)).moment / L;
+                    right_ = integral(T(0), width(), load.from, T(1)).moment / L;
                     break;
             }
         }
@@ -95,8 +96,8 @@ public:
         }
         if (before) return {left_, left_ * x.x()};
         if (beyond) return {-right_, right_ * x.ahead_of(L_)};
-        return {left_ - integral(T(0), past_start, T(1), T(0)),
-                left_ * x.x() - integral(T(0), past_start, past_start, T(-1))};
+        const auto passed = integral(T(0), past_start, past_start, T(-1));
+        return {left_ - passed.shear, left_ * x.x() - passed.moment};
     }
 
     T intensity(const T& x, side which) const {
@@ -112,7 +113,7 @@ private:
         if (load_.kind == acting_kind::point_force) return {load_.size_from, load_.size_from * past_start};
         if (load_.kind == acting_kind::couple) return {T(0), -load_.size_from};
         const T start = before ? T(0) : past_start;
-        return {integral(start, width(), T(1), T(0)), integral(start, width(), past_start, T(-1))};
+        return integral(start, width(), past_start, T(-1));
     }
 
     /// What lies left of the section hangs on the part right of it.
@@ -120,23 +121,30 @@ private:
         if (load_.kind == acting_kind::point_force) return {-load_.size_from, -load_.size_from * past_start};
         if (load_.kind == acting_kind::couple) return {T(0), load_.size_from};
         const T stop = beyond ? width() : past_start;
-        return {-integral(T(0), stop, T(1), T(0)), -integral(T(0), stop, past_start, T(-1))};
+        const auto sum = integral(T(0), stop, past_start, T(-1));
+        return {-sum.shear, -sum.moment};
     }
 
     T width() const { return load_.to - load_.from; }
 
     /// The integral of the line load times the lever arm c + d u, where u runs from the start of the load: a
     /// narrow load keeps its digits wherever it stands. Two Gauss points are exact up to cubic integrands.
-    T integral(const T& from, const T& to, const T& c, const T& d) const {
-        if (!(from < to)) return T(0);
-        return boost::math::quadrature::gauss<T, 2>::integrate(
-            [&](const T& u) { return load_.intensity(u) * (c + d * u); }, from, to);
+    shear_and_moment<T> integral(const T& from, const T& to, const T& c, const T& d) const {
+        if (!(from < to)) return {};
+        const T half = (to - from) / T(2);
+        const T offset = half * boost::math::quadrature::gauss<T, 2>::abscissa()[0];
+        const T u1 = (from + half) - offset;
+        const T u2 = (from + half) + offset;
+        const T w1 = load_.size_from + gradient_ * u1;
+        const T w2 = load_.size_from + gradient_ * u2;
+        return {(w1 + w2) * half, (w1 * (c + d * u1) + w2 * (c + d * u2)) * half};
     }
 
     acting_load<T> load_;
     carried how_;
     T L_;
     T left_{}, right_{};
+    T gradient_{};
 };
 
 }  // namespace sagitta::detail
