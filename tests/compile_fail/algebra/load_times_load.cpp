@@ -1,4 +1,4 @@
-// expect the compiler's: loads::uniform<
+// expect the compiler's: operand
 #include "twin.hpp"
 
 #ifdef WRONG

@@ -1,4 +1,4 @@
-// expect the compiler's: sagitta::detail::superposition<sagitta::beam<
+// expect the compiler's: ::superposition<
 #include "twin.hpp"
 
 #ifdef WRONG
