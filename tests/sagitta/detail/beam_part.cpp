@@ -1,0 +1,115 @@
+// One part of a longer beam: its share of the loads, and its ends once they are placed.
+#include <sagitta/detail/beam_part.hpp>
+
+#include <support/relative.hpp>
+
+#include <doctest/doctest.h>
+
+#include <cmath>
+
+using namespace sagitta;
+using namespace sagitta::units;
+using sagitta::detail::beam_part;
+using response = sagitta::detail::response;
+
+namespace {
+
+constexpr double EI = 1e7, kGA = 2e6;
+using flexibility = quantity<beam_part<double>::inverse_force>;
+
+/// From 4 m to 10 m of some longer beam.
+beam_part<double> part(const flexibility& shear = {}) { return {4.0 * m, 10.0 * m, EI * N * m2, shear}; }
+
+void place(beam_part<double>& p, double M_left = 0, double M_right = 0, double v_left = 0, double v_right = 0) {
+    p.place(M_left * N * m, M_right * N * m, v_left * m, v_right * m);
+}
+
+double deflection(const beam_part<double>& p, double x) { return p.at<response::deflection>(x * m, just_right) / m; }
+double moment_of(const beam_part<double>& p, double x, side which = just_right) {
+    return p.at<response::moment>(x * m, which) / (N * m);
+}
+double shear_of(const beam_part<double>& p, double x, side which = just_right) {
+    return p.at<response::shear>(x * m, which) / N;
+}
+
+}  // namespace
+
+TEST_CASE("places are those of the whole beam") {
+    auto p = part();
+    p.add(point_load(12.0 * kN, at(6.0 * m)));
+    place(p);
+    // P b/L and P a/L, P a b/L under the force: common practice.
+    CHECK(relative(p.outer_shear_left() / kN, 8) < 1e-14);
+    CHECK(relative(p.outer_shear_right() / kN, -4) < 1e-14);
+    CHECK(relative(moment_of(p, 6), 16e3) < 1e-14);
+    CHECK(relative(shear_of(p, 6, just_left), 8e3) < 1e-14);
+    CHECK(relative(shear_of(p, 6, just_right), -4e3) < 1e-14);
+}
+
+TEST_CASE("line loads are cut to the part") {
+    auto p = part();
+    // 1 kN/m at 2 m to 11 kN/m at 12 m: 3 kN/m and 9 kN/m at the ends of the part.
+    p.add(linear_load(1.0 * kN / m, 11.0 * kN / m, between(2.0 * m, 12.0 * m)));
+    place(p);
+    CHECK(relative(p.load(4.0 * m, just_right) / (kN / m), 3) < 1e-14);
+    CHECK(relative(p.load(10.0 * m, just_left) / (kN / m), 9) < 1e-14);
+    // Reactions (2 w1 + w2) L/6 and (w1 + 2 w2) L/6.
+    CHECK(relative(p.outer_shear_left() / kN, 15) < 1e-14);
+    CHECK(relative(p.outer_shear_right() / kN, -21) < 1e-14);
+    auto beside = part();
+    beside.add(partial_uniform_load(5.0 * kN / m, between(1.0 * m, 4.0 * m)));
+    beside.add(partial_uniform_load(5.0 * kN / m, between(10.0 * m, 12.0 * m)));
+    beside.add(imposed_curvature(0.001 / m, between(1.0 * m, 4.0 * m)));
+    place(beside);
+    CHECK(beside.outer_shear_left() == 0.0 * N);
+    CHECK(deflection(beside, 7) == 0);
+    auto bent = part();
+    bent.add(imposed_curvature(0.002 / m, between(0.0 * m, 14.0 * m)));
+    place(bent);
+    CHECK(relative(deflection(bent, 7), 0.002 * 36 / 8) < 1e-14);
+    CHECK(bent.imposed_curvature(7.0 * m, just_right) == 0.002 / m);
+}
+
+TEST_CASE("end moments and end movements") {
+    auto p = part();
+    place(p, 3e3, -6e3, 0.01, 0.04);
+    CHECK(relative(moment_of(p, 4), 3e3) < 1e-14);
+    CHECK(relative(moment_of(p, 10), -6e3) < 1e-14);
+    CHECK(relative(shear_of(p, 5), -1.5e3) < 1e-14);
+    CHECK(relative(deflection(p, 4), 0.01) < 1e-14);
+    CHECK(relative(deflection(p, 10), 0.04) < 1e-14);
+    // Chord plus M_l L^2/16 and M_r L^2/16 in the middle: common practice.
+    CHECK(relative(deflection(p, 7), 0.025 + (3e3 - 6e3) * 36 / (16 * EI)) < 1e-14);
+    // Slope at the left end: chord + (2 M_l + M_r) L/(6 EI).
+    CHECK(relative(p.at<response::slope>(4.0 * m, just_right) / rad, 0.005 + (6e3 - 6e3) * 6 / (6 * EI)) < 1e-12);
+}
+
+TEST_CASE("shear deformation adds the integral of V/kGA, zero at both ends") {
+    const auto soft = 1.0 / (kGA * N);
+    auto stiff = part();
+    auto p = part(soft);
+    for (auto* each : {&stiff, &p}) {
+        each->add(partial_uniform_load(2.0 * kN / m, between(0.0 * m, 12.0 * m)));
+        place(*each);
+    }
+    // w L^2/(8 kGA) in the middle: Roark's Formulas for Stress and Strain, section 8.10.
+    CHECK(relative(deflection(p, 7) - deflection(stiff, 7), 2e3 * 36 / (8 * kGA)) < 1e-12);
+    CHECK(deflection(p, 4) == 0);
+    CHECK(std::abs(deflection(p, 10)) < 1e-17);
+    // dv/dx is steeper by V/kGA at the end; the section itself turns no more than before.
+    const auto slope = [](const auto& q) { return q.template at<response::slope>(4.0 * m, just_right) / rad; };
+    CHECK(relative(slope(p) - slope(stiff), 6e3 / kGA) < 1e-12);
+    CHECK(p.shear_turn() == 0.0 * rad);
+}
+
+TEST_CASE("couples turn sections also by shear") {
+    auto p = part(1.0 / (kGA * N));
+    p.add(applied_couple(9.0 * kN * m, at(6.0 * m)));
+    place(p);
+    CHECK(relative(p.shear_turn() / rad, 9e3 / 6 / kGA) < 1e-14);
+    // The shear is the same everywhere: between ends that do not move it tilts the sections and deflects nothing.
+    auto stiff = part();
+    stiff.add(applied_couple(9.0 * kN * m, at(6.0 * m)));
+    place(stiff);
+    for (const double x : {4.5, 6.0, 7.0, 9.9}) CHECK(relative(deflection(p, x), deflection(stiff, x)) < 1e-12);
+}
