@@ -5,16 +5,14 @@
 
 #include <sagitta/detail/acting_loads.hpp>
 #include <sagitta/detail/panel.hpp>
-#include <sagitta/detail/refuse.hpp>
+#include <sagitta/detail/refinement.hpp>
 #include <sagitta/detail/statics.hpp>
 #include <sagitta/ends.hpp>
-#include <sagitta/tolerance_not_reached.hpp>
 
 #include <algorithm>
 #include <array>
 #include <cstddef>
 #include <iterator>
-#include <limits>
 #include <type_traits>
 #include <vector>
 
@@ -197,58 +195,25 @@ private:
         }
     }
 
-    /// Halves panels until the curvatures of the loads and of the unit redundants, integrated over a panel and over
-    /// its halves, agree within the tolerance (relative to the whole beam).
+    /// Stiffness that varies: panels narrow enough for the curvatures of the loads and of the unit redundants.
     void refine(const T& tolerance) {
-        const auto fields = [&](const T& from, const T& to) {
-            std::array<panel_moments<T>, 3> sums;
-            sums[0] = bending(from, to);
-            sums[1] = integrate(from, to, [&](const section& x) { return x.ahead_of(L_) / L_ / EI_at(x.x()); });
-            sums[2] = integrate(from, to, [&](const section& x) { return x.x() / L_ / EI_at(x.x()); });
-            return sums;
-        };
-        const auto magnitude = [](const T& x) { return x < T(0) ? -x : x; };
         // The unit redundants matter only where there are any: a beam tapered to a point may have none.
-        constexpr std::size_t field_count = left_redundant || right_redundant || left_guided || right_guided ? 3 : 1;
-        std::array<T, 3> size{};
-        std::vector<panel> pending(panels_.rbegin(), panels_.rend());
-        for (const auto& p : pending) {
-            const auto sums = fields(p.from, p.to);
-            for (std::size_t k = 0; k < field_count; ++k) size[k] += magnitude(sums[k].area);
-        }
+        constexpr std::size_t count = left_redundant || right_redundant || left_guided || right_guided ? 3 : 1;
+        const auto fields = [&](const T& from, const T& to) {
+            std::array<panel_moments<T>, count> moments;
+            moments[0] = bending(from, to);
+            if constexpr (count > 1) {
+                moments[1] = integrate(from, to, [&](const section& x) { return x.ahead_of(L_) / L_ / EI_at(x.x()); });
+                moments[2] = integrate(from, to, [&](const section& x) { return x.x() / L_ / EI_at(x.x()); });
+            }
+            return moments;
+        };
+        const auto refined = refine_panels<T, count>(panel_bounds(), fields, tolerance);
+        error_estimate_ = refined.error_estimate;
         panels_.clear();
-        constexpr std::size_t panel_limit = 20000;
-        while (!pending.empty()) {
-            const panel p = pending.back();
-            pending.pop_back();
-            const T middle = (p.from + p.to) / T(2);
-            const auto whole = fields(p.from, p.to);
-            const auto first = fields(p.from, middle);
-            const auto second = fields(middle, p.to);
-            T error(0);
-            for (std::size_t k = 0; k < field_count; ++k) {
-                if (size[k] == T(0)) continue;
-                const T half = middle - p.from;
-                const T area = whole[k].area - first[k].area - second[k].area;
-                const T lever =
-                    whole[k].about_from - first[k].about_from - second[k].about_from - second[k].area * half;
-                error = std::max(error, (magnitude(area) + magnitude(lever) / (p.to - p.from)) / size[k]);
-            }
-            const T rounding = T(16) * std::numeric_limits<T>::epsilon();
-            const bool fine = error <= std::max(tolerance / T(8), rounding);
-            if (fine || !(p.from < middle && middle < p.to) || panels_.size() + pending.size() > panel_limit) {
-                if (error > rounding) error_estimate_ += error;
-                panels_.push_back(p);
-            } else {
-                pending.push_back({middle, p.to});
-                pending.push_back({p.from, middle});
-            }
+        for (std::size_t i = 1; i < refined.bounds.size(); ++i) {
+            panels_.push_back({refined.bounds[i - 1], refined.bounds[i]});
         }
-        if (error_estimate_ > tolerance && tolerance > T(0)) [[unlikely]]
-            throw tolerance_not_reached("integration of M/EI: asked for a relative error of " +
-                                            number_text(as_double(tolerance)) + ", reached " +
-                                            number_text(as_double(error_estimate_)),
-                                        as_double(error_estimate_));
     }
 
     /// The integral over the beam of a curvature times a moment that varies linearly from end to end: the
