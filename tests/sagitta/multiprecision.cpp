@@ -55,3 +55,22 @@ TEST_CASE("in 50 digits the closed forms agree with the reference solution to 48
     compare(fixed_beam(L, EI), hold::fixed, hold::fixed);
     compare(cantilever(L, EI), hold::fixed, hold::free);
 }
+
+TEST_CASE("the greatest deflection in 50 digits") {
+    // Uniform load on a propped cantilever: x = L (15 - sqrt 33)/16 from the clamped end, a root of the slope
+    // 8 s^2 - 15 s + 6 = 0 (solved for this test).
+    const auto line = propped_cantilever(precise(1) * m, precise(1) * N * m2).under(uniform_load(precise(1) * N / m));
+    const auto greatest = greatest_deflection(line);
+    const precise s = (15 - sqrt(precise(33))) / 16;
+    CHECK(abs(greatest.at.value() - s) < 1e-47);
+    CHECK(abs(greatest.value.value() - s * s * (3 - 2 * s) * (1 - s) / 48) < 1e-48);
+}
+
+TEST_CASE("lists and movements in 50 digits") {
+    load_list<precise> list;
+    list += settlement(end::right, precise(3) * mm);
+    list += point_load(precise(2) * kN, at(precise(1) / precise(3) * m));
+    const auto line = fixed_beam(precise(1) * m, precise(1) * kN * m2).under(list);
+    CHECK(abs(line.deflection(precise(1) * m).value() - precise(3) / 1000) < 1e-50);
+    CHECK(cross_check(line).greatest() < 1e-45);
+}
