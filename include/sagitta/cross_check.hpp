@@ -72,7 +72,7 @@ template <class Left, class Right, class N, class Loads>
     for (const T& place : integrated.panel_bounds()) {
         const auto x = quantity<dimension::length, T>::from_value(place);
         for (const side which : {just_left, just_right}) {
-            const auto balanced = integrated.statics_at({place}, which);
+            const auto balanced = integrated.balance().statics_at({place}, which);
             of_shear.compare(line.shear(x, which).value(), balanced.shear);
             of_moment.compare(line.moment(x, which).value(), balanced.moment);
         }

@@ -56,7 +56,7 @@ public:
     /// Bending moment, sagging positive.
     template <class X>
     [[nodiscard]] quantity<dimension::moment, T> moment(const X& x, side which) const {
-        return quantity<dimension::moment, T>::from_value(integrator_.statics_at({on_beam(x)}, which).moment);
+        return quantity<dimension::moment, T>::from_value(integrator_.balance().statics_at({on_beam(x)}, which).moment);
     }
     template <class X>
     [[nodiscard]] quantity<dimension::moment, T> moment(const X& x) const {
@@ -65,7 +65,7 @@ public:
     /// Shear force V = dM/dx.
     template <class X>
     [[nodiscard]] quantity<dimension::force, T> shear(const X& x, side which) const {
-        return quantity<dimension::force, T>::from_value(integrator_.statics_at({on_beam(x)}, which).shear);
+        return quantity<dimension::force, T>::from_value(integrator_.balance().statics_at({on_beam(x)}, which).shear);
     }
     template <class X>
     [[nodiscard]] quantity<dimension::force, T> shear(const X& x) const {
@@ -74,11 +74,11 @@ public:
 
     template <class X>
     [[nodiscard]] quantity<dimension::line_load, T> load(const X& x, side which = just_right) const {
-        return quantity<dimension::line_load, T>::from_value(integrator_.load_at(on_beam(x), which));
+        return quantity<dimension::line_load, T>::from_value(integrator_.balance().load_at(on_beam(x), which));
     }
     template <class X>
     [[nodiscard]] quantity<dimension::curvature, T> imposed_curvature(const X& x, side which = just_right) const {
-        return quantity<dimension::curvature, T>::from_value(integrator_.imposed_at(on_beam(x), which));
+        return quantity<dimension::curvature, T>::from_value(integrator_.balance().imposed_at(on_beam(x), which));
     }
     template <class X>
     [[nodiscard]] quantity<dimension::flexural_rigidity, T> rigidity(const X& x) const {

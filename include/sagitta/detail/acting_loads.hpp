@@ -5,6 +5,7 @@
 #include <sagitta/load.hpp>
 #include <sagitta/load_list.hpp>
 
+#include <algorithm>
 #include <cstddef>
 #include <type_traits>
 #include <variant>
@@ -49,6 +50,18 @@ struct acting_loads {
             loads.reserve(acting.cases().size());
             for (const auto& any : acting.cases()) std::visit([&](const auto& single) { add(single, beam_span); }, any);
         }
+    }
+
+    /// Where loads, curvatures and the given steps of stiffness begin and end, and the ends of the beam, ascending.
+    [[nodiscard]] std::vector<T> joints(const T& beam_span, const std::vector<T>& steps) const {
+        std::vector<T> places{T(0), beam_span};
+        places.reserve(2 + 2 * (loads.size() + curvatures.size()) + steps.size());
+        for (const auto& load : loads) places.insert(places.end(), {load.from, load.to});
+        for (const auto& imposed : curvatures) places.insert(places.end(), {imposed.from, imposed.to});
+        places.insert(places.end(), steps.begin(), steps.end());
+        std::sort(places.begin(), places.end());
+        places.erase(std::unique(places.begin(), places.end()), places.end());
+        return places;
     }
 
 private:

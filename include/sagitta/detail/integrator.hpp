@@ -4,9 +4,9 @@
 #pragma once
 
 #include <sagitta/detail/acting_loads.hpp>
+#include <sagitta/detail/balanced_beam.hpp>
 #include <sagitta/detail/panel.hpp>
 #include <sagitta/detail/refinement.hpp>
-#include <sagitta/detail/statics.hpp>
 #include <sagitta/ends.hpp>
 
 #include <algorithm>
@@ -38,13 +38,9 @@ public:
 
     integrator(const T& span, const acting_loads<T>& acting, const Rigidity& rigidity, const std::vector<T>& steps = {},
                const T& tolerance = T(0))
-        : L_(span), EI_(rigidity) {
-        balanced_.reserve(acting.loads.size());
-        for (const auto& load : acting.loads) {
-            balanced_.emplace_back(load, carrier_of<Left, Right>(load, L_), L_);
-        }
-        curvatures_ = acting.curvatures;
-        make_panels(acting, steps);
+        : L_(span), EI_(rigidity), balance_(span, acting) {
+        joints_ = acting.joints(span, steps);
+        make_panels(joints_);
         if constexpr (!is_prismatic) refine(tolerance);
         solve_redundants(acting);
         march(acting);
@@ -57,34 +53,11 @@ public:
 
     [[nodiscard]] T rigidity_at(const T& x) const { return EI_at(x); }
 
-    [[nodiscard]] T imposed_at(const T& x, side which) const {
-        T imposed(0);
-        for (const auto& each : curvatures_) {
-            const bool covered =
-                which == side::just_left ? x > each.from && x <= each.to : x >= each.from && x < each.to;
-            if (covered) imposed += each.size;
-        }
-        return imposed;
-    }
-    [[nodiscard]] T load_at(const T& x, side which) const {
-        T w(0);
-        for (const auto& each : balanced_) w += each.intensity(x, which);
-        return w;
-    }
     /// The bounds of loads, imposed curvatures and steps, and the ends, ascending.
     [[nodiscard]] const std::vector<T>& joints() const { return joints_; }
 
-    /// Shear and moment, just left or just right of the section where they jump.
-    [[nodiscard]] shear_and_moment<T> statics_at(const section& x, side which) const {
-        shear_and_moment<T> sum{(redundant_right_ - redundant_left_) / L_,
-                                redundant_left_ * (x.ahead_of(L_) / L_) + redundant_right_ * (x.x() / L_)};
-        for (const auto& load : balanced_) {
-            const auto part = load.at(x, which);
-            sum.shear += part.shear;
-            sum.moment += part.moment;
-        }
-        return sum;
-    }
+    /// The equilibrium side of it: shear, moment, loads.
+    [[nodiscard]] const balanced_beam<Left, Right, T>& balance() const { return balance_; }
 
     [[nodiscard]] slope_and_deflection<T> state_at(const T& x) const {
         const panel& p = panel_of(x);
@@ -160,28 +133,15 @@ private:
     /// The curvature between two places of one panel: M/EI and what is imposed.
     panel_moments<T> bending(const T& from, const T& to) const {
         T imposed(0);
-        for (const auto& each : curvatures_) {
+        for (const auto& each : balance_.curvatures()) {
             if (each.from < to && each.to > from) imposed += each.size;
         }
-        return integrate(from, to,
-                         [&](const section& x) { return statics_at(x, just_right).moment / EI_at(x.x()) + imposed; });
+        return integrate(from, to, [&](const section& x) {
+            return balance_.statics_at(x, just_right).moment / EI_at(x.x()) + imposed;
+        });
     }
 
-    void make_panels(const acting_loads<T>& acting, const std::vector<T>& steps) {
-        std::vector<T>& joints = joints_;
-        joints = {T(0), L_};
-        joints.reserve(2 + 2 * acting.loads.size() + steps.size());
-        for (const auto& load : acting.loads) {
-            joints.push_back(load.from);
-            joints.push_back(load.to);
-        }
-        for (const auto& imposed : curvatures_) {
-            joints.push_back(imposed.from);
-            joints.push_back(imposed.to);
-        }
-        joints.insert(joints.end(), steps.begin(), steps.end());
-        std::sort(joints.begin(), joints.end());
-        joints.erase(std::unique(joints.begin(), joints.end()), joints.end());
+    void make_panels(const std::vector<T>& joints) {
         panels_.reserve(joints.size() * panels_between_joints);
         for (std::size_t i = 1; i < joints.size(); ++i) {
             const T width = (joints[i] - joints[i - 1]) / T(panels_between_joints);
@@ -234,19 +194,19 @@ private:
     void solve_redundants(const acting_loads<T>& acting) {
         for (auto& p : panels_) p.curvature = bending(p.from, p.to);
         if constexpr (left_guided || right_guided) {
+            const auto balance_everywhere = [&](const T& moment) { balance_.set_redundants(moment, moment); };
             if constexpr (Left::against_rotation && Right::against_rotation) {
                 // The angle between the ends is imposed.
                 T flexibility(0);
                 for (const auto& p : panels_) {
                     flexibility += integrate(p.from, p.to, [&](const section& x) { return T(1) / EI_at(x.x()); }).area;
                 }
-                redundant_left_ = (acting.rotation_left - acting.rotation_right - total_angle()) / flexibility;
+                balance_everywhere((acting.rotation_left - acting.rotation_right - total_angle()) / flexibility);
             } else {
                 // The pinned end passes no moment on.
                 const section pinned{left_guided ? L_ : T(0)};
-                redundant_left_ = -statics_at(pinned, left_guided ? just_right : just_left).moment;
+                balance_everywhere(-balance_.statics_at(pinned, left_guided ? just_right : just_left).moment);
             }
-            redundant_right_ = redundant_left_;
             for (auto& p : panels_) p.curvature = bending(p.from, p.to);
         }
         if constexpr (left_redundant || right_redundant) {
@@ -265,12 +225,12 @@ private:
                 const T f_12 = work(unit_left, T(0), T(1));
                 const T f_22 = work(unit_right, T(0), T(1));
                 const T determinant = f_11 * f_22 - f_12 * f_12;
-                redundant_left_ = (gap_left * f_22 - gap_right * f_12) / determinant;
-                redundant_right_ = (gap_right * f_11 - gap_left * f_12) / determinant;
+                balance_.set_redundants((gap_left * f_22 - gap_right * f_12) / determinant,
+                                        (gap_right * f_11 - gap_left * f_12) / determinant);
             } else if constexpr (left_redundant) {
-                redundant_left_ = gap_left / work(unit_left, T(1), T(0));
+                balance_.set_redundants(gap_left / work(unit_left, T(1), T(0)), T(0));
             } else {
-                redundant_right_ = gap_right / work(unit_right, T(0), T(1));
+                balance_.set_redundants(T(0), gap_right / work(unit_right, T(0), T(1)));
             }
             for (auto& p : panels_) p.curvature = bending(p.from, p.to);
         }
@@ -349,12 +309,10 @@ private:
 
     T L_;
     Rigidity EI_;
-    std::vector<balanced_load<T>> balanced_;
-    std::vector<acting_curvature<T>> curvatures_;
+    balanced_beam<Left, Right, T> balance_;
     std::vector<T> joints_;
     std::vector<panel> panels_;
     T error_estimate_{};
-    T redundant_left_{}, redundant_right_{};
     struct {
         T left{}, right{};
     } ends_;  // how far the supports have settled
