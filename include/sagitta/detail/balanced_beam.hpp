@@ -20,7 +20,6 @@ public:
     }
 
     [[nodiscard]] const T& span() const { return L_; }
-    [[nodiscard]] const std::vector<acting_curvature<T>>& curvatures() const { return curvatures_; }
 
     /// Adds a moment that varies linearly from end to end: it keeps the balance.
     void set_redundants(const T& left, const T& right) {
@@ -46,6 +45,14 @@ public:
             const bool covered =
                 which == side::just_left ? x > each.from && x <= each.to : x >= each.from && x < each.to;
             if (covered) imposed += each.size;
+        }
+        return imposed;
+    }
+    /// The curvature imposed on a stretch on which none begins or ends.
+    [[nodiscard]] T imposed_between(const T& from, const T& to) const {
+        T imposed(0);
+        for (const auto& each : curvatures_) {
+            if (each.from < to && each.to > from) imposed += each.size;
         }
         return imposed;
     }

@@ -132,10 +132,7 @@ private:
 
     /// The curvature between two places of one panel: M/EI and what is imposed.
     panel_moments<T> bending(const T& from, const T& to) const {
-        T imposed(0);
-        for (const auto& each : balance_.curvatures()) {
-            if (each.from < to && each.to > from) imposed += each.size;
-        }
+        const T imposed = balance_.imposed_between(from, to);
         return integrate(from, to, [&](const section& x) {
             return balance_.statics_at(x, just_right).moment / EI_at(x.x()) + imposed;
         });
