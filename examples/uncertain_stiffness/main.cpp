@@ -2,6 +2,7 @@
 //
 // Timber joists of an invented gym hall. Their EI is known to 10 % only, so it enters as an interval; every answer is
 // then an interval that is guaranteed to hold the true one, rounding included, and no wider than 1/EI makes it.
+// The guarantee needs a compiler that minds the rounding mode: -frounding-math (GCC), -ffp-model=strict (Clang).
 #include <sagitta/sagitta.hpp>
 
 #include <boost/numeric/interval.hpp>

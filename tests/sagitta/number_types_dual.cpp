@@ -46,9 +46,9 @@ constexpr std::array inputs{22000.0, 3.1, 4500.0, 7.2, 1.75e7, 2.9, 6.3, 0.004};
 /// The beam that make(L, EI) holds, under a point load, uniform and linear loads and a settlement.
 template <class Make>
 void check(const Make& make) {
-    differences::compare(names, inputs, [&](const auto& in) {
-        using T = typename std::decay_t<decltype(in)>::value_type;
-        const auto& [P, a, w, L, EI, x, to, sunk] = in;
+    differences::compare(names, inputs, [&](const auto& given) {
+        using T = typename std::decay_t<decltype(given)>::value_type;
+        const auto& [P, a, w, L, EI, x, to, sunk] = given;
         const auto loads = point_load(P * N, at(a * m)) + uniform_load(w * N / m) +
                            linear_load(w * N / m, T(2) * w * N / m, between(T(1.25) * m, to * m)) +
                            settlement(end::left, sunk * m);

@@ -10,9 +10,9 @@ TEST_CASE("dual numbers through a continuous beam with a step of stiffness, a sp
     constexpr std::array names{"first span", "length", "EI", "EI of the second part", "spring", "settlement",
                                "P",          "a",      "w"};
     constexpr std::array inputs{6.0, 14.5, 2.0e7, 3.1e7, 8.0e6, 0.006, 31000.0, 8.7, 7200.0};
-    differences::compare(names, inputs, [](const auto& in) {
-        using T = typename std::decay_t<decltype(in)>::value_type;
-        const auto& [l1, L, EI, EI2, k, sunk, P, a, w] = in;
+    differences::compare(names, inputs, [](const auto& given) {
+        using T = typename std::decay_t<decltype(given)>::value_type;
+        const auto& [l1, L, EI, EI2, k, sunk, P, a, w] = given;
         auto b = continuous_beam(L * m, EI * N * m2);
         b.clamp(end::left).support_at(l1 * m).spring_at(L * m, k * N / m).rigidity_from(l1 * m, EI2 * N * m2);
         b.settle_at(l1 * m, sunk * m);
@@ -35,9 +35,9 @@ TEST_CASE("dual numbers through a continuous beam with a step of stiffness, a sp
 TEST_CASE("dual numbers through symmetric spans, where coefficients vanish that still have derivatives") {
     constexpr std::array names{"first span", "second span", "w", "EI"};
     constexpr std::array inputs{4.0, 4.0, 1000.0, 1.0e6};
-    differences::compare(names, inputs, [](const auto& in) {
-        using T = typename std::decay_t<decltype(in)>::value_type;
-        const auto& [l1, l2, w, EI] = in;
+    differences::compare(names, inputs, [](const auto& given) {
+        using T = typename std::decay_t<decltype(given)>::value_type;
+        const auto& [l1, l2, w, EI] = given;
         const auto line = continuous_beam((l1 + l2) * m, EI * N * m2)
                               .support_at(T(0) * m)
                               .support_at(l1 * m)
