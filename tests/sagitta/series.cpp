@@ -29,10 +29,10 @@ void same_as_one_by_one(const Line& line) {
     std::vector<quantity<plane_angle>> r(places.size());
     std::vector<quantity<moment>> M(places.size());
     std::vector<quantity<force>> V(places.size());
-    deflections(line, places, v);
-    slopes(line, places, r);
-    moments(line, places, M);
-    shears(line, places, V);
+    fill_deflections(line, places, v);
+    fill_slopes(line, places, r);
+    fill_moments(line, places, M);
+    fill_shears(line, places, V);
     for (std::size_t i = 0; i < places.size(); ++i) {
         CHECK(v[i] == line.deflection(places[i]));
         CHECK(r[i] == line.slope(places[i]));
@@ -55,7 +55,7 @@ TEST_CASE("series when compiling") {
         const auto line = simple_beam(8.0 * m, EI).under(acting);
         std::array<quantity<length>, 3> places{1.0 * m, 4.0 * m, 8.0 * m};
         std::array<quantity<length>, 3> results{};
-        deflections(line, places, results);
+        fill_deflections(line, places, results);
         return results;
     }();
     static_assert(deflected[1] == simple_beam(8.0 * m, EI).under(acting).deflection(4.0 * m));
@@ -64,11 +64,11 @@ TEST_CASE("series when compiling") {
 
 TEST_CASE("no places, and other number types") {
     const auto line = simple_beam(8.0 * m, EI).under(acting);
-    CHECK_NOTHROW(deflections(line, std::span<const quantity<length>>{}, std::span<quantity<length>>{}));
+    CHECK_NOTHROW(fill_deflections(line, std::span<const quantity<length>>{}, std::span<quantity<length>>{}));
     const auto narrow = simple_beam(8.0F * m, 1.0e4F * kN * m2).under(uniform_load(6.0F * kN / m));
     const std::array<quantity<length, float>, 1> places{4.0F * m};
     std::array<quantity<moment, float>, 1> results{};
-    moments(narrow, places, results);
+    fill_moments(narrow, places, results);
     CHECK(results[0] == narrow.moment(4.0F * m));
 }
 
@@ -78,14 +78,14 @@ TEST_CASE("wrong lengths and places are refused") {
     std::vector<quantity<length>> two(2), three(3);
     std::string said;
     try {
-        deflections(line, places, three);
+        fill_deflections(line, places, three);
     } catch (const invalid_input& refused) {
         said = refused.what();
     }
     CHECK(said.find("number of results = 3") != std::string::npos);
     said.clear();
     try {
-        deflections(line, places, two);
+        fill_deflections(line, places, two);
     } catch (const invalid_input& refused) {
         said = refused.what();
     }
