@@ -91,6 +91,29 @@ TEST_CASE("an overhang beyond a hinge turns freely about it") {
                   "place = ", "freely", "mechanism");
 }
 
+TEST_CASE("a mechanism is one however close its nodes stand") {
+    // A hinge in a simple beam, a step of EI 26 nm from it on an 18 mm beam: found by random search.
+    CHECK_REFUSED(continuous_beam(0.018127516174399002 * m, 35969919.757767469 * N * m2)
+                      .support_at(0.0 * m)
+                      .support_at(0.018127516174399002 * m)
+                      .hinge_at(0.010305478786735557 * m)
+                      .rigidity_from(0.010305452900136616 * m, 66274623.407666467 * N * m2)
+                      .rigidity_from(0.0082879466949373568 * m, 29819208.274326842 * N * m2)
+                      .shear_rigidity(342308631109.20599 * N)
+                      .under(load_list{}),
+                  "freely", "mechanism");
+    // Two hinges between the last supports, a step of EI close to one of them.
+    CHECK_REFUSED(continuous_beam(0.070831572929939052 * m, 37.969387997758197 * N * m2)
+                      .support_at(0.02823918212004066 * m)
+                      .support_at(0.049513982892411115 * m)
+                      .support_at(0.070831572929939052 * m)
+                      .hinge_at(0.066251145715375853 * m)
+                      .hinge_at(0.069554704225481143 * m)
+                      .rigidity_from(0.069554686396907137 * m, 38.306440139656253 * N * m2)
+                      .under(load_list{}),
+                  "freely", "mechanism");
+}
+
 TEST_CASE("barely held is held") {
     // From a billionth of the beam's own stiffness on.
     const auto line = bare()
