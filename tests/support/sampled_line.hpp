@@ -39,9 +39,13 @@ struct sampled_segment {
 
 class sampled_line {
 public:
-    sampled_line(reference::hold left, reference::hold right, double L, double EI, const std::vector<load>& loads) {
+    sampled_line(reference::hold left, reference::hold right, double L, double EI, const std::vector<load>& loads)
+        : sampled_line(reference_of<real>(left, right, L, EI, loads), L, EI, loads) {}
+
+    /// From a reference solved in any number type: wider ones where long double itself is in doubt.
+    template <class T>
+    sampled_line(const reference::beam<T>& exact, double L, double EI, const std::vector<load>& loads) {
         using reference::quantity;
-        const auto exact = reference_of<real>(left, right, L, EI, loads);
         auto joints = joints_of(L, loads);
         joints.erase(std::unique(joints.begin(), joints.end()), joints.end());
         for (std::size_t i = 1; i < joints.size(); ++i) {
@@ -49,10 +53,11 @@ public:
             s.from = joints[i - 1];
             s.to = joints[i];
             const real x = s.from;
-            const real v = exact.value(quantity::deflection, x);
-            const real r = exact.value(quantity::slope, x);
-            const real M = exact.value(quantity::moment, x);
-            const real V = exact.value(quantity::shear, x);
+            const auto at_start = [&](quantity what) { return static_cast<real>(exact.value(what, T(s.from))); };
+            const real v = at_start(quantity::deflection);
+            const real r = at_start(quantity::slope);
+            const real M = at_start(quantity::moment);
+            const real V = at_start(quantity::shear);
             real w = 0, growth = 0, kink = 0;
             for (const auto& l : loads) {
                 const bool whole = l.what == kind::uniform || l.what == kind::linear_whole || l.what == kind::curvature;
