@@ -3,6 +3,7 @@
 
 #include <sagitta/detail/expect.hpp>
 #include <sagitta/detail/influence.hpp>
+#include <sagitta/detail/load_case.hpp>
 #include <sagitta/detail/refuse.hpp>
 #include <sagitta/ends.hpp>
 #include <sagitta/units.hpp>
@@ -41,7 +42,9 @@ public:
     /// The elastic line under a load case, a composition of load cases or a load_list (elastic_line.hpp).
     template <class Loads>
     [[nodiscard, gnu::always_inline]] constexpr auto under(const Loads& loads) const {
-        return elastic_line<prismatic_beam, Loads>(*this, loads);
+        constexpr bool right = load_types::is_loads<Loads>;
+        static_assert(right, "sagitta: a load is expected here, such as uniform_load(4.5*kN/m) or a load_list");
+        if constexpr (right) return elastic_line<prismatic_beam, Loads>(*this, loads);
     }
 
     /// The beam that also deforms in shear, with the shear rigidity kGA (a force; shear_flexible.hpp).

@@ -17,6 +17,7 @@
 #include <algorithm>
 #include <iterator>
 #include <limits>
+#include <type_traits>
 #include <utility>
 #include <vector>
 
@@ -127,8 +128,10 @@ public:
     /// freely, or where a load does not lie on it. A settlement or rotation of an end acts where the end is held.
     template <class Loads>
     [[nodiscard]] continuous_line<T> under(const Loads& loads) const {
+        constexpr bool right = load_types::is_loads<Loads>;
+        static_assert(right, "sagitta: a load is expected here, such as uniform_load(4.5*kN/m) or a load_list");
         load_list<T> list;
-        list += loads;
+        if constexpr (right) list += loads;
         return continuous_line<T>(*this, list);
     }
 
@@ -186,8 +189,11 @@ private:
         support.is_support = true;
         return *this;
     }
-    node_type& end_node(end::left_end) { return nodes_.front(); }
-    node_type& end_node(end::right_end) { return nodes_.back(); }
+    template <class End>
+    node_type& end_node(End) {
+        detail::expect_end<End>();
+        return std::is_same_v<End, end::left_end> ? nodes_.front() : nodes_.back();
+    }
 
     /// The node at a place, made if there is none.
     node_type& node_at(const quantity<dimension::length, T>& place) {

@@ -43,7 +43,7 @@ struct discrepancy {
         size = max({size, closed < T(0) ? -closed : closed, integrated < T(0) ? -integrated : integrated});
         const T d = closed - integrated;
         // Written so that a not-a-number is a discrepancy and is kept.
-        if (!((d < T(0) ? -d : d) <= difference)) difference = d < T(0) ? -d : d;
+        if (!((d < T(0) ? -d : d) <= difference) && difference == difference) difference = d < T(0) ? -d : d;
     }
 
     /// Relative to the greatest value, or to what the neighbours imply where rounding is all there is.

@@ -69,7 +69,12 @@ public:
     }
     /// The line load at x, downward positive (force per length).
     template <class X>
-    [[nodiscard]] constexpr quantity<dimension::line_load, number> load(const X& x, side which = just_right) const {
+    [[nodiscard]] constexpr quantity<dimension::line_load, number> load(const X& x) const {
+        const auto place = on_beam(x);
+        return load(place, inner_side(place));
+    }
+    template <class X>
+    [[nodiscard]] constexpr quantity<dimension::line_load, number> load(const X& x, side which) const {
         const auto place = on_beam(x);
         using result = quantity<dimension::line_load, number>;
         return superposed_.template sum<result>([&](const auto& effect) -> result {
@@ -81,6 +86,11 @@ public:
         });
     }
     /// The imposed curvature at x, sagging positive (1 per length).
+    template <class X>
+    [[nodiscard]] constexpr quantity<dimension::curvature, number> imposed_curvature(const X& x) const {
+        const auto place = on_beam(x);
+        return imposed_curvature(place, inner_side(place));
+    }
     template <class X>
     [[nodiscard]] constexpr quantity<dimension::curvature, number> imposed_curvature(const X& x,
                                                                                      side which = just_right) const {

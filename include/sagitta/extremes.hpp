@@ -6,6 +6,8 @@
 #include <sagitta/piecewise.hpp>
 #include <sagitta/units.hpp>
 
+#include <limits>
+
 namespace sagitta {
 
 /// A value and the place where it stands.
@@ -43,7 +45,7 @@ constexpr auto answer_of(const Line& line, const X& x, side which) {
     }
 }
 
-/// Offers to consider(x, value) every place between first and last where a response can be extreme: both sides
+/// Offers to consider(x, value, turns) every place between first and last where a response can be extreme: both sides
 /// of every joint, and every turning point between joints. invalid_input where a value is not finite.
 template <response R, class Line, class Consider>
 constexpr void for_each_candidate(const Line& line, const quantity<dimension::length, typename Line::number>& first,
@@ -55,40 +57,67 @@ constexpr void for_each_candidate(const Line& line, const quantity<dimension::le
                                  : R == response::moment   ? "moment"
                                                            : "shear";
     for_each_stretch(line, first, last, [&](const place& from, const place& to) {
-        const auto offer = [&](const place& x, side which) {
+        const auto offer = [&](const place& x, side which, bool turns = false) {
             const auto value = answer_of<R>(line, x, which);
             require_finite(name, value);
-            consider(x, value);
+            consider(x, value, turns);
         };
         offer(from, just_right);
         for (const auto& turning : turning_points(profile_between<R>(line, from, to))) {
             const auto x = from + (to - from) * turning.at;
-            if (x < to) offer(x, just_right);
+            if (x < to) offer(x, just_right, true);
         }
         offer(to, just_left);
     });
 }
 
+/// The greatest of the values offered. Where a joint and a turning point beside it differ by rounding only, the
+/// turning point is the place; of equal values the first.
+template <class Dimension, class T>
+class greatest_of {
+public:
+    constexpr void offer(const quantity<dimension::length, T>& x, const quantity<Dimension, T>& value, const T& size,
+                         bool turns) {
+        const T magnitude = size_ < T(0) ? -size_ : size_;
+        const T rounding = magnitude * (T(8) * std::numeric_limits<T>::epsilon());
+        const T lead = turns == turns_ ? T(0) : turns ? -rounding : rounding;
+        if (!empty_ && !(size > size_ + lead)) return;
+        found_ = {x, value};
+        size_ = size;
+        turns_ = turns;
+        empty_ = false;
+    }
+    [[nodiscard]] constexpr const extreme<Dimension, T>& found() const { return found_; }
+
+private:
+    extreme<Dimension, T> found_{};
+    T size_{};
+    bool turns_ = false;
+    bool empty_ = true;
+};
+
 template <response R, class Line>
 constexpr auto extremes_between(const Line& line, const quantity<dimension::length, typename Line::number>& first,
                                 const quantity<dimension::length, typename Line::number>& last) {
     using T = typename in_order<typename Line::number>::number;
-    const auto start = answer_of<R>(line, first, just_right);
-    extreme_pair<unit_of_response<R>, T> found{{first, start}, {first, start}};
-    for_each_candidate<R>(line, first, last, [&](const quantity<dimension::length, T>& x, const auto& value) {
-        if (value > found.greatest.value) found.greatest = {x, value};
-        if (value < found.least.value) found.least = {x, value};
-    });
-    return found;
+    greatest_of<unit_of_response<R>, T> greatest, least;
+    for_each_candidate<R>(line, first, last,
+                          [&](const quantity<dimension::length, T>& x, const auto& value, bool turns) {
+                              greatest.offer(x, value, value.value(), turns);
+                              least.offer(x, value, -value.value(), turns);
+                          });
+    return extreme_pair<unit_of_response<R>, T>{greatest.found(), least.found()};
 }
 
 /// Extremes over the whole beam, or over a stretch of it.
 template <response R, class Line>
 constexpr auto extremes_of(const Line& line) {
+    static_assert(is_line<Line>, "sagitta: an elastic line is expected here: beam.under(loads)");
     return extremes_between<R>(line, {}, line.supported().span());
 }
 template <response R, class Line, class Stretch>
 constexpr auto extremes_of(const Line& line, const Stretch& where) {
+    static_assert(is_line<Line>, "sagitta: an elastic line is expected here: beam.under(loads)");
     using T = typename Line::number;
     const auto stretch = expect_stretch<T>(where);
     if (!(stretch.to <= line.supported().span())) [[unlikely]]
@@ -127,14 +156,15 @@ template <class Line, class... Stretch>
 /// The deflection that is greatest in magnitude, with its sign, and where it is; of equal ones the leftmost.
 template <class Line>
 [[nodiscard]] constexpr auto greatest_deflection(const Line& line) {
+    static_assert(detail::is_line<Line>, "sagitta: an elastic line is expected here: beam.under(loads)");
     using T = typename detail::in_order<typename Line::number>::number;
-    extreme<dimension::length, T> greatest{};
+    detail::greatest_of<dimension::length, T> greatest;
     detail::for_each_candidate<detail::response::deflection>(
         line, {}, line.supported().span(),
-        [&](const quantity<dimension::length, T>& x, const quantity<dimension::length, T>& v) {
-            if (abs(v) > abs(greatest.value)) greatest = {x, v};
+        [&](const quantity<dimension::length, T>& x, const quantity<dimension::length, T>& v, bool turns) {
+            greatest.offer(x, v, abs(v).value(), turns);
         });
-    return greatest;
+    return greatest.found();
 }
 
 }  // namespace sagitta

@@ -23,6 +23,9 @@ namespace sagitta::detail {
 [[noreturn]] inline void unknown_unit_in_format_string() {
     throw fmt::format_error("unknown unit in a format string: write it as in {:.1f mm} or {:.3g kN*m}");
 }
+[[noreturn]] inline void number_format_not_understood_or_no_space_before_the_unit() {
+    throw fmt::format_error("the format of a quantity: number part not understood, or no space before the unit");
+}
 [[noreturn]] inline void no_arguments_inside_the_format_of_a_quantity() {
     throw fmt::format_error("the format of a quantity takes no width or precision from an argument");
 }
@@ -63,7 +66,9 @@ struct fmt::formatter<boost::units::quantity<boost::units::unit<D, System>, T>> 
         auto number_part = spec.substr(0, space);
         if (number_part.empty()) number_part = "g";  // six significant digits
         fmt::format_parse_context number_context(fmt::string_view(number_part.data(), number_part.size()));
-        number_.parse(number_context);
+        if (number_.parse(number_context) != number_context.end()) {
+            sagitta::detail::number_format_not_understood_or_no_space_before_the_unit();
+        }
         return stop;
     }
 

@@ -44,6 +44,54 @@ template <load_expression A, load_expression B>
     return a + (-b);
 }
 
+// Whatever else is added to a load, or multiplied with it, is answered by a sentence.
+
+template <class X>
+concept not_a_load = !is_loads<X>;
+template <class X>
+concept not_a_number = !detail::number_type<X> && !is_loads<X>;
+
+template <load_expression L, not_a_load X>
+constexpr L operator+(const L& load, const X&) {
+    static_assert(is_loads<X>, "sagitta: to a load only another load is added");
+    return load;
+}
+template <not_a_load X, load_expression L>
+constexpr L operator+(const X&, const L& load) {
+    static_assert(is_loads<X>, "sagitta: to a load only another load is added");
+    return load;
+}
+template <load_expression L, not_a_load X>
+constexpr L operator-(const L& load, const X&) {
+    static_assert(is_loads<X>, "sagitta: from a load only another load is subtracted");
+    return load;
+}
+template <not_a_load X, load_expression L>
+constexpr L operator-(const X&, const L& load) {
+    static_assert(is_loads<X>, "sagitta: from a load only another load is subtracted");
+    return load;
+}
+template <load_expression L, not_a_number X>
+constexpr L operator*(const L& load, const X&) {
+    static_assert(is_loads<X>, "sagitta: a load is multiplied by a plain number");
+    return load;
+}
+template <not_a_number X, load_expression L>
+constexpr L operator*(const X&, const L& load) {
+    static_assert(is_loads<X>, "sagitta: a load is multiplied by a plain number");
+    return load;
+}
+template <load_expression L, load_expression X>
+constexpr L operator*(const L& load, const X&) {
+    static_assert(!is_loads<X>, "sagitta: a load is multiplied by a plain number");
+    return load;
+}
+template <load_expression L, not_a_number X>
+constexpr L operator/(const L& load, const X&) {
+    static_assert(is_loads<X>, "sagitta: a load is divided by a plain number");
+    return load;
+}
+
 }  // namespace load_types
 
 // Places are bounded by the beam as well, but only beam.under(...) knows its span and refuses what lies beyond.
@@ -64,10 +112,12 @@ template <class From, class To>
     using T = detail::common_number<From, To>;
     const auto start = detail::expect_length<T>(from);
     const auto stop = detail::expect_length<T>(to);
-    if (!(start.value() >= T(0))) [[unlikely]]
-        detail::refuse("between: from", start, "must be a distance from the left end, not less than 0 m");
-    if (!(start.value() < stop.value())) [[unlikely]]
-        detail::refuse("between: to", stop, "must be a distance from the left end, greater than from = ", start);
+    if constexpr (detail::has_dimension<From, dimension::length> && detail::has_dimension<To, dimension::length>) {
+        if (!(start.value() >= T(0))) [[unlikely]]
+            detail::refuse("between: from", start, "must be a distance from the left end, not less than 0 m");
+        if (!(start.value() < stop.value())) [[unlikely]]
+            detail::refuse("between: to", stop, "must be a distance from the left end, greater than from = ", start);
+    }
     return load_types::stretch<T>{start, stop};
 }
 
@@ -161,6 +211,7 @@ template <class W1, class W2>
 /// An end that moves down by a given length (downward positive): settlement(end::right, 5.0*mm).
 template <class End, class D>
 [[nodiscard]] constexpr auto settlement(End, const D& size) {
+    detail::expect_end<End>();
     using T = detail::common_number<D>;
     return load_types::movement<End, load_types::motion::settlement, T>(detail::expect_length<T>(size));
 }
@@ -168,6 +219,7 @@ template <class End, class D>
 /// A clamped end that is turned by a given angle (clockwise positive): support_rotation(end::left, 0.5*mrad).
 template <class End, class R>
 [[nodiscard]] constexpr auto support_rotation(End, const R& size) {
+    detail::expect_end<End>();
     using T = detail::common_number<R>;
     return load_types::movement<End, load_types::motion::rotation, T>(detail::expect_angle<T>(size));
 }

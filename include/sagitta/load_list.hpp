@@ -74,4 +74,7 @@ private:
 template <load_types::load_expression L>
 load_list(const L&) -> load_list<typename L::number>;
 
+template <class T>
+inline constexpr bool load_types::is_loads<load_list<T>> = true;
+
 }  // namespace sagitta

@@ -73,11 +73,19 @@ public:
     }
 
     template <class X>
-    [[nodiscard]] quantity<dimension::line_load, T> load(const X& x, side which = just_right) const {
+    [[nodiscard]] quantity<dimension::line_load, T> load(const X& x) const {
+        return load(x, inner_side(on_beam(x)));
+    }
+    template <class X>
+    [[nodiscard]] quantity<dimension::curvature, T> imposed_curvature(const X& x) const {
+        return imposed_curvature(x, inner_side(on_beam(x)));
+    }
+    template <class X>
+    [[nodiscard]] quantity<dimension::line_load, T> load(const X& x, side which) const {
         return quantity<dimension::line_load, T>::from_value(integrator_.balance().load_at(on_beam(x), which));
     }
     template <class X>
-    [[nodiscard]] quantity<dimension::curvature, T> imposed_curvature(const X& x, side which = just_right) const {
+    [[nodiscard]] quantity<dimension::curvature, T> imposed_curvature(const X& x, side which) const {
         return quantity<dimension::curvature, T>::from_value(integrator_.balance().imposed_at(on_beam(x), which));
     }
     template <class X>
@@ -139,6 +147,7 @@ private:
 /// Integrates a prismatic beam under loads.
 template <class Left, class Right, class T, class Loads>
 [[nodiscard]] auto integrate_moment_area(const prismatic_beam<Left, Right, T>& b, const Loads& loads) {
+    static_cast<void>(b.under(loads));  // refuses loads that this beam cannot take
     const detail::acting_loads<T> acting(loads, b.span().value());
     return integrated_line<Left, Right, T, T>(b, acting, b.EI().value());
 }
@@ -168,6 +177,7 @@ template <class Left, class Right, class T, class Loads, class Stiffness>
             detail::refuse("EI", here, "must be greater than 0 N*m^2 and finite, also at x = ", place);
         return here.value();
     };
+    static_cast<void>(b.under(loads));  // refuses loads that this beam cannot take
     const detail::acting_loads<T> acting(loads, b.span().value());
     return integrated_line<Left, Right, T, std::remove_const_t<decltype(rigidity_at)>>(b, acting, rigidity_at, places,
                                                                                        tolerance);

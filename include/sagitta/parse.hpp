@@ -106,6 +106,9 @@ inline std::optional<parse_failure> read_term(std::string_view whole, std::strin
 /// a sign counts for both). Where the text is wrong, returns nothing and says why in failure.
 template <class Dimension>
 [[nodiscard]] std::optional<quantity<Dimension>> try_parse(std::string_view text, parse_failure& failure) {
+    constexpr bool right = requires { typename boost::units::get_dimension<Dimension>::type; }
+    &&!detail::is_quantity<Dimension> && !std::is_arithmetic_v<Dimension>;
+    static_assert(right, "sagitta: a dimension is expected here: parse<dimension::force>(\"22 kN\")");
     constexpr auto powers = detail::powers_of<Dimension>;
     std::string_view rest = detail::without_leading_blanks(text);
     detail::text_term first;

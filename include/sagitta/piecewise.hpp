@@ -123,6 +123,12 @@ private:
 
 namespace detail {
 
+/// Whether the questions can be put to it.
+template <class Line>
+inline constexpr bool is_line = requires(const Line& line) {
+    line.joints();
+};
+
 /// A list with room for so many values a segment: bounded where the line's joints are, else a vector.
 template <class Value, std::size_t a_segment, class Joints>
 struct list_by_segment {

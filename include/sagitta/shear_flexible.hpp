@@ -99,7 +99,15 @@ public:
         return shear(x, inner_side(x));
     }
     template <class X>
-    [[nodiscard]] constexpr quantity<dimension::line_load, number> load(const X& x, side which = just_right) const {
+    [[nodiscard]] constexpr quantity<dimension::line_load, number> load(const X& x) const {
+        return bent_.load(x);
+    }
+    template <class X>
+    [[nodiscard]] constexpr quantity<dimension::curvature, number> imposed_curvature(const X& x) const {
+        return bent_.imposed_curvature(x);
+    }
+    template <class X>
+    [[nodiscard]] constexpr quantity<dimension::line_load, number> load(const X& x, side which) const {
         return bent_.load(x, which);
     }
     template <class X>

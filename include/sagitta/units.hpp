@@ -86,7 +86,7 @@ inline constexpr bool has_dimension<boost::units::quantity<boost::units::unit<D,
 template <class Dimension, class T, class Q>
 constexpr quantity<Dimension, T> coherent([[maybe_unused]] const Q& q) {
     if constexpr (!has_dimension<Q, Dimension>) {
-        return quantity<Dimension, T>{};
+        return quantity<Dimension, T>::from_value(T(1));
     } else if constexpr (std::is_same_v<typename Q::unit_type, Dimension>) {
         return quantity<Dimension, T>::from_value(static_cast<T>(q.value()));
     } else {

@@ -83,6 +83,7 @@ private:
 
 template <response R, class Line>
 constexpr auto zeros_of(const Line& line) {
+    static_assert(is_line<Line>, "sagitta: an elastic line is expected here: beam.under(loads)");
     using T = typename in_order<typename Line::number>::number;
     const T tolerance = zero_tolerance<R>(line);
     const auto sign_of = [&](const T& value) { return value > tolerance ? 1 : value < -tolerance ? -1 : 0; };

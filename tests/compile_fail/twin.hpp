@@ -4,6 +4,7 @@
 
 #include <sagitta/sagitta.hpp>
 
+#include <boost/numeric/interval.hpp>
 #include <boost/units/systems/si/torque.hpp>
 
 #include <string>

@@ -72,12 +72,22 @@ public:
         return answer<response::shear>(x, which);
     }
     template <class X>
-    [[nodiscard]] quantity<dimension::line_load, T> load(const X& x, side which = just_right) const {
+    [[nodiscard]] quantity<dimension::line_load, T> load(const X& x) const {
+        const auto place = on_beam(x);
+        return load(place, place < beam_.span() ? just_right : just_left);
+    }
+    template <class X>
+    [[nodiscard]] quantity<dimension::curvature, T> imposed_curvature(const X& x) const {
+        const auto place = on_beam(x);
+        return imposed_curvature(place, place < beam_.span() ? just_right : just_left);
+    }
+    template <class X>
+    [[nodiscard]] quantity<dimension::line_load, T> load(const X& x, side which) const {
         const auto place = on_beam(x);
         return part_at(place, which).load(place, which);
     }
     template <class X>
-    [[nodiscard]] quantity<dimension::curvature, T> imposed_curvature(const X& x, side which = just_right) const {
+    [[nodiscard]] quantity<dimension::curvature, T> imposed_curvature(const X& x, side which) const {
         const auto place = on_beam(x);
         return part_at(place, which).imposed_curvature(place, which);
     }

@@ -211,6 +211,10 @@ inline constexpr bool is_load_sum<load_sum<L...>> = true;
 template <class L>
 concept load_expression = load_case<L> || is_load_sum<L>;
 
+/// Whether L is anything that a beam can be under: a load expression or a load_list.
+template <class L>
+inline constexpr bool is_loads = load_expression<L>;
+
 /// The cases of a load expression as a tuple.
 template <load_case L>
 constexpr std::tuple<L> cases_of(const L& single) {

@@ -48,7 +48,8 @@ refined_panels<T> refine_panels(const std::vector<T>& bounds, const Fields& fiel
     const T rounding = T(16) * std::numeric_limits<T>::epsilon();
     constexpr std::size_t panel_limit = 20000;
     refined_panels<T> result{{bounds.front()}};
-    std::vector<T> pending(bounds.rbegin(), bounds.rend() - 1);  // bounds still ahead, the nearest last
+    std::vector<T> pending;  // bounds still ahead, the nearest last
+    for (std::size_t i = bounds.size(); i-- > 1;) pending.push_back(bounds[i]);
     while (!pending.empty()) {
         const T from = result.bounds.back();
         const T to = pending.back();

@@ -31,7 +31,8 @@ inline constexpr const char* coherent_symbol<flexural_rigidity> = " N*m^2";
 
 inline std::string number_text(double number) {
     std::array<char, 40> text{};
-    const auto end = std::to_chars(text.data(), text.data() + text.size(), number, std::chars_format::general, 9);
+    // Shortest text that reads back as the same number, so that a value just beyond a bound is seen to be.
+    const auto end = std::to_chars(text.data(), text.data() + text.size(), number);
     return {text.data(), end.ptr};
 }
 

@@ -88,7 +88,7 @@ private:
 
     template <class Sum, class Response, std::size_t... i>
     [[gnu::always_inline]] constexpr Sum sum_over(const Response& response_of, std::index_sequence<i...>) const {
-        return (response_of(std::get<i>(effects_)) + ...);
+        return (... + response_of(std::get<i>(effects_)));
     }
     template <class Sum, class Response, std::size_t... i>
     [[gnu::always_inline]] constexpr auto sums_over(const Response& response_of, std::index_sequence<i...>) const {

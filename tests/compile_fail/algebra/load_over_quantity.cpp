@@ -1,4 +1,4 @@
-// expect the compiler's: operand
+// expect: a load is divided by a plain number
 #include "twin.hpp"
 
 #ifdef WRONG

@@ -1,4 +1,4 @@
-// expect the compiler's: end_node
+// expect: an end is expected here
 #include "twin.hpp"
 
 #ifdef WRONG

@@ -1,4 +1,4 @@
-// expect the compiler's: no member named '
+// expect: an elastic line is expected here
 #include "twin.hpp"
 
 #ifdef WRONG

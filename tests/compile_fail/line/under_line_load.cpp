@@ -1,4 +1,4 @@
-// expect the compiler's: ::superposition<
+// expect: a load is expected here
 #include "twin.hpp"
 
 #ifdef WRONG

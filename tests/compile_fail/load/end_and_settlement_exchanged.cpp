@@ -1,4 +1,4 @@
-// expect: a length is expected here
+// expect: an end is expected here
 #include "twin.hpp"
 
 #ifdef WRONG

@@ -1,4 +1,4 @@
-// expect the compiler's: get_dimension<double>
+// expect: a dimension is expected here
 #include "twin.hpp"
 
 #ifdef WRONG
