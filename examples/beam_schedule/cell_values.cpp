@@ -47,7 +47,7 @@ std::optional<span_length> read_limit(const input_row& row, std::size_t column, 
         return std::nullopt;
     }
     sagitta::parse_failure failure;
-    const auto limit = sagitta::try_parse<sagitta::length>(cell, failure);
+    const auto limit = sagitta::try_parse<sagitta::dimension::length>(cell, failure);
     if (limit && limit->value() > 0 && std::isfinite(limit->value())) return limit;
     found.refuse(row.at(column), limit ? quoted(cell) : what_was_found(cell, failure),
                  "L/250 or the like, or a length greater than 0, such as 20 mm");
@@ -62,7 +62,7 @@ std::optional<double> read_factor(const input_row& row, std::size_t column, find
 
 std::optional<span_length> read_place_on_beam(const input_row& row, std::size_t column,
                                               const std::optional<span_length>& span, findings& found) {
-    const auto place = read_quantity<sagitta::length>(row, column, found);
+    const auto place = read_quantity<sagitta::dimension::length>(row, column, found);
     if (!place) return std::nullopt;
     constexpr double rounding = 1e-12;
     const bool behind_start = place->value() >= 0;

@@ -21,8 +21,8 @@ enum class holding { fixed, pinned, free };
     return end == holding::fixed ? "fixed" : end == holding::pinned ? "pinned" : "free";
 }
 
-using span_length = sagitta::quantity<sagitta::length>;
-using rigidity = sagitta::quantity<sagitta::flexural_rigidity>;
+using span_length = sagitta::quantity<sagitta::dimension::length>;
+using rigidity = sagitta::quantity<sagitta::dimension::flexural_rigidity>;
 
 using simple = decltype(sagitta::simple_beam(span_length(), rigidity()));
 using clamped_left = decltype(sagitta::cantilever(span_length(), rigidity()));
@@ -46,7 +46,7 @@ struct beam_entry {
 
 /// A load and the number of its case.
 struct case_load {
-    sagitta::loads::any_load<double> load;
+    sagitta::load_types::any_load<double> load;
     std::uint32_t load_case;
 };
 

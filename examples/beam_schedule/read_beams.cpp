@@ -30,9 +30,9 @@ beam_entry read_beam(const input_row& row, findings& found) {
         if (entry.mark.empty()) found.refuse(row.at(mark), "nothing", "the mark of a beam");
         const auto at_left = read_holding(row, left, found);
         const auto at_right = read_holding(row, right, found);
-        const auto L = read_positive<sagitta::length>(row, span, found);
-        const auto modulus = read_positive<sagitta::stress>(row, E, found);
-        const auto inertia = read_positive<sagitta::second_moment_of_area>(row, I, found);
+        const auto L = read_positive<sagitta::dimension::length>(row, span, found);
+        const auto modulus = read_positive<sagitta::dimension::stress>(row, E, found);
+        const auto inertia = read_positive<sagitta::dimension::second_moment_of_area>(row, I, found);
         const auto allowed = read_limit(row, limit, L, found);
         entry.left = at_left.value_or(entry.left);
         entry.right = at_right.value_or(entry.right);

@@ -16,7 +16,7 @@ namespace {
 
 enum column : std::size_t { mark, case_name, kind, size, size_to, from, to };
 
-using any_load = sagitta::loads::any_load<double>;
+using any_load = sagitta::load_types::any_load<double>;
 
 /// A row of loads.csv with its links to the other files.
 struct load_row {
@@ -36,15 +36,16 @@ struct load_reader {
     std::optional<any_load> read() const {
         const std::string_view word = row.cell(kind);
         if (word == "point")
-            return concentrated<sagitta::force>([](auto P, auto x) { return sagitta::point_load(P, x); });
+            return concentrated<sagitta::dimension::force>([](auto P, auto x) { return sagitta::point_load(P, x); });
         if (word == "couple")
-            return concentrated<sagitta::moment>([](auto C, auto x) { return sagitta::applied_couple(C, x); });
+            return concentrated<sagitta::dimension::moment>(
+                [](auto C, auto x) { return sagitta::applied_couple(C, x); });
         if (word == "uniform") return uniform();
         if (word == "linear") return linear();
         if (word == "settlement")
-            return movement<sagitta::length>([](auto end, auto v) { return sagitta::settlement(end, v); });
+            return movement<sagitta::dimension::length>([](auto end, auto v) { return sagitta::settlement(end, v); });
         if (word == "rotation") {
-            return movement<sagitta::plane_angle>(
+            return movement<sagitta::dimension::plane_angle>(
                 [](auto end, auto turn) { return sagitta::support_rotation(end, turn); });
         }
         found.refuse(row.at(kind), quoted(word), "point, couple, uniform, linear, settlement or rotation");
@@ -93,7 +94,7 @@ private:
     }
 
     std::optional<any_load> uniform() const {
-        const auto w = read_quantity<sagitta::line_load>(row, size, found);
+        const auto w = read_quantity<sagitta::dimension::line_load>(row, size, found);
         expect_empty(size_to);
         const auto where = loaded_stretch();
         if (!w || !where) return std::nullopt;
@@ -102,8 +103,8 @@ private:
     }
 
     std::optional<any_load> linear() const {
-        const auto w_from = read_quantity<sagitta::line_load>(row, size, found);
-        const auto w_to = read_quantity<sagitta::line_load>(row, size_to, found);
+        const auto w_from = read_quantity<sagitta::dimension::line_load>(row, size, found);
+        const auto w_to = read_quantity<sagitta::dimension::line_load>(row, size_to, found);
         const auto where = loaded_stretch();
         if (!w_from || !w_to || !where) return std::nullopt;
         if (where->is_whole()) return sagitta::linear_load(*w_from, *w_to);
@@ -112,7 +113,7 @@ private:
 
     template <class Dimension, class Make>
     std::optional<any_load> movement(const Make& make) const {
-        constexpr bool turns = std::is_same_v<Dimension, sagitta::plane_angle>;
+        constexpr bool turns = std::is_same_v<Dimension, sagitta::dimension::plane_angle>;
         const auto amount = read_quantity<Dimension>(row, size, found);
         expect_empty(size_to);
         const std::string_view end = row.cell(from);
@@ -174,7 +175,7 @@ beam_loads sorted_by_beam(const std::vector<part>& parts, std::size_t beam_count
     };
     for_each_load([&](const load_row& row) { ++out.first[*row.beam + 1]; });
     for (std::size_t i = 0; i < beam_count; ++i) out.first[i + 1] += out.first[i];
-    out.loads.resize(out.first.back(), {sagitta::uniform_load(sagitta::quantity<sagitta::line_load>()), 0});
+    out.loads.resize(out.first.back(), {sagitta::uniform_load(sagitta::quantity<sagitta::dimension::line_load>()), 0});
     std::vector<std::size_t> next(out.first.begin(), out.first.end() - 1);
     for_each_load([&](const load_row& row) { out.loads[next[*row.beam]++] = {*row.load, *row.load_case}; });
     return out;

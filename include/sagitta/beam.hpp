@@ -96,7 +96,4 @@ template <class Left, class Right, class T>
     return {b.span(), b.EI()};
 }
 
-template <class Left, class Right, class T = double>  // PHASE2
-using beam = prismatic_beam<Left, Right, T>;          // PHASE2
-
 }  // namespace sagitta

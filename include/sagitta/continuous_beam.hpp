@@ -154,18 +154,19 @@ private:
     static T expect_stiffness(const S& k) {
         static_assert(detail::has_dimension<S, dimension::spring_stiffness>,
                       "sagitta: a spring stiffness (force per length) is expected here, such as 8.0*kN/mm");
-        return not_negative(detail::coherent<dimension::spring_stiffness, T>(k).value());
+        return not_negative("spring_at: stiffness", detail::coherent<dimension::spring_stiffness, T>(k));
     }
     template <class S>
     static T expect_turning_stiffness(const S& k) {
         static_assert(detail::has_dimension<S, dimension::rotational_stiffness>,
                       "sagitta: a rotational stiffness (moment per angle) is expected here, such as 500.0*kN*m/rad");
-        return not_negative(detail::coherent<dimension::rotational_stiffness, T>(k).value());
+        return not_negative("turning_spring: stiffness", detail::coherent<dimension::rotational_stiffness, T>(k));
     }
-    static T not_negative(const T& k) {
-        if (!(k >= T(0))) [[unlikely]]
-            detail::refuse("stiffness", k, "must not be less than 0");
-        return k;
+    template <class Q>
+    static T not_negative(const char* argument, const Q& k) {
+        if (!(k.value() >= T(0))) [[unlikely]]
+            detail::refuse(argument, k, "must not be less than 0");
+        return k.value();
     }
 
     template <class X>

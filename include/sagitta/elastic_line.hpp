@@ -92,8 +92,7 @@ public:
         return imposed_curvature(place, inner_side(place));
     }
     template <class X>
-    [[nodiscard]] constexpr quantity<dimension::curvature, number> imposed_curvature(const X& x,
-                                                                                     side which = just_right) const {
+    [[nodiscard]] constexpr quantity<dimension::curvature, number> imposed_curvature(const X& x, side which) const {
         const auto place = on_beam(x);
         using result = quantity<dimension::curvature, number>;
         return superposed_.template sum<result>([&](const auto& effect) -> result {

@@ -37,7 +37,12 @@ constexpr auto answer_of(const Line& line, const X& x, side which) {
     if constexpr (R == response::deflection) {
         return line.deflection(x);
     } else if constexpr (R == response::slope) {
-        return line.slope(x);
+        // It jumps at a hinge, and where a beam that deforms in shear carries a point load.
+        if constexpr (requires { line.slope(x, which); }) {
+            return line.slope(x, which);
+        } else {
+            return line.slope(x);
+        }
     } else if constexpr (R == response::moment) {
         return line.moment(x, which);
     } else {

@@ -111,8 +111,7 @@ public:
         return bent_.load(x, which);
     }
     template <class X>
-    [[nodiscard]] constexpr quantity<dimension::curvature, number> imposed_curvature(const X& x,
-                                                                                     side which = just_right) const {
+    [[nodiscard]] constexpr quantity<dimension::curvature, number> imposed_curvature(const X& x, side which) const {
         return bent_.imposed_curvature(x, which);
     }
 

@@ -47,8 +47,6 @@ using rotational_stiffness = boost::units::divide_typeof_helper<moment, plane_an
 
 }  // namespace dimension
 
-using namespace dimension;  // PHASE2
-
 /// A value of one dimension: quantity<dimension::length>, quantity<dimension::moment, float>.
 template <class Dimension, class T = double>
 using quantity = boost::units::quantity<Dimension, T>;

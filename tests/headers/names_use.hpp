@@ -14,7 +14,7 @@ double use_the_library() {
     const auto propped = propped_cantilever(L * m, EI * N * m2).under(uniform_load(load * kN / m));
     const auto greatest = greatest_deflection(answer);
     const auto integrated = moment_area(answer, a * m, b * m);
-    const auto read = parse<length>("7.2 m");
+    const auto read = parse<dimension::length>("7.2 m");
     fmt::print("{:.1f mm} at {:.2f m}\n", greatest.value, greatest.at);
     return answer.deflection(x * m) / mm + answer.slope(x * m) / mrad + answer.moment(x * m) / (kN * m) +
            answer.shear(x * m) / kN + answer.load(x * m) / (kN / m) + answer.reaction(end::left) / kN +

@@ -28,7 +28,7 @@ inline answers answers_of_this_unit() {
             &units::m,
             &end::left,
             &sagitta::library_version,
-            reinterpret_cast<const void*>(&parse<length>)};
+            reinterpret_cast<const void*>(&parse<dimension::length>)};
 }
 
 answers answers_in_order();

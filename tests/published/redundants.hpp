@@ -79,7 +79,7 @@ struct overhanging {
           outer_reaction(-end_moment(beam.under(acting), left) / l),
           line(beam.under(held(l, acting))) {}
 
-    sagitta::beam<sagitta::held::fixed, sagitta::held::free> beam;
+    sagitta::prismatic_beam<sagitta::held::fixed, sagitta::held::free> beam;
     double outer_reaction;
     sagitta::elastic_line<decltype(beam), loads> line;
 

@@ -173,7 +173,7 @@ TEST_CASE("lists of other number types") {
     load_list<float> list;
     list += point_load(1.0F * kN, at(2.0F * m));
     const auto line = simple_beam(4.0F * m, 1000.0F * kN * m2).under(list);
-    static_assert(std::is_same_v<decltype(line.moment(2.0F * m)), quantity<moment, float>>);
+    static_assert(std::is_same_v<decltype(line.moment(2.0F * m)), quantity<dimension::moment, float>>);
     CHECK(line.moment(2.0F * m).value() == 1000.0F);
     CHECK(simple_beam(4.0 * m, 1000.0 * kN * m2).under(list).moment(2.0 * m) == 1.0 * kN * m);
 }

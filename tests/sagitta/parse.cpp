@@ -31,51 +31,51 @@ parse_failure failure_of(std::string_view text) {
 }  // namespace
 
 TEST_CASE("each dimension") {
-    CHECK(parse<length>("7.2 m") == 7.2 * m);
-    CHECK(parse<length>("250 mm") == 250 * mm);
-    CHECK(parse<length>("24 ft") == 24 * ft);
-    CHECK(parse<length>("6 in") == 6 * in);
-    CHECK(parse<force>("22 kN") == 22 * kN);
-    CHECK(parse<force>("5 kip") == 5 * kip);
-    CHECK(parse<moment>("8 kN*m") == 8 * kN * m);
-    CHECK(relative(parse<moment>("8 kip*ft").value(), 8 * 4448.2216152605 * 0.3048) < 1e-15);
-    CHECK(parse<line_load>("4.5 kN/m") == 4.5 * kN / m);
-    CHECK(relative(parse<line_load>("1.5 kip/ft").value(), 1.5 * 4448.2216152605 / 0.3048) < 1e-15);
-    CHECK(parse<stress>("210 GPa") == 210 * GPa);
-    CHECK(relative(parse<stress>("29000 ksi").value(), 29e6 * 4.4482216152605 / (0.0254 * 0.0254)) < 1e-15);
-    CHECK(relative(parse<stress>("235 N/mm2").value(), 235e6) < 1e-15);
-    CHECK(parse<second_moment_of_area>("8356 cm4") == 8356 * cm4);
-    CHECK(relative(parse<second_moment_of_area>("100 in^4").value(), 100 * std::pow(0.0254, 4)) < 1e-14);
-    CHECK(relative(parse<second_moment_of_area>("1e6 mm4").value(), 1e-6) < 1e-15);
-    CHECK(relative(parse<area>("10 cm2").value(), 1e-3) < 1e-15);
-    CHECK(parse<plane_angle>("0.5 mrad") == 0.5 * mrad);
-    CHECK(parse<plane_angle>("90 deg") == 90 * deg);
-    CHECK(parse<flexural_rigidity>("17548 kN*m2") == 17548 * kN * m2);
+    CHECK(parse<dimension::length>("7.2 m") == 7.2 * m);
+    CHECK(parse<dimension::length>("250 mm") == 250 * mm);
+    CHECK(parse<dimension::length>("24 ft") == 24 * ft);
+    CHECK(parse<dimension::length>("6 in") == 6 * in);
+    CHECK(parse<dimension::force>("22 kN") == 22 * kN);
+    CHECK(parse<dimension::force>("5 kip") == 5 * kip);
+    CHECK(parse<dimension::moment>("8 kN*m") == 8 * kN * m);
+    CHECK(relative(parse<dimension::moment>("8 kip*ft").value(), 8 * 4448.2216152605 * 0.3048) < 1e-15);
+    CHECK(parse<dimension::line_load>("4.5 kN/m") == 4.5 * kN / m);
+    CHECK(relative(parse<dimension::line_load>("1.5 kip/ft").value(), 1.5 * 4448.2216152605 / 0.3048) < 1e-15);
+    CHECK(parse<dimension::stress>("210 GPa") == 210 * GPa);
+    CHECK(relative(parse<dimension::stress>("29000 ksi").value(), 29e6 * 4.4482216152605 / (0.0254 * 0.0254)) < 1e-15);
+    CHECK(relative(parse<dimension::stress>("235 N/mm2").value(), 235e6) < 1e-15);
+    CHECK(parse<dimension::second_moment_of_area>("8356 cm4") == 8356 * cm4);
+    CHECK(relative(parse<dimension::second_moment_of_area>("100 in^4").value(), 100 * std::pow(0.0254, 4)) < 1e-14);
+    CHECK(relative(parse<dimension::second_moment_of_area>("1e6 mm4").value(), 1e-6) < 1e-15);
+    CHECK(relative(parse<dimension::area>("10 cm2").value(), 1e-3) < 1e-15);
+    CHECK(parse<dimension::plane_angle>("0.5 mrad") == 0.5 * mrad);
+    CHECK(parse<dimension::plane_angle>("90 deg") == 90 * deg);
+    CHECK(parse<dimension::flexural_rigidity>("17548 kN*m2") == 17548 * kN * m2);
 }
 
 TEST_CASE("numbers as people write them") {
-    CHECK(parse<length>("7.2m") == 7.2 * m);
-    CHECK(parse<length>("  7.2   m  ") == 7.2 * m);
-    CHECK(parse<length>("\t7.2\tm\t") == 7.2 * m);
-    CHECK(parse<length>("+7.2 m") == 7.2 * m);
-    CHECK(parse<length>("-7.2 m") == -7.2 * m);
-    CHECK(parse<length>(".5 m") == 0.5 * m);
-    CHECK(parse<length>("5. m") == 5.0 * m);
-    CHECK(parse<force>("1.5e3 N") == 1.5 * kN);
-    CHECK(parse<force>("1.5E+3 N") == 1.5 * kN);
-    CHECK(parse<force>("15e2N") == 1.5 * kN);
+    CHECK(parse<dimension::length>("7.2m") == 7.2 * m);
+    CHECK(parse<dimension::length>("  7.2   m  ") == 7.2 * m);
+    CHECK(parse<dimension::length>("\t7.2\tm\t") == 7.2 * m);
+    CHECK(parse<dimension::length>("+7.2 m") == 7.2 * m);
+    CHECK(parse<dimension::length>("-7.2 m") == -7.2 * m);
+    CHECK(parse<dimension::length>(".5 m") == 0.5 * m);
+    CHECK(parse<dimension::length>("5. m") == 5.0 * m);
+    CHECK(parse<dimension::force>("1.5e3 N") == 1.5 * kN);
+    CHECK(parse<dimension::force>("1.5E+3 N") == 1.5 * kN);
+    CHECK(parse<dimension::force>("15e2N") == 1.5 * kN);
 }
 
 TEST_CASE("feet and inches") {
-    CHECK(parse<length>("12 ft 6 in") == 12.5 * ft);
-    CHECK(parse<length>("12ft 6in") == 12.5 * ft);
-    CHECK(parse<length>("0 ft 3 in") == 3 * in);
-    CHECK(parse<length>("12 ft 0 in") == 12 * ft);
-    CHECK(relative(parse<length>("5 ft 11.5 in").value(), 71.5 * 0.0254) < 1e-15);
+    CHECK(parse<dimension::length>("12 ft 6 in") == 12.5 * ft);
+    CHECK(parse<dimension::length>("12ft 6in") == 12.5 * ft);
+    CHECK(parse<dimension::length>("0 ft 3 in") == 3 * in);
+    CHECK(parse<dimension::length>("12 ft 0 in") == 12 * ft);
+    CHECK(relative(parse<dimension::length>("5 ft 11.5 in").value(), 71.5 * 0.0254) < 1e-15);
     // A sign counts for both.
-    CHECK(parse<length>("-12 ft 6 in") == -12.5 * ft);
-    CHECK(parse<length>("-0 ft 6 in") == -6 * in);
-    CHECK(parse<length>("+12 ft 6 in") == 12.5 * ft);
+    CHECK(parse<dimension::length>("-12 ft 6 in") == -12.5 * ft);
+    CHECK(parse<dimension::length>("-0 ft 6 in") == -6 * in);
+    CHECK(parse<dimension::length>("+12 ft 6 in") == 12.5 * ft);
     for (const char* wrong :
          {"12 ft 12 in", "12 ft -6 in", "12 ft 6", "12 ft 6 mm", "12 ft 6 ft", "12 m 6 in", "12 ft 6 in 3 in",
           "12 ft nan in", "12 ft, 6 in", "12 ft in", "6 in 12 ft", "12 ft 6 kN"}) {
@@ -105,7 +105,7 @@ TEST_CASE("what cannot be read is refused, saying what was found and what would 
     CHECK(failure_of<length>("7.2 m extra").found == "'extra'");
     CHECK(failure_of<length>("7.2 m extra").offset == 6);
     CHECK(failure_of<force>("5 m").expected == "one of the units kN, N, MN, lbf, kip");
-    CHECK_THROWS_WITH_AS((void)parse<force>("5 m"),
+    CHECK_THROWS_WITH_AS((void)parse<dimension::force>("5 m"),
                          "'5 m': found the unit 'm', expected one of the units kN, N, MN, lbf, kip", invalid_input);
 }
 
@@ -118,24 +118,24 @@ TEST_CASE("a value survives writing and reading") {
         CAPTURE(number);
         const auto same = [](const auto& back, const auto& q) { return relative(back.value(), q.value()) < 1e-15; };
         const auto a = number * m;
-        CHECK(parse<length>(fmt::format("{:.17g m}", a)) == a);
-        CHECK(same(parse<length>(fmt::format("{:.17g in}", a)), a));
-        CHECK(same(parse<length>(fmt::format("{:.17g}", a)), a));
+        CHECK(parse<dimension::length>(fmt::format("{:.17g m}", a)) == a);
+        CHECK(same(parse<dimension::length>(fmt::format("{:.17g in}", a)), a));
+        CHECK(same(parse<dimension::length>(fmt::format("{:.17g}", a)), a));
         const auto P = number * N;
-        CHECK(parse<force>(fmt::format("{:.17g N}", P)) == P);
-        CHECK(same(parse<force>(fmt::format("{:.17g kip}", P)), P));
-        CHECK(same(parse<force>(fmt::format("{:.17g}", P)), P));
+        CHECK(parse<dimension::force>(fmt::format("{:.17g N}", P)) == P);
+        CHECK(same(parse<dimension::force>(fmt::format("{:.17g kip}", P)), P));
+        CHECK(same(parse<dimension::force>(fmt::format("{:.17g}", P)), P));
         const auto C = number * N * m;
-        CHECK(same(parse<moment>(fmt::format("{:.17g kip*ft}", C)), C));
+        CHECK(same(parse<dimension::moment>(fmt::format("{:.17g kip*ft}", C)), C));
         const auto w = number * N / m;
-        CHECK(same(parse<line_load>(fmt::format("{:.17g kip/ft}", w)), w));
+        CHECK(same(parse<dimension::line_load>(fmt::format("{:.17g kip/ft}", w)), w));
         const auto E = number * Pa;
-        CHECK(same(parse<stress>(fmt::format("{:.17g ksi}", E)), E));
+        CHECK(same(parse<dimension::stress>(fmt::format("{:.17g ksi}", E)), E));
         const auto I = number * m4;
-        CHECK(same(parse<second_moment_of_area>(fmt::format("{:.17g in4}", I)), I));
+        CHECK(same(parse<dimension::second_moment_of_area>(fmt::format("{:.17g in4}", I)), I));
         const auto r = number * rad;
-        CHECK(same(parse<plane_angle>(fmt::format("{:.17g deg}", r)), r));
-        const auto rigidity = quantity<flexural_rigidity>::from_value(number);
-        CHECK(same(parse<flexural_rigidity>(fmt::format("{:.17g kip*in2}", rigidity)), rigidity));
+        CHECK(same(parse<dimension::plane_angle>(fmt::format("{:.17g deg}", r)), r));
+        const auto rigidity = quantity<dimension::flexural_rigidity>::from_value(number);
+        CHECK(same(parse<dimension::flexural_rigidity>(fmt::format("{:.17g kip*in2}", rigidity)), rigidity));
     }
 }

@@ -32,7 +32,7 @@ constexpr bool falls_by_lengths() {
     } else {
         using here = std::tuple_element_t<i, Tuple>;
         using next = std::tuple_element_t<i + 1, Tuple>;
-        using expected = decltype(std::declval<here>() / std::declval<quantity<length>>());
+        using expected = decltype(std::declval<here>() / std::declval<quantity<dimension::length>>());
         return std::is_same_v<typename next::unit_type, typename expected::unit_type> &&
                falls_by_lengths<Tuple, i + 1>();
     }
@@ -94,11 +94,11 @@ TEST_CASE("coefficients carry their dimensions") {
     static_assert(std::tuple_size_v<moments> == 4);
     static_assert(std::tuple_size_v<shear> == 3);
     static_assert(std::tuple_size_v<load> == 2);
-    static_assert(std::is_same_v<std::tuple_element_t<0, deflection>, quantity<length>>);
-    static_assert(std::is_same_v<std::tuple_element_t<0, slope>, quantity<dimensionless>>);
-    static_assert(std::is_same_v<std::tuple_element_t<0, moments>, quantity<moment>>);
-    static_assert(std::is_same_v<std::tuple_element_t<0, shear>, quantity<force>>);
-    static_assert(std::is_same_v<std::tuple_element_t<0, load>, quantity<line_load>>);
+    static_assert(std::is_same_v<std::tuple_element_t<0, deflection>, quantity<dimension::length>>);
+    static_assert(std::is_same_v<std::tuple_element_t<0, slope>, quantity<dimension::dimensionless>>);
+    static_assert(std::is_same_v<std::tuple_element_t<0, moments>, quantity<dimension::moment>>);
+    static_assert(std::is_same_v<std::tuple_element_t<0, shear>, quantity<dimension::force>>);
+    static_assert(std::is_same_v<std::tuple_element_t<0, load>, quantity<dimension::line_load>>);
     static_assert(falls_by_lengths<deflection>());
     static_assert(falls_by_lengths<slope>());
     static_assert(falls_by_lengths<moments>());

@@ -64,7 +64,7 @@ TEST_CASE("the cross check and the moment-area theorems of the spelled example")
 
 TEST_CASE("the result as text") {
     const std::string text = fmt::format("{:.1f mm} at {:.2f m}\n", worst.value, worst.at);
-    CHECK(parse<length>(text.substr(0, text.find(" at"))) == std::round(worst.value / mm * 10) / 10 * mm);
+    CHECK(parse<dimension::length>(text.substr(0, text.find(" at"))) == std::round(worst.value / mm * 10) / 10 * mm);
     CHECK(text.find(" m\n") != std::string::npos);
 }
 

@@ -24,11 +24,11 @@ constexpr auto acting =
 template <class Line>
 void same_as_one_by_one(const Line& line) {
     // In any order, repeated, at joints and ends.
-    const std::vector<quantity<length>> places{5.0 * m, 0.0 * m, 8.0 * m, 2.0 * m, 2.0 * m, 7.9 * m};
-    std::vector<quantity<length>> v(places.size());
-    std::vector<quantity<plane_angle>> r(places.size());
-    std::vector<quantity<moment>> M(places.size());
-    std::vector<quantity<force>> V(places.size());
+    const std::vector<quantity<dimension::length>> places{5.0 * m, 0.0 * m, 8.0 * m, 2.0 * m, 2.0 * m, 7.9 * m};
+    std::vector<quantity<dimension::length>> v(places.size());
+    std::vector<quantity<dimension::plane_angle>> r(places.size());
+    std::vector<quantity<dimension::moment>> M(places.size());
+    std::vector<quantity<dimension::force>> V(places.size());
     fill_deflections(line, places, v);
     fill_slopes(line, places, r);
     fill_moments(line, places, M);
@@ -53,8 +53,8 @@ TEST_CASE("series on every kind of line") {
 TEST_CASE("series when compiling") {
     constexpr auto deflected = [] {
         const auto line = simple_beam(8.0 * m, EI).under(acting);
-        std::array<quantity<length>, 3> places{1.0 * m, 4.0 * m, 8.0 * m};
-        std::array<quantity<length>, 3> results{};
+        std::array<quantity<dimension::length>, 3> places{1.0 * m, 4.0 * m, 8.0 * m};
+        std::array<quantity<dimension::length>, 3> results{};
         fill_deflections(line, places, results);
         return results;
     }();
@@ -64,18 +64,19 @@ TEST_CASE("series when compiling") {
 
 TEST_CASE("no places, and other number types") {
     const auto line = simple_beam(8.0 * m, EI).under(acting);
-    CHECK_NOTHROW(fill_deflections(line, std::span<const quantity<length>>{}, std::span<quantity<length>>{}));
+    CHECK_NOTHROW(fill_deflections(line, std::span<const quantity<dimension::length>>{},
+                                   std::span<quantity<dimension::length>>{}));
     const auto narrow = simple_beam(8.0F * m, 1.0e4F * kN * m2).under(uniform_load(6.0F * kN / m));
-    const std::array<quantity<length, float>, 1> places{4.0F * m};
-    std::array<quantity<moment, float>, 1> results{};
+    const std::array<quantity<dimension::length, float>, 1> places{4.0F * m};
+    std::array<quantity<dimension::moment, float>, 1> results{};
     fill_moments(narrow, places, results);
     CHECK(results[0] == narrow.moment(4.0F * m));
 }
 
 TEST_CASE("wrong lengths and places are refused") {
     const auto line = simple_beam(8.0 * m, EI).under(acting);
-    const std::vector<quantity<length>> places{1.0 * m, 9.0 * m};
-    std::vector<quantity<length>> two(2), three(3);
+    const std::vector<quantity<dimension::length>> places{1.0 * m, 9.0 * m};
+    std::vector<quantity<dimension::length>> two(2), three(3);
     std::string said;
     try {
         fill_deflections(line, places, three);

@@ -129,12 +129,12 @@ TEST_CASE("products and quotients of units") {
     check(kip * in, 1000 * pound_force * inch);
     check(kip * in2, 1000 * pound_force * inch * inch);
     check(N / mm, 1000);
-    static_assert(std::is_same_v<decltype(1.0 * kN / m)::unit_type, line_load>);
-    static_assert(std::is_same_v<decltype(1.0 * kip / ft)::unit_type, line_load>);
-    static_assert(std::is_same_v<decltype(1.0 * kN * m)::unit_type, moment>);
-    static_assert(std::is_same_v<decltype(1.0 * kip * ft)::unit_type, moment>);
-    static_assert(std::is_same_v<decltype(1.0 * GPa * cm4)::unit_type, flexural_rigidity>);
-    static_assert(std::is_same_v<decltype(210.0 * GPa * (8356.0 * cm4))::unit_type, flexural_rigidity>);
+    static_assert(std::is_same_v<decltype(1.0 * kN / m)::unit_type, dimension::line_load>);
+    static_assert(std::is_same_v<decltype(1.0 * kip / ft)::unit_type, dimension::line_load>);
+    static_assert(std::is_same_v<decltype(1.0 * kN * m)::unit_type, dimension::moment>);
+    static_assert(std::is_same_v<decltype(1.0 * kip * ft)::unit_type, dimension::moment>);
+    static_assert(std::is_same_v<decltype(1.0 * GPa * cm4)::unit_type, dimension::flexural_rigidity>);
+    static_assert(std::is_same_v<decltype(210.0 * GPa * (8356.0 * cm4))::unit_type, dimension::flexural_rigidity>);
     // Known value of E = 29000 ksi: 199.948 GPa (common practice).
     CHECK(relative(29000.0 * ksi / GPa, 199.948) < 1e-6);
 }
@@ -145,28 +145,28 @@ TEST_CASE("a quantity over a unit of its dimension is a plain number") {
     static_assert(3.0 * kN / N == 3000.0);
     static_assert(8.0 * ft / in == 96.0);
     static_assert(std::is_same_v<decltype(1.0F * m / mm), float>);
-    static_assert(std::is_same_v<decltype(6.0 * kN / m)::unit_type, line_load>);
+    static_assert(std::is_same_v<decltype(6.0 * kN / m)::unit_type, dimension::line_load>);
     static_assert(6.0 * kN / (2.0 * m) == 3.0 * kN / m);
 }
 
 TEST_CASE("integers become doubles, so that nothing is truncated") {
-    static_assert(std::is_same_v<decltype(7 * m), quantity<length>>);
+    static_assert(std::is_same_v<decltype(7 * m), quantity<dimension::length>>);
     static_assert(7 * m / 2 == 3.5 * m);
     static_assert(m.size == detail::scale{});
     static_assert(25 * mm == 2.5 * cm);
     static_assert(3 * (1 * m) == 3.0 * m);
     static_assert((1 * m) * 3 == 3.0 * m);
-    static_assert(std::is_same_v<decltype(std::int8_t(1) * m), quantity<length>>);
-    static_assert(std::is_same_v<decltype(1U * m), quantity<length>>);
+    static_assert(std::is_same_v<decltype(std::int8_t(1) * m), quantity<dimension::length>>);
+    static_assert(std::is_same_v<decltype(1U * m), quantity<dimension::length>>);
     static_assert(7.2 * m / 250 == 28.8 * mm);
 }
 
 TEST_CASE("a number of another floating-point type takes the wider type") {
-    static_assert(std::is_same_v<decltype(2.0F * (1.0 * m)), quantity<length, double>>);
-    static_assert(std::is_same_v<decltype((1.0F * m) * 2.0), quantity<length, double>>);
-    static_assert(std::is_same_v<decltype((1.0F * m) * 2), quantity<length, float>>);
-    static_assert(std::is_same_v<decltype((1.0F * m) / 2), quantity<length, float>>);
-    static_assert(std::is_same_v<decltype((1.0L * m) / 2.0), quantity<length, long double>>);
+    static_assert(std::is_same_v<decltype(2.0F * (1.0 * m)), quantity<dimension::length, double>>);
+    static_assert(std::is_same_v<decltype((1.0F * m) * 2.0), quantity<dimension::length, double>>);
+    static_assert(std::is_same_v<decltype((1.0F * m) * 2), quantity<dimension::length, float>>);
+    static_assert(std::is_same_v<decltype((1.0F * m) / 2), quantity<dimension::length, float>>);
+    static_assert(std::is_same_v<decltype((1.0L * m) / 2.0), quantity<dimension::length, long double>>);
 }
 
 TEST_CASE("the magnitude of a quantity") {
@@ -176,8 +176,8 @@ TEST_CASE("the magnitude of a quantity") {
 }
 
 TEST_CASE("a quantity is as small as its number") {
-    static_assert(sizeof(quantity<length>) == sizeof(double));
-    static_assert(sizeof(quantity<flexural_rigidity, float>) == sizeof(float));
+    static_assert(sizeof(quantity<dimension::length>) == sizeof(double));
+    static_assert(sizeof(quantity<dimension::flexural_rigidity, float>) == sizeof(float));
     static_assert(sizeof(simple_beam(1.0 * m, 1.0 * kN * m2)) == 2 * sizeof(double));
     static_assert(sizeof(point_load(1.0 * kN, at(1.0 * m))) == 2 * sizeof(double));
     static_assert(sizeof(uniform_load(1.0 * kN / m)) <= 2 * sizeof(double));
@@ -220,7 +220,7 @@ TEST_CASE("other number types go through the library") {
         const T a = 3;
         const auto b = simple_beam(L * m, T(1000) * kN * m2);
         const auto line = b.under(point_load(T(6) * kN, at(a * m)));
-        static_assert(std::is_same_v<decltype(line.deflection(a * m)), quantity<length, T>>);
+        static_assert(std::is_same_v<decltype(line.deflection(a * m)), quantity<dimension::length, T>>);
         static_assert(std::is_same_v<typename decltype(b)::number, T>);
         const T exact = T(6) * 9 * 25 / (T(3) * 1000 * 8);
         const T error = line.deflection(a * m).value() / exact - 1;
@@ -234,7 +234,7 @@ TEST_CASE("other number types go through the library") {
     static_assert(std::is_same_v<decltype(simple_beam(1.0F * m, 1.0 * kN * m2))::number, double>);
     static_assert(std::is_same_v<
                   decltype(simple_beam(1.0F * m, 1.0F * kN * m2).under(uniform_load(1.0F * kN / m)).moment(0.5F * m)),
-                  quantity<moment, float>>);
+                  quantity<dimension::moment, float>>);
     constexpr float in_float =
         simple_beam(8.0F * m, 1000.0F * kN * m2).under(uniform_load(1.0F * kN / m)).moment(4.0F * m).value();
     static_assert(in_float == 8000.0F);

@@ -111,7 +111,7 @@ inline sagitta::load_list<> list_of(const std::vector<load>& all) {
 
 template <class T>
 reference::beam<T> reference_of(reference::hold left, reference::hold right, double L, double EI,
-                                const std::vector<load>& all) {
+                                          const std::vector<load>& all) {
     reference::beam<T> b(left, right, L, EI);
     for (const auto& l : all) {
         switch (l.what) {
@@ -173,7 +173,7 @@ void with_each_beam(double span, double rigidity, const F& f) {
     using reference::hold;
     using namespace sagitta;
     const auto L = span * units::m;
-    const auto EI = quantity<flexural_rigidity>::from_value(rigidity);
+    const auto EI = quantity<dimension::flexural_rigidity>::from_value(rigidity);
     f(std::string("simple"), simple_beam(L, EI), hold::pinned, hold::pinned);
     f(std::string("cantilever"), cantilever(L, EI), hold::fixed, hold::free);
     f(std::string("mirrored cantilever"), mirrored(cantilever(L, EI)), hold::free, hold::fixed);

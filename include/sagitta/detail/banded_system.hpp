@@ -25,8 +25,47 @@ public:
     }
     T& right_hand_side(std::size_t equation) { return right_[equation]; }
 
-    /// Solves in place. Returns n, or the first unknown that the equations do not determine.
+    /// Solves, with one step of iterative refinement: what the first solution leaves over is solved for once more.
+    /// Returns n, or the first unknown that the equations do not determine. Uses the equations up.
     std::size_t solve(std::vector<T>& unknowns) {
+        scale_rows();
+        banded_system again = *this;
+        const std::size_t determined = eliminate(unknowns);
+        if (determined < n_) return determined;
+        again.right_ = again.left_over(unknowns);
+        std::vector<T> correction;
+        if (again.eliminate(correction) == n_) {
+            for (std::size_t k = 0; k < n_; ++k) unknowns[k] += correction[k];
+        }
+        return n_;
+    }
+
+private:
+    /// Every equation is divided by its greatest coefficient, so that a pivot far below 1 is rounding.
+    void scale_rows() {
+        for (std::size_t i = 0; i < n_; ++i) {
+            T greatest(0);
+            for (std::size_t j = first_of(i); j <= last_of(i); ++j) {
+                greatest = std::max(greatest, magnitude((*this)(i, j)));
+            }
+            if (!(greatest > T(0))) continue;
+            for (std::size_t j = first_of(i); j <= last_of(i); ++j) (*this)(i, j) /= greatest;
+            right_[i] /= greatest;
+        }
+    }
+
+    std::vector<T> left_over(const std::vector<T>& unknowns) {
+        std::vector<T> rest = right_;
+        for (std::size_t i = 0; i < n_; ++i) {
+            for (std::size_t j = first_of(i); j <= last_of(i); ++j) rest[i] -= (*this)(i, j) * unknowns[j];
+        }
+        return rest;
+    }
+
+    std::size_t first_of(std::size_t equation) const { return equation > reach ? equation - reach : 0; }
+    std::size_t last_of(std::size_t equation) const { return std::min(n_ - 1, equation + reach); }
+
+    std::size_t eliminate(std::vector<T>& unknowns) {
         for (std::size_t k = 0; k < n_; ++k) {
             const std::size_t last = std::min(n_ - 1, k + reach);
             std::size_t pivot = k;
@@ -57,9 +96,8 @@ public:
         return n_;
     }
 
-private:
     static T magnitude(const T& x) { return x < T(0) ? -x : x; }
-    /// The equations are scaled to 1, so that less is rounding: some 1e-13 in double.
+    /// Some 1e-13 in double.
     static T smallest_pivot() { return T(512) * std::numeric_limits<T>::epsilon(); }
 
     std::size_t n_;

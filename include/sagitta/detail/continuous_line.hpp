@@ -5,6 +5,7 @@
 #include <sagitta/detail/banded_system.hpp>
 #include <sagitta/detail/beam_part.hpp>
 #include <sagitta/detail/expect.hpp>
+#include <sagitta/detail/node.hpp>
 #include <sagitta/detail/refuse.hpp>
 #include <sagitta/ends.hpp>
 #include <sagitta/load.hpp>
@@ -23,22 +24,6 @@ namespace sagitta {
 
 template <class T>
 class continuous_beam;
-
-namespace detail {
-
-/// What holds a beam at one place. Stiffness 0 holds nothing, infinite stiffness holds rigidly.
-template <class T>
-struct node {
-    quantity<dimension::length, T> at{};
-    T transverse = T(0);      // N/m
-    T turning = T(0);         // N*m/rad, at the ends of the beam only
-    T settled = T(0);         // m, downward
-    T turned = T(0);          // rad, clockwise
-    bool is_support = false;  // has a reaction to report
-    bool is_hinge = false;
-};
-
-}  // namespace detail
 
 /// The elastic line of a continuous beam. Answers as elastic_line does; every question of floor 3 takes it.
 template <class T>
@@ -59,17 +44,33 @@ public:
     [[nodiscard]] quantity<dimension::length, T> deflection(const X& x) const {
         return answer<response::deflection>(x, just_right);
     }
+    /// Slope. Inside the beam side matters at hinges, and at point loads where the beam deforms in shear.
     template <class X>
     [[nodiscard]] quantity<dimension::plane_angle, T> slope(const X& x, side which = just_right) const {
         return answer<response::slope>(x, which);
     }
     template <class X>
-    [[nodiscard]] quantity<dimension::moment, T> moment(const X& x, side which = just_right) const {
-        return answer<response::moment>(x, which);
+    [[nodiscard]] quantity<dimension::moment, T> moment(const X& x) const {
+        return answer<response::moment>(x, just_right);
+    }
+    /// At an end of the beam the side beyond it answers for the support.
+    template <class X>
+    [[nodiscard]] quantity<dimension::moment, T> moment(const X& x, side which) const {
+        const auto place = on_beam(x);
+        if (is_left_end(place, which)) return end_moment(end::left);
+        if (is_right_end(place, which)) return end_moment(end::right);
+        return answer<response::moment>(place, which);
     }
     template <class X>
-    [[nodiscard]] quantity<dimension::force, T> shear(const X& x, side which = just_right) const {
-        return answer<response::shear>(x, which);
+    [[nodiscard]] quantity<dimension::force, T> shear(const X& x) const {
+        return answer<response::shear>(x, just_right);
+    }
+    template <class X>
+    [[nodiscard]] quantity<dimension::force, T> shear(const X& x, side which) const {
+        const auto place = on_beam(x);
+        if (is_left_end(place, which)) return reaction(end::left);
+        if (is_right_end(place, which)) return -reaction(end::right);
+        return answer<response::shear>(place, which);
     }
     template <class X>
     [[nodiscard]] quantity<dimension::line_load, T> load(const X& x) const {
@@ -134,6 +135,13 @@ private:
         if (!(place.value() >= T(0) && place <= beam_.span())) [[unlikely]]
             detail::refuse("x", place, "must lie on the beam, from 0 m to ", beam_.span());
         return place;
+    }
+
+    bool is_left_end(const quantity<dimension::length, T>& x, side which) const {
+        return which == side::just_left && !(x > quantity<dimension::length, T>{});
+    }
+    bool is_right_end(const quantity<dimension::length, T>& x, side which) const {
+        return which == side::just_right && !(x < beam_.span());
     }
 
     /// The part at x, at a node the one right of it.

@@ -226,6 +226,5 @@ constexpr const std::tuple<L...>& cases_of(const load_sum<L...>& sum) {
 }
 
 }  // namespace load_types
-namespace loads = load_types;  // PHASE2
 
 }  // namespace sagitta

@@ -28,6 +28,8 @@ template <>
 inline constexpr const char* coherent_symbol<curvature> = " 1/m";
 template <>
 inline constexpr const char* coherent_symbol<flexural_rigidity> = " N*m^2";
+template <>
+inline constexpr const char* coherent_symbol<rotational_stiffness> = " N*m/rad";
 
 inline std::string number_text(double number) {
     std::array<char, 40> text{};

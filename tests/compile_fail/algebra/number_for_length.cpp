@@ -2,7 +2,7 @@
 #include "twin.hpp"
 
 #ifdef WRONG
-constexpr quantity<length> L = 7.2;
+constexpr quantity<dimension::length> L = 7.2;
 #else
-constexpr quantity<length> L = 7.2 * m;
+constexpr quantity<dimension::length> L = 7.2 * m;
 #endif

@@ -2,7 +2,7 @@
 #include "twin.hpp"
 
 #ifdef WRONG
-constexpr quantity<length> v = line.slope(3.6 * m);
+constexpr quantity<dimension::length> v = line.slope(3.6 * m);
 #else
-constexpr quantity<length> v = line.deflection(3.6 * m);
+constexpr quantity<dimension::length> v = line.deflection(3.6 * m);
 #endif

@@ -2,7 +2,7 @@
 #include "twin.hpp"
 
 #ifdef WRONG
-constexpr quantity<moment> M = 8.0e3 * boost::units::si::newton_meter;
+constexpr quantity<dimension::moment> M = 8.0e3 * boost::units::si::newton_meter;
 #else
-constexpr quantity<moment> M = 8.0 * kN * m;
+constexpr quantity<dimension::moment> M = 8.0 * kN * m;
 #endif

@@ -2,7 +2,7 @@
 #include "twin.hpp"
 
 #ifdef WRONG
-constexpr quantity<moment> M = 4.5 * kN / m * 7.2 * m / 8.0;
+constexpr quantity<dimension::moment> M = 4.5 * kN / m * 7.2 * m / 8.0;
 #else
-constexpr quantity<moment> M = 4.5 * kN / m * 7.2 * m * 7.2 * m / 8.0;
+constexpr quantity<dimension::moment> M = 4.5 * kN / m * 7.2 * m * 7.2 * m / 8.0;
 #endif

@@ -4,5 +4,5 @@
 #ifdef WRONG
 const auto P = parse<double>("22 kN");
 #else
-const auto P = parse<force>("22 kN");
+const auto P = parse<dimension::force>("22 kN");
 #endif

@@ -2,7 +2,7 @@
 #include "twin.hpp"
 
 #ifdef WRONG
-const quantity<force> P = parse<length>("22 kN");
+const quantity<dimension::force> P = parse<dimension::length>("22 kN");
 #else
-const quantity<force> P = parse<force>("22 kN");
+const quantity<dimension::force> P = parse<dimension::force>("22 kN");
 #endif

@@ -53,5 +53,5 @@ TEST_CASE("scales of a force have the dimensions of the responses") {
     static_assert(scale_of_force<response::slope>(3.0 * N, L, EI) == 1.5 * rad);
     static_assert(scale_of_force<response::moment>(3.0 * N, L, EI) == 6.0 * N * m);
     static_assert(scale_of_force<response::shear>(3.0 * N, L, EI) == 3.0 * N);
-    static_assert(std::is_same_v<response_quantity<response::slope, float>, quantity<plane_angle, float>>);
+    static_assert(std::is_same_v<response_quantity<response::slope, float>, quantity<dimension::plane_angle, float>>);
 }

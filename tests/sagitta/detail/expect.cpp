@@ -12,7 +12,7 @@ using namespace sagitta::units;
 using namespace sagitta::detail;
 
 TEST_CASE("quantities pass, in the number type that is asked for") {
-    static_assert(std::is_same_v<decltype(expect_length<float>(1.0 * m)), quantity<length, float>>);
+    static_assert(std::is_same_v<decltype(expect_length<float>(1.0 * m)), quantity<dimension::length, float>>);
     static_assert(expect_length<double>(3.0F * m) == 3.0 * m);
     static_assert(expect_force<double>(1.0 * kip) == 1.0 * kip);
     static_assert(expect_moment<double>(1.0 * kN * m) == 1.0 * kN * m);
@@ -29,11 +29,13 @@ TEST_CASE("another unit of the dimension is converted, integers without loss") {
 }
 
 TEST_CASE("dimensions are told apart, units of one dimension are not") {
-    static_assert(has_dimension<quantity<length>, length>);
-    static_assert(has_dimension<quantity<length, int>, length>);
-    static_assert(!has_dimension<quantity<force>, length>);
-    static_assert(!has_dimension<double, length>);
-    static_assert(!has_dimension<quantity<moment>, force>);
-    static_assert(std::is_same_v<common_number<quantity<length, float>, quantity<force, int>>, double>);
-    static_assert(std::is_same_v<common_number<quantity<length, float>, quantity<force, float>>, float>);
+    static_assert(has_dimension<quantity<dimension::length>, dimension::length>);
+    static_assert(has_dimension<quantity<dimension::length, int>, dimension::length>);
+    static_assert(!has_dimension<quantity<dimension::force>, dimension::length>);
+    static_assert(!has_dimension<double, dimension::length>);
+    static_assert(!has_dimension<quantity<dimension::moment>, dimension::force>);
+    static_assert(
+        std::is_same_v<common_number<quantity<dimension::length, float>, quantity<dimension::force, int>>, double>);
+    static_assert(
+        std::is_same_v<common_number<quantity<dimension::length, float>, quantity<dimension::force, float>>, float>);
 }

@@ -66,24 +66,24 @@ TEST_CASE("the usual units of each dimension are units of that dimension") {
             at = stop + 1;
         }
     };
-    check(powers_of<length>);
-    check(powers_of<area>);
-    check(powers_of<second_moment_of_area>);
-    check(powers_of<force>);
-    check(powers_of<moment>);
-    check(powers_of<line_load>);
-    check(powers_of<stress>);
-    check(powers_of<flexural_rigidity>);
-    check(powers_of<plane_angle>);
+    check(powers_of<dimension::length>);
+    check(powers_of<dimension::area>);
+    check(powers_of<dimension::second_moment_of_area>);
+    check(powers_of<dimension::force>);
+    check(powers_of<dimension::moment>);
+    check(powers_of<dimension::line_load>);
+    check(powers_of<dimension::stress>);
+    check(powers_of<dimension::flexural_rigidity>);
+    check(powers_of<dimension::plane_angle>);
 }
 
 TEST_CASE("dimensions as powers of force, length and angle") {
-    static_assert(powers_of<length> == dimension_powers{0, 1, 0});
-    static_assert(powers_of<force> == dimension_powers{1, 0, 0});
-    static_assert(powers_of<moment> == dimension_powers{1, 1, 0});
-    static_assert(powers_of<line_load> == dimension_powers{1, -1, 0});
-    static_assert(powers_of<stress> == dimension_powers{1, -2, 0});
-    static_assert(powers_of<flexural_rigidity> == dimension_powers{1, 2, 0});
-    static_assert(powers_of<plane_angle> == dimension_powers{0, 0, 1});
-    static_assert(powers_of<dimensionless> == dimension_powers{});
+    static_assert(powers_of<dimension::length> == dimension_powers{0, 1, 0});
+    static_assert(powers_of<dimension::force> == dimension_powers{1, 0, 0});
+    static_assert(powers_of<dimension::moment> == dimension_powers{1, 1, 0});
+    static_assert(powers_of<dimension::line_load> == dimension_powers{1, -1, 0});
+    static_assert(powers_of<dimension::stress> == dimension_powers{1, -2, 0});
+    static_assert(powers_of<dimension::flexural_rigidity> == dimension_powers{1, 2, 0});
+    static_assert(powers_of<dimension::plane_angle> == dimension_powers{0, 0, 1});
+    static_assert(powers_of<dimension::dimensionless> == dimension_powers{});
 }
