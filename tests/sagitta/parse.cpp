@@ -80,9 +80,9 @@ TEST_CASE("feet and inches") {
          {"12 ft 12 in", "12 ft -6 in", "12 ft 6", "12 ft 6 mm", "12 ft 6 ft", "12 m 6 in", "12 ft 6 in 3 in",
           "12 ft nan in", "12 ft, 6 in", "12 ft in", "6 in 12 ft", "12 ft 6 kN"}) {
         CAPTURE(std::string(wrong));
-        CHECK_FALSE(failure_of<length>(wrong).found.empty());
+        CHECK_FALSE(failure_of<dimension::length>(wrong).found.empty());
     }
-    CHECK_FALSE(failure_of<force>("12 kip 6 in").found.empty());
+    CHECK_FALSE(failure_of<dimension::force>("12 kip 6 in").found.empty());
 }
 
 TEST_CASE("what cannot be read is refused, saying what was found and what would do") {
@@ -92,19 +92,19 @@ TEST_CASE("what cannot be read is refused, saying what was found and what would 
           "-+1 m",   "++1 m",  "+ 1 m",  "7.2 m m", "7.2 m 3",    "7.2 m,",  "7.2 m/", "7.2 m*", "7.2 /m",
           "7.2 1/m", "7.2 m0", "7.2 m^", "7.2e m",  "7.2 7.2 m",  "1 2 m",   "7.2 m\n"}) {
         CAPTURE(std::string(wrong));
-        CHECK_FALSE(failure_of<length>(wrong).found.empty());
+        CHECK_FALSE(failure_of<dimension::length>(wrong).found.empty());
     }
-    const auto other_dimension = failure_of<length>("7.2 kN");
+    const auto other_dimension = failure_of<dimension::length>("7.2 kN");
     CHECK(other_dimension.found == "the unit 'kN'");
     CHECK(other_dimension.expected == "one of the units m, mm, cm, ft, in");
     CHECK(other_dimension.offset == 4);
-    CHECK(failure_of<length>("7.2").found == "no unit");
-    CHECK(failure_of<length>("").found == "nothing");
-    CHECK(failure_of<length>("seven m").found == "'seven m'");
-    CHECK(failure_of<length>("seven m").offset == 0);
-    CHECK(failure_of<length>("7.2 m extra").found == "'extra'");
-    CHECK(failure_of<length>("7.2 m extra").offset == 6);
-    CHECK(failure_of<force>("5 m").expected == "one of the units kN, N, MN, lbf, kip");
+    CHECK(failure_of<dimension::length>("7.2").found == "no unit");
+    CHECK(failure_of<dimension::length>("").found == "nothing");
+    CHECK(failure_of<dimension::length>("seven m").found == "'seven m'");
+    CHECK(failure_of<dimension::length>("seven m").offset == 0);
+    CHECK(failure_of<dimension::length>("7.2 m extra").found == "'extra'");
+    CHECK(failure_of<dimension::length>("7.2 m extra").offset == 6);
+    CHECK(failure_of<dimension::force>("5 m").expected == "one of the units kN, N, MN, lbf, kip");
     CHECK_THROWS_WITH_AS((void)parse<dimension::force>("5 m"),
                          "'5 m': found the unit 'm', expected one of the units kN, N, MN, lbf, kip", invalid_input);
 }

@@ -8,6 +8,7 @@
 #include <charconv>
 #include <limits>
 #include <string>
+#include <system_error>
 #include <type_traits>
 
 namespace sagitta::detail {
@@ -31,11 +32,17 @@ inline constexpr const char* coherent_symbol<flexural_rigidity> = " N*m^2";
 template <>
 inline constexpr const char* coherent_symbol<rotational_stiffness> = " N*m/rad";
 
+/// Nine digits, or as many as it takes to see that a value is not the bound it is beyond.
 inline std::string number_text(double number) {
     std::array<char, 40> text{};
-    // Shortest text that reads back as the same number, so that a value just beyond a bound is seen to be.
-    const auto end = std::to_chars(text.data(), text.data() + text.size(), number);
-    return {text.data(), end.ptr};
+    char* const first = text.data();
+    char* const last = first + text.size();
+    auto written = std::to_chars(first, last, number, std::chars_format::general, 9).ptr;
+    double read = 0;
+    if (std::from_chars(first, written, read).ec == std::errc{} && read != number) {
+        written = std::to_chars(first, last, number, std::chars_format::general, 17).ptr;
+    }
+    return {first, written};
 }
 
 [[noreturn, gnu::cold, gnu::noinline]] inline void throw_invalid_input(const char* argument, double value,
