@@ -57,6 +57,7 @@ void check(const Make& make) {
         load_list<T> list;
         list += loads;
         answers.push_back({"by a list", b.under(list).deflection(x * m).value()});
+        answers.push_back({"tangential deviation", moment_area(b.under(list), T(0) * m, x * m).deviation.value()});
         return answers;
     });
 }

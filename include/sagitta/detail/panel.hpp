@@ -1,9 +1,8 @@
 // Gauss quadrature over one panel of a curvature diagram.
 #pragma once
 
+#include <sagitta/detail/gauss_rule.hpp>
 #include <sagitta/detail/statics.hpp>
-
-#include <boost/math/quadrature/gauss.hpp>
 
 #include <cstddef>
 
@@ -19,7 +18,7 @@ struct panel_moments {
 
 template <class T, std::size_t points, class Curvature>
 panel_moments<T> integrate_panel(const T& from, const T& to, const Curvature& curvature) {
-    using rule = boost::math::quadrature::gauss<T, points>;
+    using rule = gauss_rule<T, points>;
     const T half = (to - from) / T(2);
     panel_moments<T> sum;
     const auto add = [&](const T& offset, const T& weight) {

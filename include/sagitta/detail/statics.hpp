@@ -4,9 +4,8 @@
 #pragma once
 
 #include <sagitta/detail/acting_loads.hpp>
+#include <sagitta/detail/gauss_rule.hpp>
 #include <sagitta/ends.hpp>
-
-#include <boost/math/quadrature/gauss.hpp>
 
 #include <algorithm>
 
@@ -132,7 +131,7 @@ private:
     shear_and_moment<T> integral(const T& from, const T& to, const T& c, const T& d) const {
         if (!(from < to)) return {};
         const T half = (to - from) / T(2);
-        const T offset = half * boost::math::quadrature::gauss<T, 2>::abscissa()[0];
+        const T offset = half * gauss_rule<T, 2>::abscissa()[0];
         const T u1 = (from + half) - offset;
         const T u2 = (from + half) + offset;
         const T w1 = load_.size_from + gradient_ * u1;
