@@ -13,7 +13,7 @@ namespace sagitta::detail {
 /// doubles the digits.
 template <class T>
 T root_of(const T& square, double near) {
-    T root(near);
+    T root = static_cast<T>(near);
     if constexpr (!std::is_same_v<T, double> && !std::is_same_v<T, float>) {
         for (int i = 0; i < 4; ++i) root = (root + square / root) / T(2);
     }
