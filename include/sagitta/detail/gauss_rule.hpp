@@ -1,54 +1,66 @@
-// The nodes and weights of Gauss-Legendre quadrature on [-1, 1], positive half.
+// The nodes and weights of Gauss-Legendre quadrature on [-1, 1], positive half, in any number type.
 #pragma once
 
 #include <boost/math/quadrature/gauss.hpp>
 
 #include <array>
 #include <cstddef>
+#include <limits>
 #include <type_traits>
+#include <utility>
 
 namespace sagitta::detail {
 
-/// The square root of a small fraction in any number type: Newton's iteration from its double, each step of which
-/// doubles the digits.
-template <class T>
-T root_of(const T& square, double near) {
-    T root = static_cast<T>(near);
-    if constexpr (!std::is_same_v<T, double> && !std::is_same_v<T, float>) {
-        for (int i = 0; i < 4; ++i) root = (root + square / root) / T(2);
-    }
-    return root;
-}
-
-/// Rules of many points come from Boost.Math; those of two and three, exact for cubics and quintics, need no more of a
-/// number than arithmetic.
+/// The rule of so many points. float and double take it from Boost.Math; any other type needs no more than arithmetic:
+/// each node is a root of the Legendre polynomial, found by Newton's iteration from the double.
 template <class T, std::size_t points>
 struct gauss_rule {
-    static const auto& abscissa() { return boost::math::quadrature::gauss<T, points>::abscissa(); }
-    static const auto& weights() { return boost::math::quadrature::gauss<T, points>::weights(); }
-};
+    static const auto& abscissa() { return halves().nodes; }
+    static const auto& weights() { return halves().weights; }
 
-template <class T>
-struct gauss_rule<T, 2> {
-    static const std::array<T, 1>& abscissa() {
-        static const std::array<T, 1> nodes{root_of(T(1) / T(3), 0.57735026918962576)};
-        return nodes;
-    }
-    static const std::array<T, 1>& weights() {
-        static const std::array<T, 1> all{T(1)};
-        return all;
-    }
-};
+private:
+    using known = boost::math::quadrature::gauss<double, points>;
+    static constexpr bool is_known = std::is_same_v<T, double> || std::is_same_v<T, float>;
+    static constexpr std::size_t count = (points + 1) / 2;
 
-template <class T>
-struct gauss_rule<T, 3> {
-    static const std::array<T, 2>& abscissa() {
-        static const std::array<T, 2> nodes{T(0), root_of(T(3) / T(5), 0.77459666924148338)};
-        return nodes;
+    struct table {
+        std::array<T, count> nodes{};
+        std::array<T, count> weights{};
+    };
+
+    /// The Legendre polynomial of degree `points` and its derivative at x, by the three-term recurrence (Bonnet).
+    static std::pair<T, T> legendre(const T& x) {
+        T before(1), value = x;
+        for (int n = 1; n < static_cast<int>(points); ++n) {
+            const T next = (T(2 * n + 1) * x * value - T(n) * before) / T(n + 1);
+            before = value;
+            value = next;
+        }
+        const T slope = T(static_cast<int>(points)) * (before - x * value) / (T(1) - x * x);
+        return {value, slope};
     }
-    static const std::array<T, 2>& weights() {
-        static const std::array<T, 2> all{T(8) / T(9), T(5) / T(9)};
-        return all;
+
+    static const table& halves() {
+        static const table made = [] {
+            table t;
+            for (std::size_t i = 0; i < count; ++i) {
+                const double near = known::abscissa()[i];
+                t.nodes[i] = static_cast<T>(near);
+                if constexpr (is_known) {
+                    t.weights[i] = static_cast<T>(known::weights()[i]);
+                } else {
+                    // Every step doubles the digits. The node in the middle is 0 and stays so.
+                    for (int digits = 16; near != 0.0 && digits < 4 * std::numeric_limits<T>::digits10; digits *= 2) {
+                        const auto [value, slope] = legendre(t.nodes[i]);
+                        t.nodes[i] -= value / slope;
+                    }
+                    const T slope = legendre(t.nodes[i]).second;
+                    t.weights[i] = T(2) / ((T(1) - t.nodes[i] * t.nodes[i]) * slope * slope);
+                }
+            }
+            return t;
+        }();
+        return made;
     }
 };
 

@@ -5,9 +5,6 @@
 #include <sagitta/detail/polynomial.hpp>
 #include <sagitta/piecewise.hpp>
 
-#include <boost/math/tools/toms748_solve.hpp>
-
-#include <cstdint>
 #include <limits>
 #include <vector>
 
@@ -45,7 +42,10 @@ public:
         for (const auto& turning : turning_points(*this)) cuts.push_back(turning.at);
         cuts.push_back(T(1));
         return roots_between_cuts<std::vector<root<T>>>(
-            *this, cuts, tolerance, [&](const T& low, const T& high) { return solve(*this, low, high); });
+            *this, cuts, tolerance, [&](const T& low, const T& high) {
+                return bracketed_root([&](const T& t) { return (*this)(t); }, [&](const T& t) { return growth(t); },
+                                      low, high);
+            });
     }
 
     friend std::vector<root<T>> turning_points(const numeric_profile& profile) { return profile.turning(); }
@@ -54,6 +54,22 @@ private:
     quantity<length, T> place(const T& t) const {
         const auto x = from_ + (to_ - from_) * t;
         return x < to_ ? x : to_;
+    }
+
+    T curvature_at(const T& t) const {
+        const auto x = place(t);
+        const auto imposed = line_.imposed_curvature(from_, just_right);
+        return (line_.moment(x, x < to_ ? just_right : just_left) / line_.rigidity(x) + imposed).value();
+    }
+
+    /// The derivative with respect to t: the next response in the chain.
+    T growth(const T& t) const {
+        const T width = (to_ - from_).value();
+        if constexpr (R == response::deflection) {
+            return line_.slope(place(t)).value() * width;
+        } else {
+            return -curvature_at(t) * width;
+        }
     }
 
     std::vector<root<T>> turning() const {
@@ -75,25 +91,22 @@ private:
             for (const auto& zero : roots_between_0_and_1(M, M.noise())) zeros.push_back(zero);
             return zeros;
         }
-        const auto curvature_at = [&](const T& t) {
-            const auto x = place(t);
-            return (line_.moment(x, x < to_ ? just_right : just_left) / line_.rigidity(x) + imposed).value();
-        };
         std::vector<T> cuts{T(0)};
         for (const auto& bound : line_.panel_bounds()) {
             if (bound > from_ && bound < to_) cuts.push_back(((bound - from_) / (to_ - from_)).value());
         }
         cuts.push_back(T(1));
-        return roots_between_cuts<std::vector<root<T>>>(
-            curvature_at, cuts, T(0), [&](const T& low, const T& high) { return solve(curvature_at, low, high); });
-    }
-
-    template <class Function>
-    static T solve(const Function& f, const T& low, const T& high) {
-        std::uintmax_t steps = 200;
-        const boost::math::tools::eps_tolerance<T> close(std::numeric_limits<T>::digits - 2);
-        const auto [a, b] = boost::math::tools::toms748_solve(f, low, high, close, steps);
-        return (a + b) / T(2);
+        // The stiffness is known by its values only: a difference serves as the derivative.
+        const auto curvature = [&](const T& t) { return curvature_at(t); };
+        return roots_between_cuts<std::vector<root<T>>>(curvature, cuts, T(0), [&](const T& low, const T& high) {
+            const T step = (high - low) / T(1024);
+            const auto difference = [&](const T& t) {
+                const T before = t - step < low ? low : t - step;
+                const T after = t + step > high ? high : t + step;
+                return (curvature(after) - curvature(before)) / (after - before);
+            };
+            return bracketed_root(curvature, difference, low, high);
+        });
     }
 
     const Line& line_;

@@ -49,10 +49,10 @@ struct root {
     bool crosses = true;
 };
 
-/// The root in [low, high], where p changes sign and is monotone. Newton steps, kept inside the bracket.
-template <class T, std::size_t Degree>
-constexpr T bracketed_root(const polynomial<T, Degree>& p, T low, T high) {
-    const polynomial<T, Degree - 1> slope = p.derivative();
+/// The root in [low, high] of a function p whose derivative is slope, where p changes sign and is monotone. Newton
+/// steps, kept inside the bracket.
+template <class T, class Function, class Derivative>
+constexpr T bracketed_root(const Function& p, const Derivative& slope, T low, T high) {
     const bool rising = p(low) < T(0);
     const T resolution = T(2) * std::numeric_limits<T>::epsilon();
     constexpr int safe_step_count = 4 * std::numeric_limits<T>::digits;  // bisection alone would need a quarter
@@ -111,7 +111,7 @@ constexpr bounded_list<root<T>, Degree> roots_between_0_and_1(const polynomial<T
     }
     cuts.push_back(T(1));
     return roots_between_cuts<bounded_list<root<T>, Degree>>(
-        p, cuts, tolerance, [&](const T& low, const T& high) { return bracketed_root(p, low, high); });
+        p, cuts, tolerance, [&](const T& low, const T& high) { return bracketed_root(p, p.derivative(), low, high); });
 }
 
 /// The places in (0, 1) where p turns.
