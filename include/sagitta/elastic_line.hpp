@@ -14,8 +14,9 @@ namespace sagitta {
 
 /// What beam.under(loads) returns. Every answer is a quantity in coherent SI.
 ///
-/// Places x are lengths from the left end; invalid_input is thrown where x is not on the beam. Where a
-/// concentrated load stands, shear (force) or moment (couple) have two values: side says which is meant. By
+/// Places x are lengths from the left end; invalid_input is thrown where x is not on the beam. Where something
+/// concentrated stands, shear (force), moment (couple), slope (kink) or deflection (offset) have two values: side says
+/// which is meant. By
 /// default it is the value just right of x, at the right end of the beam the one just left of it, so that both
 /// ends answer for the beam itself. At an end, the other side of it answers for the support.
 ///
@@ -39,12 +40,24 @@ public:
     /// Deflection, downward positive (a length).
     template <class X>
     [[nodiscard, gnu::always_inline]] constexpr quantity<dimension::length, number> deflection(const X& x) const {
-        return answer<response::deflection>(on_beam(x), just_right);
+        const auto place = on_beam(x);
+        return answer<response::deflection>(place, side_in_deformation(place));
+    }
+    template <class X>
+    [[nodiscard, gnu::always_inline]] constexpr quantity<dimension::length, number> deflection(const X& x,
+                                                                                               side which) const {
+        return answer<response::deflection>(on_beam(x), which);
     }
     /// Slope dv/dx, clockwise positive (a plane angle).
     template <class X>
     [[nodiscard, gnu::always_inline]] constexpr quantity<dimension::plane_angle, number> slope(const X& x) const {
-        return answer<response::slope>(on_beam(x), just_right);
+        const auto place = on_beam(x);
+        return answer<response::slope>(place, side_in_deformation(place));
+    }
+    template <class X>
+    [[nodiscard, gnu::always_inline]] constexpr quantity<dimension::plane_angle, number> slope(const X& x,
+                                                                                               side which) const {
+        return answer<response::slope>(on_beam(x), which);
     }
     /// Bending moment, sagging positive (force times length).
     template <class X>
@@ -160,6 +173,15 @@ private:
 
     constexpr side inner_side(const quantity<dimension::length, number>& x) const {
         return x < beam_.span() ? just_right : just_left;
+    }
+
+    /// Deflection and slope jump at a lack of fit only: without one no comparison is spent on the side.
+    [[gnu::always_inline]] constexpr side side_in_deformation(const quantity<dimension::length, number>& x) const {
+        if constexpr (superposed::may_jump()) {
+            return inner_side(x);
+        } else {
+            return just_right;
+        }
     }
 
     [[gnu::always_inline]] constexpr detail::unit_beam<number> seen() const { return {beam_.span()}; }

@@ -35,14 +35,9 @@ namespace detail {
 template <response R, class Line, class X>
 constexpr auto answer_of(const Line& line, const X& x, side which) {
     if constexpr (R == response::deflection) {
-        return line.deflection(x);
+        return line.deflection(x, which);
     } else if constexpr (R == response::slope) {
-        // It jumps at a hinge, and where a beam that deforms in shear carries a point load.
-        if constexpr (requires { line.slope(x, which); }) {
-            return line.slope(x, which);
-        } else {
-            return line.slope(x);
-        }
+        return line.slope(x, which);
     } else if constexpr (R == response::moment) {
         return line.moment(x, which);
     } else {

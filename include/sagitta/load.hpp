@@ -1,7 +1,7 @@
 // Load cases and their vector space.
 //
-// point_load, applied_couple, uniform_load, partial_uniform_load, linear_load, settlement and support_rotation
-// make load cases; + - * / compose them. A composition whose length is known when compiling allocates nothing
+// point_load, applied_couple, uniform_load, partial_uniform_load, linear_load, settlement, support_rotation,
+// imposed_kink, imposed_offset, imposed_curvature and temperature_gradient make load cases; + - * / compose them. A composition whose length is known when compiling allocates nothing
 // and is constexpr; load_list (load_list.hpp) grows at run time.
 #pragma once
 
@@ -222,6 +222,24 @@ template <class End, class R>
     detail::expect_end<End>();
     using T = detail::common_number<R>;
     return load_types::movement<End, load_types::motion::rotation, T>(detail::expect_angle<T>(size));
+}
+
+/// A kink (a plane angle, positive where it makes the beam sag) that a cause other than load puts into the beam at a
+/// place: two parts joined at an angle. imposed_kink(2.0*mrad, at(3.0*m)).
+template <class A, class P>
+[[nodiscard]] constexpr auto imposed_kink(const A& size, const P& place) {
+    using T = std::common_type_t<detail::common_number<A>, typename detail::number_of_place<P>::type>;
+    return load_types::concentrated<load_types::action::kink, T>(detail::expect_angle<T>(size),
+                                                                 detail::expect_position<T>(place));
+}
+
+/// An offset (a length): at a place the part right of it is joined lower by so much than the part left of it.
+/// imposed_offset(3.0*mm, at(3.0*m)).
+template <class D, class P>
+[[nodiscard]] constexpr auto imposed_offset(const D& size, const P& place) {
+    using T = std::common_type_t<detail::common_number<D>, typename detail::number_of_place<P>::type>;
+    return load_types::concentrated<load_types::action::offset, T>(detail::expect_length<T>(size),
+                                                                   detail::expect_position<T>(place));
 }
 
 /// A curvature (1 per length, sagging positive) that a cause other than load imposes over a stretch, such as

@@ -46,12 +46,20 @@ public:
     /// Deflection, downward positive.
     template <class X>
     [[nodiscard]] quantity<dimension::length, T> deflection(const X& x) const {
-        return quantity<dimension::length, T>::from_value(integrator_.state_at(on_beam(x)).deflection);
+        return deflection(x, inner_side(on_beam(x)));
+    }
+    template <class X>
+    [[nodiscard]] quantity<dimension::length, T> deflection(const X& x, side which) const {
+        return quantity<dimension::length, T>::from_value(integrator_.state_at(on_beam(x), which).deflection);
     }
     /// Slope, clockwise positive.
     template <class X>
     [[nodiscard]] quantity<dimension::plane_angle, T> slope(const X& x) const {
-        return quantity<dimension::plane_angle, T>::from_value(integrator_.state_at(on_beam(x)).slope);
+        return slope(x, inner_side(on_beam(x)));
+    }
+    template <class X>
+    [[nodiscard]] quantity<dimension::plane_angle, T> slope(const X& x, side which) const {
+        return quantity<dimension::plane_angle, T>::from_value(integrator_.state_at(on_beam(x), which).slope);
     }
     /// Bending moment, sagging positive.
     template <class X>

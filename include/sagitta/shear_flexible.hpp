@@ -65,8 +65,12 @@ public:
     /// Deflection, downward positive; x is a length on the beam.
     template <class X>
     [[nodiscard]] constexpr quantity<dimension::length, number> deflection(const X& x) const {
+        return deflection(x, inner_side(x));
+    }
+    template <class X>
+    [[nodiscard]] constexpr quantity<dimension::length, number> deflection(const X& x, side which) const {
         const auto s = detail::expect_length<number>(x);
-        return bent_.deflection(s) + (slid(s) - unslid(s)) * flexibility_ + corrected_.deflection(s);
+        return bent_.deflection(s, which) + (slid(s) - unslid(s)) * flexibility_ + corrected_.deflection(s);
     }
     /// Slope dv/dx, clockwise positive.
     template <class X>
@@ -77,7 +81,7 @@ public:
     [[nodiscard]] constexpr quantity<dimension::plane_angle, number> slope(const X& x, side which) const {
         auto V = bent_.shear(x, which);
         if constexpr (on_two_supports) V -= mean_shear_;
-        return bent_.slope(x) + detail::as_angle(V * flexibility_) + corrected_.slope(x);
+        return bent_.slope(x, which) + detail::as_angle(V * flexibility_) + corrected_.slope(x);
     }
     /// Bending moment, sagging positive.
     template <class X>

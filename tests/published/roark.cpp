@@ -52,6 +52,12 @@ auto free_fixed(double l, double EI) { return mirrored(sagitta::cantilever(l * m
 auto simple_fixed(double l, double EI) { return mirrored(sagitta::propped_cantilever(l * m, stiffness(EI))); }
 auto fixed_fixed(double l, double EI) { return sagitta::fixed_beam(l * m, stiffness(EI)); }
 auto simple_simple(double l, double EI) { return sagitta::simple_beam(l * m, stiffness(EI)); }
+auto guided_simple(double l, double EI) {
+    return sagitta::beam_with_ends<sagitta::held::guided, sagitta::held::pinned>(l * m, stiffness(EI));
+}
+auto guided_fixed(double l, double EI) {
+    return sagitta::beam_with_ends<sagitta::held::guided, sagitta::held::fixed>(l * m, stiffness(EI));
+}
 
 // A guided left end is the middle of a beam twice as long, held at both ends as the original is at B, under the
 // loads and their mirror image. End A is then at x = l.
@@ -193,28 +199,44 @@ TEST_CASE("Roark cases 3b to 3e: clockwise couple M_o at a") {
     }
 }
 
-TEST_CASE("Roark cases 4c and 4d: imposed kink theta_o at a") {
+TEST_CASE("Roark cases 4c, 4d and 4f: imposed kink theta_o at a") {
     for (const auto& [l, EI, W, w_a, w_l, M_o, a] : all_values) {
-        // Free of its clamps the beam is two straight parts between its supports, whose slopes differ by
-        // theta_o. Turning the clamped ends back is a support rotation.
+        // His theta_o is the slope right of a less the slope left of it, counterclockwise: it sags.
         const double theta_o = 0.01;
-        const double y_slope_A = -theta_o * (l - a) / l;
-        const double y_slope_B = theta_o * a / l;
-        // A slope in Roark's sign is counterclockwise; turning it back to zero is clockwise.
-        const auto turn_A_back = sagitta::support_rotation(left, y_slope_A * rad);
-        const auto turn_B_back = sagitta::support_rotation(right, y_slope_B * rad);
+        const auto kink = loads{} + sagitta::imposed_kink(theta_o * rad, sagitta::at(a * m));
         {
-            const end_values at(simple_fixed(l, EI).under(loads{} + turn_B_back));
+            const end_values at(simple_fixed(l, EI).under(kink));
             of("4c", "R_A").equals(-3 * EI * a * theta_o / cube(l), at.RA, at.size.force);
-            of("4c", "theta_A").equals(-theta_o * (1 - 3 * a / (2 * l)), y_slope_A + at.theta_A, at.size.slope);
+            of("4c", "theta_A").equals(-theta_o * (1 - 3 * a / (2 * l)), at.theta_A, at.size.slope);
             of("4c", "M_B").equals(-3 * EI * a * theta_o / (l * l), at.MB, at.size.moment);
         }
         {
-            const end_values at(fixed_fixed(l, EI).under(loads{} + turn_A_back + turn_B_back));
+            const end_values at(fixed_fixed(l, EI).under(kink));
             // R_A vanishes at a = l/2; the moments over the span are its yardstick.
             of("4d", "R_A").equals(6 * EI * theta_o * (l - 2 * a) / cube(l), at.RA, 2 * at.size.moment / l);
             of("4d", "M_A").equals(2 * EI * theta_o * (3 * a - 2 * l) / (l * l), at.MA, at.size.moment);
             of("4d", "M_B").equals(2 * EI * theta_o * (l - 3 * a) / (l * l), at.MB, at.size.moment);
+        }
+        {
+            const end_values at(guided_simple(l, EI).under(kink));
+            of("4f", "y_A").equals(-theta_o * (l - a), at.y_A, at.size.deflection);
+            of("4f", "theta_B").equals(theta_o, at.theta_B, at.size.slope);
+        }
+    }
+}
+
+TEST_CASE("Roark cases 5b and 5f: imposed lateral displacement Delta_o at a") {
+    for (const auto& [l, EI, W, w_a, w_l, M_o, a] : all_values) {
+        // His Delta_o lifts the part right of a.
+        const double Delta_o = 0.01;
+        const auto offset = loads{} + sagitta::imposed_offset(-Delta_o * m, sagitta::at(a * m));
+        {
+            const end_values at(guided_fixed(l, EI).under(offset));
+            of("5b", "y_A").equals(-Delta_o, at.y_A, at.size.deflection);
+        }
+        {
+            const end_values at(guided_simple(l, EI).under(offset));
+            of("5f", "y_A").equals(-Delta_o, at.y_A, at.size.deflection);
         }
     }
 }

@@ -51,7 +51,7 @@ std::string report(const found& worst) {
 double value_of(const continuous_line<double>& line, answer what, double x, side which) {
     switch (what) {
         case answer::deflection:
-            return line.deflection(x * m).value();
+            return line.deflection(x * m, which).value();
         case answer::slope:
             return line.slope(x * m, which).value();
         case answer::moment:

@@ -58,6 +58,8 @@ TEST_CASE("closed forms and integrator agree to 1e-12 for every load case on eve
         for (const double a : {0.0, tiny, L / 3, L / 2, random.in(0, L), L - tiny, L}) {
             cases.push_back({scene::kind::point, w * L, 0, a, 0});
             cases.push_back({scene::kind::couple, w * L * L, 0, a, 0});
+            cases.push_back({scene::kind::kink, 0.003, 0, a, 0});
+            cases.push_back({scene::kind::offset, 0.003 * L, 0, a, 0});
         }
         const double inside = random.in(tiny, L - tiny);
         for (const auto& [from, to] : std::vector<std::pair<double, double>>{{0, L / 3},

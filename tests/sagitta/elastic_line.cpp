@@ -57,6 +57,12 @@ scene::load mirrored_load(scene::load l) {
             l.size = -l.size;
             l.from = L - l.from;
             break;
+        case kind::offset:
+            // Seen from the other side it is the other part that lies lower; raised by the offset it is the same.
+            l.size = -l.size;
+            l.from = L - l.from;
+            break;
+        case kind::kink:
         case kind::point:
             l.from = L - l.from;
             break;
@@ -260,7 +266,7 @@ TEST_CASE("each response is the derivative of the one before: EI (v'' + imposed)
     });
 }
 
-TEST_CASE("the line is continuous at joints; shear and moment jump by the loads that stand there") {
+TEST_CASE("the line is continuous at joints but for what stands there: a load, a kink, an offset") {
     for_random_lines(16, 20, [](const auto& b, const auto& loads, hold, hold, scene::chance&) {
         const auto line = b.under(scene::list_of(loads));
         const sizes size(line);
@@ -268,15 +274,26 @@ TEST_CASE("the line is continuous at joints; shear and moment jump by the loads 
             if (x == 0 || x == L) continue;
             CAPTURE(x);
             const double before = std::nextafter(x, 0.0);
-            CHECK(std::abs((line.deflection(x * m) - line.deflection(before * m)).value()) <= 1e-13 * size.deflection);
-            CHECK(std::abs((line.slope(x * m) - line.slope(before * m)).value()) <= 1e-13 * size.slope);
             double force_there = 0;
             double couple_there = 0;
+            double kink_there = 0;
+            double offset_there = 0;
             for (const auto& l : loads) {
                 if (l.from != x) continue;
                 if (l.what == kind::point) force_there += l.size;
                 if (l.what == kind::couple) couple_there += l.size;
+                if (l.what == kind::kink) kink_there += l.size;
+                if (l.what == kind::offset) offset_there += l.size;
             }
+            const double rise = (line.deflection(x * m) - line.deflection(before * m)).value();
+            CHECK(std::abs(rise - offset_there) <= 1e-13 * size.deflection);
+            const double turn = (line.slope(x * m) - line.slope(before * m)).value();
+            CHECK(std::abs(turn + kink_there) <= 1e-13 * size.slope);
+            CHECK(line.deflection(x * m) == line.deflection(x * m, just_right));
+            CHECK(line.slope(x * m) == line.slope(x * m, just_right));
+            CHECK(std::abs((line.deflection(before * m) - line.deflection(x * m, just_left)).value()) <=
+                  1e-13 * size.deflection);
+            CHECK(std::abs((line.slope(before * m) - line.slope(x * m, just_left)).value()) <= 1e-13 * size.slope);
             const auto jump_of_shear = line.shear(x * m, just_right) - line.shear(x * m, just_left);
             const auto jump_of_moment = line.moment(x * m, just_right) - line.moment(x * m, just_left);
             CHECK(std::abs(jump_of_shear.value() + force_there) <= 1e-12 * size.shear);

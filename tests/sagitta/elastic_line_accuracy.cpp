@@ -43,6 +43,8 @@ std::vector<load> every_load(double L, double EI, scene::chance& random) {
     for (const double a : places) {
         all.push_back({kind::point, P, 0, a, 0});
         all.push_back({kind::couple, -P * L, 0, a, 0});
+        all.push_back({kind::kink, 0.004, 0, a, 0});
+        all.push_back({kind::offset, -0.004 * L, 0, a, 0});
     }
     all.push_back({kind::uniform, P / L});
     all.push_back({kind::linear_whole, P / L, 0.0});
@@ -92,7 +94,6 @@ std::array<double, 4> greatest_values(const reference::beam<T>& exact, double L,
     for (const double x : dense) {
         for (const auto which : {reference::from::left, reference::from::right}) {
             for (int q = 0; q < 4; ++q) {
-                if (q < 2 && which == reference::from::left) continue;
                 const double size = std::abs(static_cast<double>(exact.value(static_cast<quantity>(q), T(x), which)));
                 auto& slot = greatest[static_cast<std::size_t>(q)];
                 slot = std::max(slot, size);
@@ -135,12 +136,12 @@ void compare(const Beam& b, hold left, hold right, const std::vector<load>& load
     for (const double place : places) {
         const T x(place);
         const auto at_x = place * units::m;
-        note(worst.deflection, line.deflection(at_x).value(), exact.value(quantity::deflection, x),
-             quantity::deflection);
-        note(worst.slope, line.slope(at_x).value(), exact.value(quantity::slope, x), quantity::slope);
         for (const bool is_left : {true, false}) {
             const auto which = is_left ? just_left : just_right;
             const auto from = is_left ? reference::from::left : reference::from::right;
+            note(worst.deflection, line.deflection(at_x, which).value(), exact.value(quantity::deflection, x, from),
+                 quantity::deflection);
+            note(worst.slope, line.slope(at_x, which).value(), exact.value(quantity::slope, x, from), quantity::slope);
             note(worst.moment, line.moment(at_x, which).value(), exact.value(quantity::moment, x, from),
                  quantity::moment);
             note(worst.shear, line.shear(at_x, which).value(), exact.value(quantity::shear, x, from), quantity::shear);

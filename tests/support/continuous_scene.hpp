@@ -128,6 +128,12 @@ reference::continuous<T> reference_of(const continuous& c) {
             case kind::partial_curvature:
                 b.add_curvature(l.size, l.from, l.to);
                 break;
+            case kind::kink:
+                b.add_misfit(-l.size, 0, l.from);
+                break;
+            case kind::offset:
+                b.add_misfit(0, l.size, l.from);
+                break;
         }
     }
     return b;
@@ -249,6 +255,8 @@ private:
                 return how_.may_move && c_.turning[1] != 0;
             case kind::curvature:
             case kind::partial_curvature:
+            case kind::kink:
+            case kind::offset:
                 return how_.may_move;
             default:
                 return true;
@@ -257,14 +265,14 @@ private:
     void draw_loads(double unit) {
         const int count = random_.whole(1, 5);
         while (static_cast<int>(c_.loads.size()) < count) {
-            const auto what = static_cast<kind>(random_.whole(0, c_.loads.empty() ? 5 : 11));
+            const auto what = static_cast<kind>(random_.whole(0, c_.loads.empty() ? 5 : 13));
             if (!can_act_here(what)) continue;
             const double w = random_.in(0.5, 5) * (random_.toss() ? 1 : -1) * c_.EI / (unit * unit * unit);
             load l{what};
             l.from = load_place();
             l.to = load_place();
             if (l.from > l.to) std::swap(l.from, l.to);
-            if (!(l.from < l.to) && what != kind::point && what != kind::couple) continue;
+            if (!(l.from < l.to) && !is_concentrated(what)) continue;
             switch (what) {
                 case kind::point:
                     l.size = w * 0.01;
@@ -283,6 +291,12 @@ private:
                 case kind::curvature:
                 case kind::partial_curvature:
                     l.size = random_.in(-0.05, 0.05) / unit;
+                    break;
+                case kind::kink:
+                    l.size = random_.in(-0.05, 0.05);
+                    break;
+                case kind::offset:
+                    l.size = random_.in(-0.05, 0.05) * unit;
                     break;
                 default:
                     l.size = w * 0.01 / unit;

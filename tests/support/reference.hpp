@@ -44,6 +44,10 @@ public:
         kinks_.push_back({T(size), T(start)});
         kinks_.push_back({-T(size), T(stop)});
     }
+    /// Two parts joined at an angle: the slope falls by so much, as in a beam that sags.
+    void add_kink(double size, double at) { turns_.push_back({T(size), T(at)}); }
+    /// The part right of the place is joined so much lower.
+    void add_offset(double size, double at) { offsets_.push_back({T(size), T(at)}); }
     void add_settlement(bool at_left, double size) { (at_left ? left_settlement_ : right_settlement_) += T(size); }
     void add_rotation(bool at_left, double size) { (at_left ? left_rotation_ : right_rotation_) += T(size); }
 
@@ -152,6 +156,14 @@ private:
             if (what == quantity::deflection) sum -= kink.size * s * s / T(2);
             if (what == quantity::slope) sum -= kink.size * s;
         }
+        for (const auto& turn : turns_) {
+            if (!acts(x, turn.at, which)) continue;
+            if (what == quantity::deflection) sum -= turn.size * (x - turn.at);
+            if (what == quantity::slope) sum -= turn.size;
+        }
+        for (const auto& offset : offsets_) {
+            if (acts(x, offset.at, which) && what == quantity::deflection) sum += offset.size;
+        }
         for (const auto& line : lines_) {
             if (!(x > line.at)) continue;
             const T s = x - line.at;
@@ -197,6 +209,7 @@ private:
     std::vector<concentrated> couples_;
     std::vector<ramp> lines_;
     std::vector<concentrated> kinks_;
+    std::vector<concentrated> turns_, offsets_;
     T left_settlement_{0}, right_settlement_{0}, left_rotation_{0}, right_rotation_{0};
     std::array<T, 4> initial_{};
 };

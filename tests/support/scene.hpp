@@ -25,8 +25,14 @@ enum class kind {
     rotation_left,
     rotation_right,
     curvature,
-    partial_curvature
+    partial_curvature,
+    kink,
+    offset
 };
+
+inline bool is_concentrated(kind what) {
+    return what == kind::point || what == kind::couple || what == kind::kink || what == kind::offset;
+}
 
 struct load {
     kind what;
@@ -39,7 +45,7 @@ struct load {
 inline std::string text(const load& l) {
     const char* const names[] = {"point",         "couple",         "uniform",         "partial uniform",
                                  "linear whole",  "linear",         "settlement left", "settlement right",
-                                 "rotation left", "rotation right", "curvature",       "partial curvature"};
+                                 "rotation left", "rotation right", "curvature",       "partial curvature", "kink", "offset"};
     return std::string(names[static_cast<int>(l.what)]) + " " + std::to_string(l.size) + ", " +
            std::to_string(l.size_to) + " from " + std::to_string(l.from) + " to " + std::to_string(l.to);
 }
@@ -100,6 +106,12 @@ inline void add(sagitta::load_list<>& list, const load& l) {
         case kind::partial_curvature:
             list += imposed_curvature(l.size / m, between(l.from * m, l.to * m));
             return;
+        case kind::kink:
+            list += imposed_kink(l.size * rad, at(l.from * m));
+            return;
+        case kind::offset:
+            list += imposed_offset(l.size * m, at(l.from * m));
+            return;
     }
 }
 
@@ -147,6 +159,12 @@ reference::beam<T> reference_of(reference::hold left, reference::hold right, dou
             case kind::partial_curvature:
                 b.add_curvature(l.size, l.from, l.to);
                 break;
+            case kind::kink:
+                b.add_kink(l.size, l.from);
+                break;
+            case kind::offset:
+                b.add_offset(l.size, l.from);
+                break;
         }
     }
     b.solve();
@@ -157,7 +175,7 @@ reference::beam<T> reference_of(reference::hold left, reference::hold right, dou
 inline std::vector<double> joints_of(double L, const std::vector<load>& all) {
     std::vector<double> places{0, L};
     for (const auto& l : all) {
-        if (l.what == kind::point || l.what == kind::couple) places.push_back(l.from);
+        if (is_concentrated(l.what)) places.push_back(l.from);
         if (l.what == kind::partial_uniform || l.what == kind::linear || l.what == kind::partial_curvature) {
             places.push_back(l.from);
             places.push_back(l.to);
@@ -200,8 +218,8 @@ private:
 /// A load of any kind, of either sign, anywhere on a span; the deflections of all kinds are of a like size.
 inline load random_load(chance& random, double L, double EI) {
     // A curvature over the whole beam is left out: alone on a fixed beam nothing of it is left but rounding.
-    const int number = random.whole(0, 10);
-    const auto what = number == 10 ? kind::partial_curvature : static_cast<kind>(number);
+    const int number = random.whole(0, 12);
+    const auto what = static_cast<kind>(number < 10 ? number : number + 1);
     const double sign = random.toss() ? 1 : -1;
     load l{what};
     switch (what) {
@@ -218,6 +236,11 @@ inline load random_load(chance& random, double L, double EI) {
         case kind::rotation_left:
         case kind::rotation_right:
             l.size = sign * random.in(0.01, 0.1) * (what >= kind::rotation_left ? 1 : L) / L;
+            break;
+        case kind::kink:
+        case kind::offset:
+            l.size = sign * random.in(0.01, 0.1) * (what == kind::offset ? L : 1) / L;
+            l.from = random.in(0, L);
             break;
         default: {
             const bool bends = what >= kind::curvature;

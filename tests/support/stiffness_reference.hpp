@@ -72,6 +72,13 @@ public:
         kinks_.push_back({start, stop, size, size});
     }
 
+    /// Two parts joined at an angle, or one lower than the other: how the part right of the place differs. At a node it
+    /// is the part left of it that the node moves with, at the left end whatever holds it.
+    void add_misfit(double turn, double offset, double at) {
+        places_.push_back(at);
+        misfits_.push_back({at, turn, offset});
+    }
+
     /// False where the beam can move freely.
     [[nodiscard]] bool solve() {
         std::sort(places_.begin(), places_.end());
@@ -86,8 +93,8 @@ public:
             const auto ends = forces_on(e);
             e.V = -ends[0];
             e.M = ends[1];
-            e.v = moved_[e.unknown[0]];
-            e.turn = moved_[e.unknown[1]];
+            e.v = moved_[e.unknown[0]] + e.jump[0];
+            e.turn = moved_[e.unknown[1]] + e.jump[1];
         }
         return true;
     }
@@ -131,7 +138,8 @@ public:
             const std::array<T, 4> integrated{e.value(quantity::deflection, L, shear_flexibility_), e.turn_at(L),
                                               e.value(quantity::moment, L, shear_flexibility_),
                                               e.value(quantity::shear, L, shear_flexibility_)};
-            const std::array<T, 4> there{moved_[e.unknown[2]], moved_[e.unknown[3]], -ends[3], ends[2]};
+            const std::array<T, 4> there{moved_[e.unknown[2]] + e.jump[2], moved_[e.unknown[3]] + e.jump[3], -ends[3],
+                                         ends[2]};
             const std::array<T, 4> start{e.v, e.turn, e.M, e.V};
             const std::array<T, 4> to_moment{e.EI / (L0 * L0), e.EI / L0, T(1), L0};
             for (std::size_t q = 0; q < 4; ++q) {
@@ -148,6 +156,9 @@ private:
     struct sized {
         double at, size;
     };
+    struct misfit_at {
+        double at, turn, offset;
+    };
     struct stretch {
         double from, to, size_from, size_to;
     };
@@ -158,6 +169,7 @@ private:
         std::array<std::size_t, 4> unknown{};  // v and turn at its start, v and turn at its end
         std::array<std::array<T, 4>, 4> k{};   // forces at the ends for movements of the ends
         std::array<T, 4> fixed{};              // and for loads when the ends do not move
+        std::array<T, 4> jump{};               // by how much its ends have moved more than the nodes
         T v{0}, turn{0}, M{0}, V{0};           // at its start, once solved
 
         T turn_at(const T& s) const {
@@ -224,10 +236,22 @@ private:
             for (const auto& k : kinks_) {
                 if (k.from <= from && to <= k.to) e.kink += T(k.size_from);
             }
+            for (const auto& each : misfits_) {
+                if (each.at == from) {
+                    e.jump[0] += T(each.offset);
+                    e.jump[1] += T(each.turn);
+                } else if (each.at == to && to == span_) {
+                    e.jump[2] -= T(each.offset);
+                    e.jump[3] -= T(each.turn);
+                }
+            }
             e.unknown = {nodes_[i][0], nodes_[i][2], nodes_[i + 1][0], nodes_[i + 1][1]};
             stiffen(e);
             for (std::size_t a = 0; a < 4; ++a) {
-                for (std::size_t b = 0; b < 4; ++b) coefficient(e.unknown[a], e.unknown[b]) += e.k[a][b];
+                for (std::size_t b = 0; b < 4; ++b) {
+                    coefficient(e.unknown[a], e.unknown[b]) += e.k[a][b];
+                    right_[e.unknown[a]] -= e.k[a][b] * e.jump[b];
+                }
                 right_[e.unknown[a]] -= e.fixed[a];
             }
             elements_.push_back(e);
@@ -326,7 +350,7 @@ private:
     std::array<T, 4> forces_on(const element& e) const {
         std::array<T, 4> ends = e.fixed;
         for (std::size_t a = 0; a < 4; ++a) {
-            for (std::size_t b = 0; b < 4; ++b) ends[a] += e.k[a][b] * moved_[e.unknown[b]];
+            for (std::size_t b = 0; b < 4; ++b) ends[a] += e.k[a][b] * (moved_[e.unknown[b]] + e.jump[b]);
         }
         return ends;
     }
@@ -336,6 +360,7 @@ private:
     std::vector<double> places_, hinges_;
     std::vector<sized> steps_, springs_, settlements_, forces_, couples_;
     std::vector<stretch> lines_, kinks_;
+    std::vector<misfit_at> misfits_;
     std::array<double, 2> turning_{0, 0};
     std::array<T, 2> turned_{};
 

@@ -22,6 +22,14 @@ struct acting_curvature {
     T size;
 };
 
+/// A lack of fit at one place: by how much the slope falls and the deflection grows there.
+template <class T>
+struct acting_misfit {
+    T at;
+    T kink;
+    T offset;
+};
+
 /// A force or couple at from = to, or a line load from size_from to size_to.
 template <class T>
 struct acting_load {
@@ -39,6 +47,7 @@ template <class T>
 struct acting_loads {
     std::vector<acting_load<T>> loads;
     std::vector<acting_curvature<T>> curvatures;
+    std::vector<acting_misfit<T>> misfits;
     T settlement_left{}, settlement_right{};
     T rotation_left{}, rotation_right{};
 
@@ -52,12 +61,13 @@ struct acting_loads {
         }
     }
 
-    /// Where loads, curvatures and the given steps of stiffness begin and end, and the ends of the beam, ascending.
+    /// Where loads, curvatures, lacks of fit and the given steps of stiffness begin and end, and the ends of the beam, ascending.
     [[nodiscard]] std::vector<T> joints(const T& beam_span, const std::vector<T>& steps) const {
         std::vector<T> places{T(0), beam_span};
         places.reserve(2 + 2 * (loads.size() + curvatures.size()) + steps.size());
         for (const auto& load : loads) places.insert(places.end(), {load.from, load.to});
         for (const auto& imposed : curvatures) places.insert(places.end(), {imposed.from, imposed.to});
+        for (const auto& misfit : misfits) places.push_back(misfit.at);
         places.insert(places.end(), steps.begin(), steps.end());
         std::sort(places.begin(), places.end());
         places.erase(std::unique(places.begin(), places.end()), places.end());
@@ -69,7 +79,11 @@ private:
     void add(const load_types::concentrated<Action, N>& load, const T&) {
         const T a = static_cast<T>(load.at().value());
         const T size = static_cast<T>(load.size().value());
-        loads.push_back({load.is_couple ? acting_kind::couple : acting_kind::point_force, a, a, size, size});
+        if constexpr (load.is_lack_of_fit) {
+            misfits.push_back({a, load.is_kink ? size : T(0), load.is_kink ? T(0) : size});
+        } else {
+            loads.push_back({load.is_couple ? acting_kind::couple : acting_kind::point_force, a, a, size, size});
+        }
     }
 
     template <class Load>

@@ -100,9 +100,9 @@ public:
         const auto s = std::min(x - from_, span());
         const auto& line = placed_.front();
         if constexpr (R == response::deflection) {
-            return line.deflection(s) + shear_deflection(s);
+            return line.deflection(s, inside(s, which)) + shear_deflection(s);
         } else if constexpr (R == response::slope) {
-            return line.slope(s) + as_angle((line.shear(s, inside(s, which)) - mean_shear()) * shear_flexibility_);
+            return line.slope(s, inside(s, which)) + as_angle((line.shear(s, inside(s, which)) - mean_shear()) * shear_flexibility_);
         } else if constexpr (R == response::moment) {
             return line.moment(s, inside(s, which));
         } else {

@@ -44,7 +44,11 @@ public:
     [[nodiscard]] quantity<dimension::length, T> deflection(const X& x) const {
         return answer<response::deflection>(x, just_right);
     }
-    /// Slope. Inside the beam side matters at hinges, and at point loads where the beam deforms in shear.
+    template <class X>
+    [[nodiscard]] quantity<dimension::length, T> deflection(const X& x, side which) const {
+        return answer<response::deflection>(x, which);
+    }
+    /// Slope. Inside the beam side matters at hinges and kinks, and at point loads where the beam deforms in shear.
     template <class X>
     [[nodiscard]] quantity<dimension::plane_angle, T> slope(const X& x, side which = just_right) const {
         return answer<response::slope>(x, which);
@@ -285,8 +289,10 @@ void continuous_line<T>::solve() {
             equations(v(near), M(near)) -= b / L;
             equations.right_hand_side(v(near)) -= b * reaction * L0 * L0 / EI0;
         };
-        join(i, i + 1, 1, loaded.slope(quantity<dimension::length, T>{}).value(), loaded.reaction(end::left).value());
-        join(i + 1, i, -1, loaded.slope(p.span()).value(), loaded.reaction(end::right).value());
+        // A kink that stands right at a node lies between the slope of the node and that of the part.
+        const quantity<dimension::length, T> start{};
+        join(i, i + 1, 1, loaded.slope(start, just_left).value(), loaded.reaction(end::left).value());
+        join(i + 1, i, -1, loaded.slope(p.span(), just_right).value(), loaded.reaction(end::right).value());
     }
 
     std::vector<T> unknowns;

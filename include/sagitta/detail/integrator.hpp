@@ -42,6 +42,7 @@ public:
         joints_ = acting.joints(span, steps);
         make_panels(joints_);
         if constexpr (!is_prismatic) refine(tolerance);
+        insert_misfits(acting);
         solve_redundants(acting);
         march(acting);
     }
@@ -59,9 +60,10 @@ public:
     /// The equilibrium side of it: shear, moment, loads.
     [[nodiscard]] const balanced_beam<Left, Right, T>& balance() const { return balance_; }
 
-    [[nodiscard]] slope_and_deflection<T> state_at(const T& x) const {
-        const panel& p = panel_of(x);
-        if (x == p.from) return p.at_from;
+    /// Just left or just right of x where a lack of fit makes them jump.
+    [[nodiscard]] slope_and_deflection<T> state_at(const T& x, side which) const {
+        const panel& p = panel_of(x, which);
+        if (x == p.from && (p.from < p.to || which == side::just_left)) return p.at_from;
         if (x == p.to) return p.at_to;
         if constexpr (carried_by_both) {
             return between_supports(x, p.left_of_it + about_left(p.from, bending(p.from, x)),
@@ -73,13 +75,15 @@ public:
         }
     }
 
-    /// Moments of the curvature about both ends of a stretch that may cross panels.
+    /// Moments of the curvature about both ends of a stretch that may cross panels. Of a lack of fit at one of them it
+    /// takes what elastic lines answer for by default: the one at b, unless b is the end of the beam.
     [[nodiscard]] panel_moments<T> curvature_between(const T& a, const T& b) const {
         panel_moments<T> sum;
         for (const auto& p : panels_) {
             const T from = std::max(a, p.from);
             const T to = std::min(b, p.to);
-            if (!(from < to)) continue;
+            const bool is_misfit_between = p.from == p.to && a < p.from && p.from <= b && p.from < L_;
+            if (!(from < to) && !is_misfit_between) continue;
             const bool is_whole = from == p.from && to == p.to;
             const auto part = is_whole ? p.curvature : bending(from, to);
             sum.area += part.area;
@@ -110,6 +114,7 @@ private:
 
     using deflected = slope_and_deflection<T>;
 
+    /// A stretch without joints, or a lack of fit: a place (from = to) whose curvature is concentrated there.
     struct panel {
         T from, to;
         panel_moments<T> curvature{};
@@ -152,6 +157,20 @@ private:
         }
     }
 
+    /// A kink is curvature on no width; an offset is a pair of them, of no area but with a moment.
+    void insert_misfits(const acting_loads<T>& acting) {
+        for (const auto& misfit : acting.misfits) {
+            const auto here = std::find_if(panels_.begin(), panels_.end(),
+                                           [&](const panel& p) { return p.from >= misfit.at; });
+            panels_.insert(here, {misfit.at, misfit.at, {misfit.kink, misfit.offset, -misfit.offset}});
+        }
+    }
+    void integrate_curvature() {
+        for (auto& p : panels_) {
+            if (p.from < p.to) p.curvature = bending(p.from, p.to);
+        }
+    }
+
     /// Stiffness that varies: panels narrow enough for the curvatures of the loads and of the unit redundants.
     void refine(const T& tolerance) {
         // The unit redundants matter only where there are any: a beam tapered to a point may have none.
@@ -189,7 +208,7 @@ private:
     /// Compatibility at clamped ends. The virtual moment that falls linearly from 1 at one end to 0 at the
     /// other does on the curvature the work (slope of that end) - (slope of the chord).
     void solve_redundants(const acting_loads<T>& acting) {
-        for (auto& p : panels_) p.curvature = bending(p.from, p.to);
+        integrate_curvature();
         if constexpr (left_guided || right_guided) {
             const auto balance_everywhere = [&](const T& moment) { balance_.set_redundants(moment, moment); };
             if constexpr (Left::against_rotation && Right::against_rotation) {
@@ -204,7 +223,7 @@ private:
                 const section pinned{left_guided ? L_ : T(0)};
                 balance_everywhere(-balance_.statics_at(pinned, left_guided ? just_right : just_left).moment);
             }
-            for (auto& p : panels_) p.curvature = bending(p.from, p.to);
+            integrate_curvature();
         }
         if constexpr (left_redundant || right_redundant) {
             const auto of_panel = [](const panel& p) -> const panel_moments<T>& { return p.curvature; };
@@ -229,7 +248,7 @@ private:
             } else {
                 balance_.set_redundants(T(0), gap_right / work(unit_right, T(0), T(1)));
             }
-            for (auto& p : panels_) p.curvature = bending(p.from, p.to);
+            integrate_curvature();
         }
     }
 
@@ -298,7 +317,12 @@ private:
         return {stop.slope + c.area, stop.deflection - stop.slope * width - c.about_from};
     }
 
-    const panel& panel_of(const T& x) const {
+    /// The panel that x lies in; where one panel ends and another begins, what lies on that side of all that is there.
+    const panel& panel_of(const T& x, side which) const {
+        if (which == side::just_left) {
+            return *std::lower_bound(panels_.begin(), panels_.end(), x,
+                                     [](const panel& p, const T& place) { return p.to < place; });
+        }
         const auto after = std::upper_bound(panels_.begin(), panels_.end(), x,
                                             [](const T& place, const panel& p) { return place < p.from; });
         return *std::prev(after);

@@ -40,22 +40,31 @@ struct stretch {
 struct whole_beam {};
 
 /// What acts at one place, and how an end is moved. (Short tags: they keep the compiler's messages short.)
-enum class action { point_force, couple };
+enum class action { point_force, couple, kink, offset };
 enum class motion { settlement, rotation };
 
-/// A force or a couple at one place.
+/// What acts at one place: a force, a couple, or a lack of fit (kink, offset).
 template <action Action, class T>
 class concentrated {
 public:
     using number = T;
     static constexpr bool is_couple = Action == action::couple;
-    using unit = std::conditional_t<is_couple, moment, force>;
+    static constexpr bool is_kink = Action == action::kink;
+    static constexpr bool is_offset = Action == action::offset;
+    /// Whether it imposes a deformation instead of a force.
+    static constexpr bool is_lack_of_fit = is_kink || is_offset;
+    using unit = std::conditional_t<
+        is_couple, moment, std::conditional_t<is_kink, plane_angle, std::conditional_t<is_offset, length, force>>>;
 
     constexpr concentrated(const quantity<unit, T>& size, const position<T>& where) : size_(size), where_(where) {
-        detail::require_finite(is_couple ? "applied_couple: size" : "point_load: size", size);
+        detail::require_finite(is_couple   ? "applied_couple: size"
+                               : is_kink   ? "imposed_kink: size"
+                               : is_offset ? "imposed_offset: size"
+                                           : "point_load: size",
+                               size);
     }
 
-    /// Downward force or clockwise couple.
+    /// Downward force, clockwise couple, kink that makes the beam sag, or offset of the right part downward.
     [[nodiscard]] constexpr const quantity<unit, T>& size() const { return size_; }
     [[nodiscard]] constexpr const quantity<length, T>& at() const { return where_.x; }
     [[nodiscard]] constexpr concentrated scaled(const T& factor) const { return {size_ * factor, where_}; }

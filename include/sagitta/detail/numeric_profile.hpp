@@ -20,10 +20,11 @@ public:
 
     T operator()(const T& t) const {
         const auto x = place(t);
+        const side inside = x < to_ ? just_right : just_left;
         if constexpr (R == response::deflection) {
-            return line_.deflection(x).value();
+            return line_.deflection(x, inside).value();
         } else {
-            return line_.slope(x).value();
+            return line_.slope(x, inside).value();
         }
     }
 

@@ -37,6 +37,9 @@ struct effect_sums {
     Imposed imposed;
 };
 
+template <class Effect>
+inline constexpr bool is_lack_of_fit = requires { requires Effect::is_lack_of_fit; };
+
 /// The effects of loads known when compiling: a tuple, no allocation.
 template <class Beam, class Loads>
 class superposition;
@@ -62,6 +65,9 @@ public:
         return sums_over<Sum>(response_of, all{});
     }
 
+    /// Whether deflection or slope may jump anywhere.
+    static constexpr bool may_jump() { return has_lack_of_fit(std::type_identity<effects>{}); }
+
     /// The places where the elastic line changes its polynomial, both ends included, ascending.
     constexpr auto joints(const seen_beam& b) const {
         return std::apply(
@@ -80,6 +86,10 @@ private:
     template <class... L>
     static std::tuple<effect_of<L>...> effects_of(const std::tuple<L...>&);
     using effects = decltype(effects_of(load_types::cases_of(std::declval<const Loads&>())));
+    template <class... E>
+    static constexpr bool has_lack_of_fit(std::type_identity<std::tuple<E...>>) {
+        return (... || is_lack_of_fit<E>);
+    }
     using all = std::make_index_sequence<std::tuple_size_v<effects>>;
 
     template <class Cases, std::size_t... i>
@@ -127,6 +137,7 @@ class superposition<prismatic_beam<Left, Right, N>, load_list<M>> {
 public:
     using number = std::common_type_t<N, M>;
     using seen_beam = unit_beam<number>;
+    static constexpr bool may_jump() { return true; }
 
     superposition(const seen_beam& b, const load_list<M>& list) {
         effects_.reserve(list.cases().size());
