@@ -114,6 +114,30 @@ public:
         return *this;
     }
 
+    /// The same beam with its supports where they would be without settling.
+    [[nodiscard]] continuous_beam unsettled() const {
+        continuous_beam level = *this;
+        for (auto& n : level.nodes_) n.settled = T(0);
+        return level;
+    }
+    template <class X>
+    [[nodiscard]] bool is_supported_at(const X& x) const {
+        const auto place = on_beam(x);
+        const auto here = node_behind(place);
+        return here->at == place && here->is_support;
+    }
+    /// The stretches between neighbouring supports and, where the ends are not supported, the overhangs.
+    [[nodiscard]] std::vector<load_types::stretch<T>> spans() const {
+        std::vector<load_types::stretch<T>> all;
+        auto from = nodes_.front().at;
+        for (const auto& n : nodes_) {
+            if (!(from < n.at) || !(n.is_support || n.at == L_)) continue;
+            all.push_back({from, n.at});
+            from = n.at;
+        }
+        return all;
+    }
+
     [[nodiscard]] const quantity<dimension::length, T>& span() const { return L_; }
     [[nodiscard]] const std::vector<detail::node<T>>& nodes() const { return nodes_; }
     [[nodiscard]] const auto& shear_flexibility() const { return shear_flexibility_; }
@@ -196,10 +220,15 @@ private:
         return std::is_same_v<End, end::left_end> ? nodes_.front() : nodes_.back();
     }
 
+    /// The node at a place, or the next one behind it.
+    auto node_behind(const quantity<dimension::length, T>& place) const {
+        return std::lower_bound(nodes_.cbegin(), nodes_.cend(), place,
+                                [](const node_type& n, const auto& x) { return n.at < x; });
+    }
+
     /// The node at a place, made if there is none.
     node_type& node_at(const quantity<dimension::length, T>& place) {
-        const auto here = std::lower_bound(nodes_.begin(), nodes_.end(), place,
-                                           [](const node_type& n, const auto& x) { return n.at < x; });
+        const auto here = nodes_.begin() + (node_behind(place) - nodes_.cbegin());
         return here->at == place ? *here : *nodes_.insert(here, node_type{place});
     }
 

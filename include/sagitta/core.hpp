@@ -8,10 +8,13 @@
 #include <sagitta/elastic_line.hpp>
 #include <sagitta/ends.hpp>
 #include <sagitta/extremes.hpp>
+#include <sagitta/influence_line.hpp>
 #include <sagitta/invalid_input.hpp>
 #include <sagitta/load.hpp>
 #include <sagitta/load_list.hpp>
+#include <sagitta/load_train.hpp>
 #include <sagitta/moment_area.hpp>
+#include <sagitta/pattern_loading.hpp>
 #include <sagitta/piecewise.hpp>
 #include <sagitta/series.hpp>
 #include <sagitta/shear_flexible.hpp>

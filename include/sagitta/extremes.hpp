@@ -71,26 +71,25 @@ constexpr void for_each_candidate(const Line& line, const quantity<dimension::le
     });
 }
 
-/// The greatest of the values offered. Where a joint and a turning point beside it differ by rounding only, the
-/// turning point is the place; of equal values the first.
-template <class Dimension, class T>
+/// Whatever was offered with the greatest size. Where a joint and a turning point beside it differ by rounding only,
+/// the turning point is taken; of equal sizes the first.
+template <class Found, class T>
 class greatest_of {
 public:
-    constexpr void offer(const quantity<dimension::length, T>& x, const quantity<Dimension, T>& value, const T& size,
-                         bool turns) {
+    constexpr void offer(const Found& offered, const T& size, bool turns) {
         const T magnitude = size_ < T(0) ? -size_ : size_;
         const T rounding = magnitude * (T(8) * std::numeric_limits<T>::epsilon());
         const T lead = turns == turns_ ? T(0) : turns ? -rounding : rounding;
         if (!empty_ && !(size > size_ + lead)) return;
-        found_ = {x, value};
+        found_ = offered;
         size_ = size;
         turns_ = turns;
         empty_ = false;
     }
-    [[nodiscard]] constexpr const extreme<Dimension, T>& found() const { return found_; }
+    [[nodiscard]] constexpr const Found& found() const { return found_; }
 
 private:
-    extreme<Dimension, T> found_{};
+    Found found_{};
     T size_{};
     bool turns_ = false;
     bool empty_ = true;
@@ -100,11 +99,12 @@ template <response R, class Line>
 constexpr auto extremes_between(const Line& line, const quantity<dimension::length, typename Line::number>& first,
                                 const quantity<dimension::length, typename Line::number>& last) {
     using T = typename in_order<typename Line::number>::number;
-    greatest_of<unit_of_response<R>, T> greatest, least;
+    using found = extreme<unit_of_response<R>, T>;
+    greatest_of<found, T> greatest, least;
     for_each_candidate<R>(line, first, last,
                           [&](const quantity<dimension::length, T>& x, const auto& value, bool turns) {
-                              greatest.offer(x, value, value.value(), turns);
-                              least.offer(x, value, -value.value(), turns);
+                              greatest.offer({x, value}, value.value(), turns);
+                              least.offer({x, value}, -value.value(), turns);
                           });
     return extreme_pair<unit_of_response<R>, T>{greatest.found(), least.found()};
 }
@@ -158,11 +158,11 @@ template <class Line>
 [[nodiscard]] constexpr auto greatest_deflection(const Line& line) {
     static_assert(detail::is_line<Line>, "sagitta: an elastic line is expected here: beam.under(loads)");
     using T = typename detail::in_order<typename Line::number>::number;
-    detail::greatest_of<dimension::length, T> greatest;
+    detail::greatest_of<extreme<dimension::length, T>, T> greatest;
     detail::for_each_candidate<detail::response::deflection>(
         line, {}, line.supported().span(),
         [&](const quantity<dimension::length, T>& x, const quantity<dimension::length, T>& v, bool turns) {
-            greatest.offer(x, v, abs(v).value(), turns);
+            greatest.offer({x, v}, abs(v).value(), turns);
         });
     return greatest.found();
 }

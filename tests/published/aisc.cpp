@@ -298,28 +298,31 @@ TEST_CASE("AISC diagram 32: simple span with end moments, uniform load") {
 TEST_CASE("AISC diagrams 40 to 42: moving loads on a simple beam, at their worst place") {
     for (const auto& b : beams) {
         const auto [l, EI, w, P, P2] = b;
-        const auto under_one = [&, load = P](double x) { return moment(simple(b).under(point(load, x)), x); };
-        row(aisc, "40a: max moment under one load").equals(P * l / 4, under_one(l / 2));
-        CHECK(std::abs(maximum(under_one, 0.2 * l, 0.9 * l).at - l / 2) < 1e-6 * l);
+        // The greatest moment under a load while the train moves: at the section at x, of all positions.
+        const auto worst_at = [&](double x, const sagitta::load_train<>& train) {
+            return sagitta::extremes_of_train(sagitta::influence_of_moment(simple(b), x * m), train).greatest;
+        };
+        const sagitta::load_train<> one{{P * N, 0.0 * m}};
+        row(aisc, "40a: max moment under one load").equals(P * l / 4, worst_at(l / 2, one).value / (N * m));
+        CHECK(worst_at(0.49 * l, one).value < worst_at(l / 2, one).value);
+        CHECK(worst_at(0.51 * l, one).value < worst_at(l / 2, one).value);
 
         for (const double f : {1.0 / 3, 0.05, 0.2, 0.4, 0.55}) {
             const double a = f * l;
-            const auto under_first = [&, first = P](double second, double x) {
-                return moment(simple(b).under(point(first, x) + point(second, x + a)), x);
+            const auto check = [&](const row& published, double second, double value) {
+                const sagitta::load_train<> two{{P * N, 0.0 * m}, {second * N, a * m}};
+                // The published section is the worst one within reach, and the first load stands right over it.
+                const double x = (l - second * a / (P + second)) / 2;
+                const auto worst = worst_at(x, two);
+                published.equals(value, worst.value / (N * m));
+                CHECK(worst.at / m == doctest::Approx(x).epsilon(1e-12));
+                CHECK(worst_at(x - l / 100, two).value < worst.value);
+                CHECK(worst_at(x + l / 100, two).value < worst.value);
             };
-            // The loads stand where the published place is the worst one within reach: a little to either side
-            // the moment under the first load is less.
-            const row two_equal(aisc, "41a: max moment under two equal loads, a < 0.586 l");
-            double x = (l - a / 2) / 2;
-            two_equal.equals(P * std::pow(l - a / 2, 2) / (2 * l), under_first(P, x));
-            CHECK(under_first(P, x - l / 100) < under_first(P, x));
-            CHECK(under_first(P, x + l / 100) < under_first(P, x));
-
-            const row two_unequal(aisc, "42a: moment under the larger of two loads");
-            x = (l - P2 * a / (P + P2)) / 2;
-            two_unequal.equals((P + P2) * x * x / l, under_first(P2, x));
-            CHECK(under_first(P2, x - l / 100) < under_first(P2, x));
-            CHECK(under_first(P2, x + l / 100) < under_first(P2, x));
+            const double x = (l - P2 * a / (P + P2)) / 2;
+            check(row(aisc, "41a: max moment under two equal loads, a < 0.586 l"), P,
+                  P * std::pow(l - a / 2, 2) / (2 * l));
+            check(row(aisc, "42a: moment under the larger of two loads"), P2, (P + P2) * x * x / l);
         }
     }
 }

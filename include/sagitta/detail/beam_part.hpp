@@ -94,15 +94,15 @@ public:
         M_right_ = M_right;
     }
 
-    /// A response at x of the whole beam. At the ends of the part: the value inside it.
+    /// A response at x of the whole beam. At the ends of the part moment and shear are those inside it.
     template <response R>
     [[nodiscard]] response_quantity<R, T> at(const quantity<length, T>& x, side which) const {
         const auto s = std::min(x - from_, span());
         const auto& line = placed_.front();
         if constexpr (R == response::deflection) {
-            return line.deflection(s, inside(s, which)) + shear_deflection(s);
+            return line.deflection(s, which) + shear_deflection(s);
         } else if constexpr (R == response::slope) {
-            return line.slope(s, inside(s, which)) + as_angle((line.shear(s, inside(s, which)) - mean_shear()) * shear_flexibility_);
+            return line.slope(s, which) + as_angle((line.shear(s, inside(s, which)) - mean_shear()) * shear_flexibility_);
         } else if constexpr (R == response::moment) {
             return line.moment(s, inside(s, which));
         } else {

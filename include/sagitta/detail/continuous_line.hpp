@@ -42,7 +42,8 @@ public:
 
     template <class X>
     [[nodiscard]] quantity<dimension::length, T> deflection(const X& x) const {
-        return answer<response::deflection>(x, just_right);
+        const auto place = on_beam(x);
+        return answer<response::deflection>(place, inner_side(place));
     }
     template <class X>
     [[nodiscard]] quantity<dimension::length, T> deflection(const X& x, side which) const {
@@ -50,7 +51,12 @@ public:
     }
     /// Slope. Inside the beam side matters at hinges and kinks, and at point loads where the beam deforms in shear.
     template <class X>
-    [[nodiscard]] quantity<dimension::plane_angle, T> slope(const X& x, side which = just_right) const {
+    [[nodiscard]] quantity<dimension::plane_angle, T> slope(const X& x) const {
+        const auto place = on_beam(x);
+        return answer<response::slope>(place, inner_side(place));
+    }
+    template <class X>
+    [[nodiscard]] quantity<dimension::plane_angle, T> slope(const X& x, side which) const {
         return answer<response::slope>(x, which);
     }
     template <class X>
@@ -79,12 +85,12 @@ public:
     template <class X>
     [[nodiscard]] quantity<dimension::line_load, T> load(const X& x) const {
         const auto place = on_beam(x);
-        return load(place, place < beam_.span() ? just_right : just_left);
+        return load(place, inner_side(place));
     }
     template <class X>
     [[nodiscard]] quantity<dimension::curvature, T> imposed_curvature(const X& x) const {
         const auto place = on_beam(x);
-        return imposed_curvature(place, place < beam_.span() ? just_right : just_left);
+        return imposed_curvature(place, inner_side(place));
     }
     template <class X>
     [[nodiscard]] quantity<dimension::line_load, T> load(const X& x, side which) const {
@@ -141,6 +147,9 @@ private:
         return place;
     }
 
+    side inner_side(const quantity<dimension::length, T>& x) const {
+        return x < beam_.span() ? just_right : just_left;
+    }
     bool is_left_end(const quantity<dimension::length, T>& x, side which) const {
         return which == side::just_left && !(x > quantity<dimension::length, T>{});
     }
