@@ -1,5 +1,5 @@
 // A part of a longer beam between two neighbouring nodes: a simple beam under its share of the loads, whose ends
-// carry moments and move. No formula of its own: end moments are couples, end movements settlements.
+// carry moments and move. End moments are couples on it; how its ends have moved is a straight line.
 #pragma once
 
 #include <sagitta/beam.hpp>
@@ -17,6 +17,7 @@ template <class T>
 class beam_part {
 public:
     using simple = prismatic_beam<held::pinned, held::pinned, T>;
+    using couple = load_types::concentrated<load_types::action::couple, T>;
     using inverse_force = typename boost::units::divide_typeof_helper<dimensionless, force>::type;
 
     beam_part(const quantity<length, T>& from, const quantity<length, T>& to, const quantity<flexural_rigidity, T>& EI,
@@ -80,46 +81,49 @@ public:
         return as_angle(sum_of_couples(span(), side::just_right) / span() * shear_flexibility_);
     }
 
-    /// Fixes the part in the whole beam: sagging moments at its ends and how far they have moved down.
+    /// Fixes the part in the whole beam: sagging moments at its ends and how far these have moved down; and, as solved
+    /// for and not as a difference of those, the tilt of its chord and the shear that the end moments make.
     void place(const quantity<moment, T>& M_left, const quantity<moment, T>& M_right, const quantity<length, T>& v_left,
-               const quantity<length, T>& v_right) {
-        auto all = loads_;
-        using couple = load_types::concentrated<load_types::action::couple, T>;
-        all += couple(M_left, {quantity<length, T>{}});
-        all += couple(-M_right, {span()});
-        all += load_types::movement<end::left_end, load_types::motion::settlement, T>(v_left);
-        all += load_types::movement<end::right_end, load_types::motion::settlement, T>(v_right);
-        placed_.emplace_back(beam_, all);
+               const quantity<length, T>& v_right, const quantity<plane_angle, T>& tilt,
+               const quantity<force, T>& shear) {
+        loaded_.emplace_back(beam_, loads_);
+        bent_.emplace_back(beam_, couple(M_left, {quantity<length, T>{}}) + couple(-M_right, {span()}));
         M_left_ = M_left;
-        M_right_ = M_right;
+        v_left_ = v_left;
+        v_right_ = v_right;
+        tilt_ = tilt;
+        shear_ = shear;
     }
 
     /// A response at x of the whole beam. At the ends of the part moment and shear are those inside it.
     template <response R>
     [[nodiscard]] response_quantity<R, T> at(const quantity<length, T>& x, side which) const {
         const auto s = std::min(x - from_, span());
-        const auto& line = placed_.front();
+        const auto& loaded = loaded_.front();
+        const auto& bent = bent_.front();
         if constexpr (R == response::deflection) {
-            return line.deflection(s, which) + shear_deflection(s);
+            const auto chord = v_left_ * ((span() - s) / span()) + v_right_ * (s / span());
+            return chord + (loaded.deflection(s, which) + bent.deflection(s) + shear_deflection(s));
         } else if constexpr (R == response::slope) {
-            return line.slope(s, which) + as_angle((line.shear(s, inside(s, which)) - mean_shear()) * shear_flexibility_);
+            const auto sliding = loaded.shear(s, inside(s, which)) + shear_ - mean_shear();
+            return tilt_ + (loaded.slope(s, which) + bent.slope(s) + as_angle(sliding * shear_flexibility_));
         } else if constexpr (R == response::moment) {
-            return line.moment(s, inside(s, which));
+            return loaded.moment(s, inside(s, which)) + bent.moment(s);
         } else {
-            return line.shear(s, inside(s, which));
+            return loaded.shear(s, inside(s, which)) + shear_;
         }
     }
     [[nodiscard]] quantity<line_load, T> load(const quantity<length, T>& x, side which) const {
-        return placed_.front().load(std::min(x - from_, span()), which);
+        return loaded_.front().load(std::min(x - from_, span()), which);
     }
     [[nodiscard]] quantity<curvature, T> imposed_curvature(const quantity<length, T>& x, side which) const {
-        return placed_.front().imposed_curvature(std::min(x - from_, span()), which);
+        return loaded_.front().imposed_curvature(std::min(x - from_, span()), which);
     }
     /// Shear at the ends of the part, loads that stand right there included.
-    [[nodiscard]] quantity<force, T> outer_shear_left() const { return placed_.front().reaction(end::left); }
-    [[nodiscard]] quantity<force, T> outer_shear_right() const { return -placed_.front().reaction(end::right); }
+    [[nodiscard]] quantity<force, T> outer_shear_left() const { return loaded_.front().reaction(end::left) + shear_; }
+    [[nodiscard]] quantity<force, T> outer_shear_right() const { return shear_ - loaded_.front().reaction(end::right); }
 
-    [[nodiscard]] auto joints() const { return placed_.front().joints(); }
+    [[nodiscard]] auto joints() const { return loaded_.front().joints(); }
 
 private:
     struct couple_at {
@@ -141,12 +145,12 @@ private:
     }
 
     quantity<force, T> mean_shear() const {
-        return (M_right_ - M_left_ - sum_of_couples(span(), side::just_right)) / span();
+        return shear_ - sum_of_couples(span(), side::just_right) / span();
     }
 
     /// The integral of (shear - mean shear)/kGA up to s. Zero at both ends of the part.
     quantity<length, T> shear_deflection(const quantity<length, T>& s) const {
-        const auto M = placed_.front().moment(s, inside(s, side::just_right));
+        const auto M = loaded_.front().moment(s, inside(s, side::just_right)) + bent_.front().moment(s);
         const auto risen = M - M_left_ - sum_of_couples(s, inside(s, side::just_right));
         return (risen - mean_shear() * s) * shear_flexibility_;
     }
@@ -156,8 +160,13 @@ private:
     quantity<inverse_force, T> shear_flexibility_;
     load_list<T> loads_;
     std::vector<couple_at> couples_;
-    std::vector<elastic_line<simple, load_list<T>>> placed_;  // one, once placed
-    quantity<moment, T> M_left_{}, M_right_{};
+    // One of each, once placed: under the loads, and under the end moments.
+    std::vector<elastic_line<simple, load_list<T>>> loaded_;
+    std::vector<elastic_line<simple, load_types::load_sum<couple, couple>>> bent_;
+    quantity<moment, T> M_left_{};
+    quantity<length, T> v_left_{}, v_right_{};
+    quantity<plane_angle, T> tilt_{};
+    quantity<force, T> shear_{};
 };
 
 }  // namespace sagitta::detail
