@@ -8,11 +8,13 @@
 #include <sagitta/elastic_line.hpp>
 #include <sagitta/ends.hpp>
 #include <sagitta/extremes.hpp>
+#include <sagitta/force_method.hpp>
 #include <sagitta/invalid_input.hpp>
 #include <sagitta/load.hpp>
 #include <sagitta/load_list.hpp>
 #include <sagitta/moment_area.hpp>
 #include <sagitta/piecewise.hpp>
+#include <sagitta/release.hpp>
 #include <sagitta/series.hpp>
 #include <sagitta/shear_flexible.hpp>
 #include <sagitta/tolerance_not_reached.hpp>
