@@ -17,7 +17,6 @@
 #include <sagitta/units.hpp>
 
 #include <cstddef>
-#include <tuple>
 #include <type_traits>
 #include <utility>
 
@@ -33,15 +32,25 @@ inline constexpr bool is_release_list = false;
 template <class T>
 inline constexpr bool is_release_list<release_list<T>> = true;
 
-template <class... R>
+/// One by one as a pack, or the list. What is wrong is answered by one sentence, and replaced by something harmless.
+template <class Released, class... R>
 constexpr auto releases_of(const R&... each) {
+    constexpr bool is_structure = requires(const Released& released) { released.span(); };
+    static_assert(is_structure,
+                  "sagitta: a released structure is expected here: a simple_beam, a cantilever, a continuous_beam ...");
     constexpr bool one_by_one = sizeof...(R) > 0 && (... && release_types::is_release<R>);
     constexpr bool in_a_list = sizeof...(R) == 1 && (... && is_release_list<R>);
     constexpr bool right = one_by_one || in_a_list;
     static_assert(right,
                   "sagitta: a force method takes a released structure and releases, such as translation_at(6.0*m), or "
                   "one release_list");
-    if constexpr (one_by_one) {
+    constexpr bool has_the_hinges = (... && takes_release<Released, R>);
+    static_assert(has_the_hinges,
+                  "sagitta: a relative rotation needs a hinge, which of the released structures only a continuous_beam "
+                  "has");
+    if constexpr (!right || !has_the_hinges) {
+        return release_types::release_pack(release_types::release_at<release_types::kind::rotation>(0.0 * units::m));
+    } else if constexpr (one_by_one) {
         return release_types::release_pack<R...>(each...);
     } else {
         return (each, ...);
@@ -66,7 +75,9 @@ public:
     /// releases before it.
     template <class... R>
     constexpr explicit force_method(const Released& released, const R&... releases)
-        : released_(released), f_(detail::releases_of(releases...)), equations_(f_.releases(), coefficients()) {
+        : released_(released),
+          f_(detail::releases_of<Released>(releases...)),
+          equations_(f_.releases(), coefficients()) {
         if (equations_.undetermined() < f_.releases().size()) [[unlikely]] {
             f_.releases().for_each([&](std::size_t i, const auto& r) {
                 if (i == equations_.undetermined())
@@ -92,11 +103,11 @@ public:
     template <std::size_t i>
     [[nodiscard]] constexpr auto unit_line() const {
         detail::expect_release<Releases, i>();
-        return detail::line_under_unit(detail::unmoved(released_), releases().template get<i>());
+        return detail::line_under_unit<number>(detail::unmoved(released_), releases().template get<i>());
     }
     template <release_types::kind K>
     [[nodiscard]] auto unit_line(const release_index<K>& i) const {
-        return detail::line_under_unit(detail::unmoved(released_), releases().get(i));
+        return detail::line_under_unit<number>(detail::unmoved(released_), releases().get(i));
     }
 
 private:
@@ -110,10 +121,9 @@ private:
         const Released resting = detail::unmoved(released_);
         auto sum = releases().template values<number, 2>();
         const std::size_t n = releases().size();
-        releases().for_each(
-            [&](std::size_t, const auto& r) { detail::require_place<Releases::is_fixed>(released_, r); });
+        releases().for_each([&](std::size_t, const auto& r) { detail::require_place(released_, r); });
         detail::for_each_release<Released>(releases(), [&](std::size_t j, const auto& redundant) {
-            const auto line = detail::line_under_unit(resting, redundant);
+            const auto line = detail::line_under_unit<number>(resting, redundant);
             if (!detail::moves(line, redundant)) [[unlikely]]
                 refuse_release(redundant, "cannot be released: the released structure holds it");
             detail::for_each_release<Released>(releases(), [&](std::size_t i, const auto& r) {
@@ -132,7 +142,7 @@ private:
 
 template <class Released, class... R>
 force_method(const Released&, const R&...)
-    -> force_method<Released, decltype(detail::releases_of(std::declval<const R&>()...))>;
+    -> force_method<Released, decltype(detail::releases_of<Released>(std::declval<const R&>()...))>;
 
 /// What method.under(loads) returns: the steps of the calculation, in the order in which they are written down. The
 /// releases are counted from 0 (solved.redundant<0>()), or given by their index in a release_list.
@@ -257,7 +267,8 @@ private:
     }
     template <std::size_t i, class Dimension>
     static constexpr auto fixed(const numbers& from) {
-        return quantity<Dimension, number>::from_value(from[i]);
+        // An i beyond has been answered, and must not add errors of its own.
+        return quantity<Dimension, number>::from_value(from[i < Releases::size() ? i : 0]);
     }
     template <class Dimension, kind K>
     auto listed(const release_index<K>& i, const numbers& from) const {
@@ -280,8 +291,7 @@ private:
         Released closed = method_.released();
         detail::for_each_release<Released>(releases(), [&](std::size_t i, const auto& r) {
             if constexpr (std::decay_t<decltype(r)>::released == kind::relative_rotation) {
-                using T = typename Released::number;
-                detail::pass_on(closed, detail::coherent<dimension::length, T>(r.at()), redundants_[i]);
+                detail::pass_on(closed, detail::coherent<dimension::length, number>(r.at()), redundants_[i]);
             }
         });
         return closed;

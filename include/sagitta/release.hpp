@@ -58,22 +58,22 @@ public:
     template <class D>
     [[nodiscard]] constexpr auto prescribed(const D& by) const {
         using U = std::common_type_t<T, detail::common_number<D>>;
-        const auto movement = expect_displacement<U>(by);
-        detail::require_finite("prescribed: by", movement);
-        return release<K, U>(coherent<length, U>(at_), movement, coherent<flexibility<K, K>, U>(spring_flexibility_));
+        if constexpr (K == kind::translation) {
+            return moving(detail::expect_length<U>(by));
+        } else {
+            return moving(detail::expect_angle<U>(by));
+        }
     }
     /// A redundant that a spring takes. Its stiffness is a force per length for a translation, a moment per angle for
     /// a rotation; greater than 0, infinite: rigid.
     template <class S>
     [[nodiscard]] constexpr auto on_spring(const S& stiffness) const {
         using U = std::common_type_t<T, detail::common_number<S>>;
-        const auto k = expect_stiffness<U>(stiffness);
-        if (!(k.value() > U(0))) [[unlikely]]
-            detail::refuse("on_spring: stiffness", k, "must be greater than 0");
-        // Nothing is computed with an infinite stiffness: inf would spoil what a number carries besides its value.
-        const bool is_rigid = std::numeric_limits<U>::has_infinity && k.value() > std::numeric_limits<U>::max();
-        return release<K, U>(coherent<length, U>(at_), coherent<displacement<K>, U>(movement_),
-                             quantity<flexibility<K, K>, U>::from_value(is_rigid ? U(0) : U(1) / k.value()));
+        if constexpr (K == kind::translation) {
+            return sprung(detail::expect_spring_stiffness<U>(stiffness));
+        } else {
+            return sprung(detail::expect_rotational_stiffness<U>(stiffness));
+        }
     }
 
     [[nodiscard]] constexpr const quantity<length, T>& at() const { return at_; }
@@ -84,25 +84,21 @@ public:
     }
 
 private:
-    template <class Dimension, class U, class Q>
-    static constexpr quantity<Dimension, U> coherent(const Q& q) {
-        return detail::coherent<Dimension, U>(q);
+    using spring = flexibility<K, K>;
+
+    template <class U>
+    constexpr release<K, U> moving(const quantity<displacement<K>, U>& by) const {
+        detail::require_finite("prescribed: by", by);
+        return {detail::coherent<length, U>(at_), by, detail::coherent<spring, U>(spring_flexibility_)};
     }
-    template <class U, class D>
-    static constexpr auto expect_displacement(const D& d) {
-        if constexpr (K == kind::translation) {
-            return detail::expect_length<U>(d);
-        } else {
-            return detail::expect_angle<U>(d);
-        }
-    }
-    template <class U, class S>
-    static constexpr auto expect_stiffness(const S& k) {
-        if constexpr (K == kind::translation) {
-            return detail::expect_spring_stiffness<U>(k);
-        } else {
-            return detail::expect_rotational_stiffness<U>(k);
-        }
+    template <class Unit, class U>
+    constexpr release<K, U> sprung(const quantity<Unit, U>& k) const {
+        if (!(k.value() > U(0))) [[unlikely]]
+            detail::refuse("on_spring: stiffness", k, "must be greater than 0");
+        // Nothing is computed with an infinite stiffness: inf would spoil what a number carries besides its value.
+        const bool is_rigid = std::numeric_limits<U>::has_infinity && k.value() > std::numeric_limits<U>::max();
+        return {detail::coherent<length, U>(at_), detail::coherent<displacement<K>, U>(movement_),
+                quantity<spring, U>::from_value(is_rigid ? U(0) : U(1) / k.value())};
     }
 
     quantity<length, T> at_;
@@ -130,8 +126,9 @@ class release_pack {
 public:
     using number = std::common_type_t<typename R::number...>;
     static constexpr bool is_fixed = true;
+    static constexpr std::array kinds{R::released...};
     template <std::size_t i>
-    static constexpr kind kind_of = std::tuple_element_t<i, std::tuple<R...>>::released;
+    static constexpr kind kind_of = kinds[i < kinds.size() ? i : 0];
 
     constexpr explicit release_pack(const R&... each) : each_(each...) {}
 

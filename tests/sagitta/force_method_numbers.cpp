@@ -84,6 +84,11 @@ TEST_CASE("long double stays long double, and closes to its rounding") {
     CHECK(std::abs(line.deflection(5.0L * m).value()) < 32 * ulp * size);
     CHECK(std::abs(line.slope(0.0L * m).value()) < 32 * ulp * size);
     CHECK(solved.reciprocity_residual() < 16 * ulp);
+    // Also where only a place is a long double.
+    const auto third = 1.0L / 3;
+    const auto mixed = force_method(simple_beam(1.0 * m, 1.0 * N * m2), translation_at(third * m));
+    const long double expected = third * third * (1 - third) * (1 - third) / 3;
+    CHECK(std::abs(mixed.flexibility().coefficient<0, 0>().value() - expected) < 8 * ulp * expected);
     static_assert(std::is_same_v<decltype(force_method(simple_beam(7.0F * m, 8.0F * N * m2), translation_at(3.0F * m))
                                               .under(uniform_load(1.0F * N / m))
                                               .redundant<0>())::value_type,

@@ -41,12 +41,12 @@ released release_some(const scene::continuous& original, scene::chance& random) 
         r.beam.supports.erase(r.beam.supports.begin() + static_cast<std::ptrdiff_t>(i));
         note("; translation at ", support.at);
     }
-    for (const std::size_t end : {0, 1}) {
-        const double k = r.beam.turning[end];
+    for (std::size_t i = 0; i < 2; ++i) {
+        const double k = r.beam.turning[i];
         if (k == 0 || random.toss()) continue;
-        const double at = end == 0 ? 0 : original.L;
+        const double at = i == 0 ? 0 : original.L;
         r.releases.add(rotation_at(at * m).on_spring(k * N * m / rad));
-        r.beam.turning[end] = 0;
+        r.beam.turning[i] = 0;
         note("; rotation at ", at);
     }
     for (const auto& support : original.supports) {

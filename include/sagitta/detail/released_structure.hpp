@@ -21,9 +21,14 @@ concept has_hinges = requires(Structure s) {
     s.hinge_at(s.span(), quantity<moment, typename Structure::number>{});
 };
 
-/// Whether a structure can be released like this. Calls a function with the index and the release for each that can.
+/// Whether a structure can be released like this.
 template <class Structure, class R>
-inline constexpr bool takes_release = R::released != release_types::kind::relative_rotation || has_hinges<Structure>;
+inline constexpr bool takes_release = true;
+template <class Structure, class T>
+inline constexpr bool takes_release<Structure, release_types::release<release_types::kind::relative_rotation, T>> =
+    has_hinges<Structure>;
+
+/// Calls a function with the index and the release, for each that the structure takes.
 template <class Structure, class Releases, class Function>
 constexpr void for_each_release(const Releases& releases, const Function& f) {
     releases.for_each([&](std::size_t i, const auto& r) {
@@ -62,15 +67,15 @@ void pass_on(Structure& s, const quantity<length, T>& x, const T& size) {
     refuse("relative_rotation_at: x", x, "must be a place where the released structure has a hinge");
 }
 
-template <class Structure, release_types::kind K, class T>
-constexpr auto line_under_unit(const Structure& resting, const release_types::release<K, T>& r) {
+/// T: the number type of the unit.
+template <class T, class Structure, release_types::kind K, class N>
+constexpr auto line_under_unit(const Structure& resting, const release_types::release<K, N>& r) {
     if constexpr (K != release_types::kind::relative_rotation) {
-        return resting.under(redundant_load(r, typename Structure::number(1)));
+        return resting.under(redundant_load(r, T(1)));
     } else {
-        using number = typename Structure::number;
         Structure kinked = resting;
-        pass_on(kinked, coherent<length, number>(r.at()), number(1));
-        return kinked.under(load_list<number>{});
+        pass_on(kinked, coherent<length, T>(r.at()), T(1));
+        return kinked.under(load_list<T>{});
     }
 }
 
@@ -118,14 +123,9 @@ constexpr bool moves(const Line& line, const release_types::release<K, N>& r) {
     return displacement_in(line, r).value() > rounding_share<T>() * possible;
 }
 
-/// is_fixed: whether the kind is known when compiling, so that a wrong one can be refused then.
-template <bool is_fixed, class Structure, release_types::kind K, class N>
+template <class Structure, release_types::kind K, class N>
 constexpr void require_place(const Structure& released, const release_types::release<K, N>& r) {
-    constexpr bool right = takes_release<Structure, release_types::release<K, N>>;
-    static_assert(
-        right || !is_fixed,
-        "sagitta: a relative rotation needs a hinge; of the released structures only continuous_beam has them");
-    if (!right) [[unlikely]]
+    if constexpr (!takes_release<Structure, release_types::release<K, N>>)
         refuse(release_types::name_of<K>, r.at(),
                "must be a hinge, which of the released structures only a continuous_beam has");
     if (!(r.at() <= released.span())) [[unlikely]]

@@ -37,18 +37,18 @@ TEST_CASE("the pair of couples of a hinge sags it") {
     const auto hinged =
         continuous_beam(10.0 * m, EI).support_at(0.0 * m).support_at(4.0 * m).support_at(10.0 * m).hinge_at(4.0 * m);
     const auto release = relative_rotation_at(4.0 * m);
-    const auto line = detail::line_under_unit(hinged, release);
+    const auto line = detail::line_under_unit<double>(hinged, release);
     CHECK(line.moment(4.0 * m, just_left) / (N * m) == doctest::Approx(1).epsilon(1e-14));
     CHECK(line.moment(4.0 * m, just_right) / (N * m) == doctest::Approx(1).epsilon(1e-14));
     CHECK(detail::displacement_in(line, release) / rad == doctest::Approx(10.0 / 3 / 5e6).epsilon(1e-13));
-    CHECK_THROWS_WITH_AS((void)detail::line_under_unit(hinged, relative_rotation_at(3.0 * m)),
+    CHECK_THROWS_WITH_AS((void)detail::line_under_unit<double>(hinged, relative_rotation_at(3.0 * m)),
                          "relative_rotation_at: x = 3 m must be a place where the released structure has a hinge",
                          invalid_input);
 }
 
 TEST_CASE("what a support holds does not move, what stands close to it does") {
     const auto moves = [](const auto& beam, const auto& release) {
-        return detail::moves(detail::line_under_unit(beam, release), release);
+        return detail::moves(detail::line_under_unit<double>(beam, release), release);
     };
     constexpr auto simple = simple_beam(7.0 * m, EI);
     constexpr auto arm = cantilever(7.0 * m, EI);
