@@ -148,8 +148,9 @@ force_method(const Released&, const R&...)
 /// releases are counted from 0 (solved.redundant<0>()), or given by their index in a release_list.
 ///
 /// Accuracy in double: rounding of what the released structure and the redundants do each, of which the answer is the
-/// sum. Random beams released at random stay within 1e-11 of the greatest value of each response, nearly always; the
-/// digits are lost where the released structure is far softer than the original one.
+/// sum. Random beams released at random stay within 1e-11 of the greatest value of each response, nearly always; digits
+/// are lost where the released structure is far softer than the original one: supports taken away from a long beam of
+/// 20 equal spans leave 1e-11, of 100 spans 1e-8, whereas hinges over them lose none.
 template <class Released, class Releases, class Loads>
 class force_method_solution {
     using method = force_method<Released, Releases>;
