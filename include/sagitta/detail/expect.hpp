@@ -88,8 +88,7 @@ constexpr quantity<spring_stiffness, T> expect_spring_stiffness(const Q& q) {
 template <class T, class Q>
 constexpr quantity<rotational_stiffness, T> expect_rotational_stiffness(const Q& q) {
     constexpr bool right = has_dimension<Q, rotational_stiffness>;
-    static_assert(right,
-                  "sagitta: a rotational stiffness (moment per angle) is expected here, such as 500.0*kN*m/rad");
+    static_assert(right, "sagitta: a rotational stiffness (moment per angle) is expected here, such as 500.0*kN*m/rad");
     return coherent<rotational_stiffness, T>(q);
 }
 
