@@ -48,7 +48,7 @@ public:
     /// Supports it at x by a spring of a stiffness (force per length; 0 to infinite).
     template <class X, class S>
     continuous_beam& spring_at(const X& x, const S& stiffness) {
-        const T k = expect_stiffness(stiffness);
+        const T k = not_negative("spring_at: stiffness", detail::expect_spring_stiffness<T>(stiffness));
         return hold(on_beam(x), k);
     }
     /// Lets the support at x settle by a length (downward positive).
@@ -79,16 +79,27 @@ public:
     /// Holds an end against rotation by a spring of a stiffness (moment per angle; 0 to infinite).
     template <class End, class S>
     continuous_beam& turning_spring(End which, const S& stiffness) {
-        end_node(which).turning = expect_turning_stiffness(stiffness);
+        end_node(which).turning =
+            not_negative("turning_spring: stiffness", detail::expect_rotational_stiffness<T>(stiffness));
         return *this;
     }
     /// Makes a hinge at x: no moment is passed on there.
     template <class X>
     continuous_beam& hinge_at(const X& x) {
+        return hinge_at(x, quantity<dimension::moment, T>{});
+    }
+    /// Makes a hinge at x that passes on a given bending moment (force times length, sagging positive): a pair of
+    /// couples that acts on the parts left and right of it.
+    template <class X, class C>
+    continuous_beam& hinge_at(const X& x, const C& passing) {
         const auto place = on_beam(x);
+        const auto passed = detail::expect_moment<T>(passing);
         if (!(place > quantity<dimension::length, T>{} && place < L_)) [[unlikely]]
             detail::refuse("hinge_at: x", place, "must lie between the ends of the beam, 0 m and ", L_);
-        node_at(place).is_hinge = true;
+        detail::require_finite("hinge_at: passing", passed);
+        node_type& hinge = node_at(place);
+        hinge.is_hinge = true;
+        hinge.passed = passed.value();
         return *this;
     }
     /// From x on to the right, up to the next step, the flexural rigidity is this one.
@@ -114,11 +125,11 @@ public:
         return *this;
     }
 
-    /// The same beam with its supports where they would be without settling.
-    [[nodiscard]] continuous_beam unsettled() const {
-        continuous_beam level = *this;
-        for (auto& n : level.nodes_) n.settled = T(0);
-        return level;
+    /// The same beam before anything has moved it: no support has settled, no hinge passes a moment on.
+    [[nodiscard]] continuous_beam unmoved() const {
+        continuous_beam same = *this;
+        for (node_type& each : same.nodes_) each.settled = each.passed = T(0);
+        return same;
     }
     template <class X>
     [[nodiscard]] bool is_supported_at(const X& x) const {
@@ -173,18 +184,6 @@ private:
         if (!detail::is_positive(EI.value())) [[unlikely]]
             detail::refuse("EI", EI, "must be greater than 0 N*m^2 and finite");
         return EI;
-    }
-    template <class S>
-    static T expect_stiffness(const S& k) {
-        static_assert(detail::has_dimension<S, dimension::spring_stiffness>,
-                      "sagitta: a spring stiffness (force per length) is expected here, such as 8.0*kN/mm");
-        return not_negative("spring_at: stiffness", detail::coherent<dimension::spring_stiffness, T>(k));
-    }
-    template <class S>
-    static T expect_turning_stiffness(const S& k) {
-        static_assert(detail::has_dimension<S, dimension::rotational_stiffness>,
-                      "sagitta: a rotational stiffness (moment per angle) is expected here, such as 500.0*kN*m/rad");
-        return not_negative("turning_spring: stiffness", detail::coherent<dimension::rotational_stiffness, T>(k));
     }
     template <class Q>
     static T not_negative(const char* argument, const Q& k) {

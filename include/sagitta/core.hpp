@@ -8,6 +8,7 @@
 #include <sagitta/elastic_line.hpp>
 #include <sagitta/ends.hpp>
 #include <sagitta/extremes.hpp>
+#include <sagitta/force_method.hpp>
 #include <sagitta/influence_line.hpp>
 #include <sagitta/invalid_input.hpp>
 #include <sagitta/load.hpp>
@@ -16,6 +17,7 @@
 #include <sagitta/moment_area.hpp>
 #include <sagitta/pattern_loading.hpp>
 #include <sagitta/piecewise.hpp>
+#include <sagitta/release.hpp>
 #include <sagitta/series.hpp>
 #include <sagitta/shear_flexible.hpp>
 #include <sagitta/tolerance_not_reached.hpp>

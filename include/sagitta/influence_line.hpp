@@ -10,6 +10,7 @@
 
 #include <sagitta/detail/expect.hpp>
 #include <sagitta/detail/refuse.hpp>
+#include <sagitta/detail/released_structure.hpp>
 #include <sagitta/ends.hpp>
 #include <sagitta/load.hpp>
 #include <sagitta/load_list.hpp>
@@ -174,16 +175,6 @@ constexpr auto section_on(const Beam& b, const X& x) {
     return place;
 }
 
-/// The beam with its supports where they would be without settling: influence lines know no other movement.
-template <class Beam>
-constexpr auto level(const Beam& b) {
-    if constexpr (requires { b.unsettled(); }) {
-        return b.unsettled();
-    } else {
-        return b;
-    }
-}
-
 template <class Action, class Line, class Place>
 constexpr auto influence_line_of(const Line& deflected, const Place& x, side of_load) {
     return influence_line<Line, Action>(deflected, x, of_load);
@@ -205,7 +196,7 @@ template <class Beam, class X>
     using T = typename Beam::number;
     const auto place = detail::section_on(b, x);
     return detail::influence_line_of<dimension::moment>(
-        detail::level(b).under(imposed_kink(detail::unit_of<T, dimension::plane_angle>(), sagitta::at(place))), place,
+        detail::unmoved(b).under(imposed_kink(detail::unit_of<T, dimension::plane_angle>(), sagitta::at(place))), place,
         just_right);
 }
 
@@ -217,8 +208,8 @@ template <class Beam, class X>
     const auto offset = imposed_offset(detail::unit_of<T, dimension::length>(), sagitta::at(place));
     // A load right at the section stands on the other side of it.
     const side of_load = which == side::just_right ? just_left : just_right;
-    if constexpr (requires { b.unsettled(); }) {
-        auto moved = b.unsettled();
+    if constexpr (requires { b.unmoved(); }) {
+        auto moved = b.unmoved();
         // An offset right at an inner support moves the part right of it. Moved the other way, the support leaves only
         // the part left of it displaced.
         if (which == side::just_left && place < b.span() && b.is_supported_at(place)) {
@@ -241,7 +232,7 @@ template <class Beam, class X>
     using T = typename Beam::number;
     const auto place = detail::section_on(b, x);
     return detail::influence_line_of<dimension::length>(
-        detail::level(b).under(point_load(detail::unit_of<T, dimension::force>(), sagitta::at(place))), place,
+        detail::unmoved(b).under(point_load(detail::unit_of<T, dimension::force>(), sagitta::at(place))), place,
         just_right);
 }
 
@@ -256,12 +247,12 @@ template <class Beam, class Where>
     };
     if constexpr (is_left || std::is_same_v<Where, end::right_end>) {
         const auto sunk = settlement(where, detail::unit_of<T, dimension::length>());
-        return of(detail::level(b).under(sunk), is_left ? quantity<dimension::length, T>{} : b.span());
+        return of(detail::unmoved(b).under(sunk), is_left ? quantity<dimension::length, T>{} : b.span());
     } else {
-        constexpr bool has_places = requires { b.unsettled(); };
+        constexpr bool has_places = requires { b.unmoved(); };
         static_assert(has_places, "sagitta: a single span is supported at its ends: write end::left or end::right");
         const auto x = detail::section_on(b, where);
-        auto moved = detail::level(b);
+        auto moved = detail::unmoved(b);
         if constexpr (has_places) moved.settle_at(x, detail::unit_of<T, dimension::length>());
         return of(moved.under(load_list<T>{}), x);
     }

@@ -395,3 +395,44 @@ TEST_CASE("an infinite shear rigidity is none, to the bit") {
     }
     CHECK(a.reaction_at(11.0 * m) == b.reaction_at(11.0 * m));
 }
+
+TEST_CASE("a hinge that passes on the moment that stood there changes nothing") {
+    const auto loads = uniform_load(3.0 * kN / m) + point_load(9.0 * kN, at(4.0 * m)) + imposed_curvature(0.001 / m);
+    const auto whole = continuous_beam(13.0 * m, 7.0 * MN * m2)
+                           .clamp(end::left)
+                           .support_at(5.0 * m)
+                           .settle_at(5.0 * m, 3.0 * mm)
+                           .spring_at(11.0 * m, 3.0 * kN / mm)
+                           .rigidity_from(3.3 * m, 9.0 * MN * m2)
+                           .shear_rigidity(4.0 * MN);
+    const auto expected = whole.under(loads);
+    for (const double at_hinge : {2.0, 5.0, 8.5}) {  // in the span, over the support, in the next span
+        CAPTURE(at_hinge);
+        const auto x = at_hinge * m;
+        const auto line = continuous_beam(whole).hinge_at(x, expected.moment(x)).under(loads);
+        CHECK(line.moment(x) == expected.moment(x));
+        CHECK(line.moment(x, just_left) == expected.moment(x));
+        for (double place = 0; place <= 13; place += 0.5) {
+            CAPTURE(place);
+            CHECK(std::abs((line.deflection(place * m) - expected.deflection(place * m)) / m) < 1e-14);
+            CHECK(std::abs((line.slope(place * m) - expected.slope(place * m)) / rad) < 1e-14);
+            CHECK(std::abs((line.moment(place * m) - expected.moment(place * m)) / (kN * m)) < 1e-10);
+            CHECK(std::abs((line.shear(place * m) - expected.shear(place * m)) / kN) < 1e-10);
+        }
+        // The last description counts, and none passed on is a hinge as ever.
+        const auto plain = continuous_beam(whole).hinge_at(x, 5.0 * kN * m).hinge_at(x).under(loads);
+        CHECK(plain.moment(x) == 0.0 * kN * m);
+        CHECK(plain.moment(1.0 * m) == continuous_beam(whole).hinge_at(x).under(loads).moment(1.0 * m));
+    }
+    // By hand: two spans of l turn against each other by M (l + l)/3 EI (common practice, no source).
+    const auto spans =
+        continuous_beam(8.0 * m, 6.0 * MN * m2).support_at(0.0 * m).support_at(4.0 * m).support_at(8.0 * m);
+    const auto bent = continuous_beam(spans).hinge_at(4.0 * m, 9.0 * kN * m).under(load_list<>{});
+    CHECK(relative((bent.slope(4.0 * m, just_right) - bent.slope(4.0 * m, just_left)) / rad, 9e3 * 8 / 18e6) < 1e-13);
+    CHECK(relative(bent.reaction_at(4.0 * m) / kN, -2 * 9.0 / 4) < 1e-13);
+
+    // Unmoved: nothing but loads moves it.
+    const auto still = continuous_beam(spans).hinge_at(4.0 * m, 9.0 * kN * m).settle_at(8.0 * m, 5.0 * mm).unmoved();
+    CHECK(still.under(load_list<>{}).deflection(6.0 * m) == 0.0 * m);
+    CHECK(still.under(loads).moment(4.0 * m) == 0.0 * kN * m);
+}

@@ -156,6 +156,9 @@ TEST_CASE("places on the beam") {
 TEST_CASE("hinges lie between the ends") {
     CHECK_REFUSED(bare().hinge_at(0.0 * m), "hinge_at: x = 0 m", "between the ends", "10 m");
     CHECK_REFUSED(bare().hinge_at(10.0 * m), "hinge_at: x = 10 m", "between the ends", "10 m");
+    CHECK_REFUSED(bare().hinge_at(0.0 * m, 1.0 * kN * m), "hinge_at: x = 0 m", "between the ends", "10 m");
+    CHECK_REFUSED(bare().hinge_at(5.0 * m, not_a_number * N * m), "hinge_at: passing = nan N*m", "finite");
+    CHECK_REFUSED(bare().hinge_at(5.0 * m, infinity * N * m), "hinge_at: passing = inf N*m", "finite");
 }
 
 TEST_CASE("settlements of supports") {

@@ -273,6 +273,7 @@ void continuous_line<T>::solve() {
         if (here.is_hinge || (at_end && here.turning == T(0))) {
             turning_weight[i] = T(0);
             equations(M(i), M(i)) = T(1);
+            equations.right_hand_side(M(i)) = here.passed * L0 / EI0;
         } else if (at_end) {
             // A spring resists with the moment -k (turn - imposed) at the left end, with +k at the right one.
             turning_weight[i] = stiff(k_turning);
@@ -324,11 +325,12 @@ void continuous_line<T>::solve() {
         detail::refuse("continuous_beam: the place", nodes_[free_unknown / 4].at,
                        free_unknown % 4 == 0 ? "can turn freely: the beam is a mechanism"
                                              : "can move freely: the beam is a mechanism");
-    // What is known beforehand is exact: no moment in a hinge, no movement of a rigid support but its settlement.
+    // What is known beforehand is exact: the moment in a hinge, the movement of a rigid support.
     std::vector<quantity<dimension::length, T>> moved;
     for (std::size_t i = 0; i < count; ++i) {
         const T& weight = turning_weight[i];
-        M_.push_back(quantity<dimension::moment, T>::from_value(weight == T(0) ? T(0) : unknowns[M(i)] * EI0 / L0));
+        const T known = nodes_[i].passed;
+        M_.push_back(quantity<dimension::moment, T>::from_value(weight == T(0) ? known : unknowns[M(i)] * EI0 / L0));
         const T settled = nodes_[i].settled;
         moved.push_back(
             quantity<dimension::length, T>::from_value(balance_weight[i] == T(0) ? settled : unknowns[v(i)] * L0));

@@ -78,4 +78,18 @@ constexpr quantity<flexural_rigidity, T> expect_rigidity(const Q& q) {
     return coherent<flexural_rigidity, T>(q);
 }
 
+template <class T, class Q>
+constexpr quantity<spring_stiffness, T> expect_spring_stiffness(const Q& q) {
+    constexpr bool right = has_dimension<Q, spring_stiffness>;
+    static_assert(right, "sagitta: a spring stiffness (force per length) is expected here, such as 8.0*kN/mm");
+    return coherent<spring_stiffness, T>(q);
+}
+
+template <class T, class Q>
+constexpr quantity<rotational_stiffness, T> expect_rotational_stiffness(const Q& q) {
+    constexpr bool right = has_dimension<Q, rotational_stiffness>;
+    static_assert(right, "sagitta: a rotational stiffness (moment per angle) is expected here, such as 500.0*kN*m/rad");
+    return coherent<rotational_stiffness, T>(q);
+}
+
 }  // namespace sagitta::detail

@@ -13,6 +13,7 @@ struct node {
     T turning = T(0);         // N*m/rad, at the ends of the beam only
     T settled = T(0);         // m, downward
     T turned = T(0);          // rad, clockwise
+    T passed = T(0);          // N*m, sagging: what a hinge passes on
     bool is_support = false;  // has a reaction to report
     bool is_hinge = false;
 };

@@ -19,6 +19,8 @@ TEST_CASE("quantities pass, in the number type that is asked for") {
     static_assert(expect_line_load<double>(1.0 * kN / m) == 1.0 * kN / m);
     static_assert(expect_angle<double>(1.0 * deg) == 1.0 * deg);
     static_assert(expect_rigidity<double>(1.0 * GPa * cm4) == 1.0 * GPa * cm4);
+    static_assert(expect_spring_stiffness<double>(1.0 * kN / mm) == 1.0 * kN / mm);
+    static_assert(expect_rotational_stiffness<double>(1.0 * kN * m / rad) == 1.0 * kN * m / rad);
 }
 
 TEST_CASE("another unit of the dimension is converted, integers without loss") {

@@ -1,0 +1,11 @@
+// expect: there is no such release
+#include "twin.hpp"
+
+constexpr auto method = force_method(joist, translation_at(3.0 * m), rotation_at(0.0 * m));
+constexpr auto solved = method.under(dead);
+
+#ifdef WRONG
+constexpr auto X = solved.redundant<2>();
+#else
+constexpr auto X = solved.redundant<1>();
+#endif
