@@ -48,7 +48,7 @@ further columns with a name are noted and not read. Values carry their unit: 7.2
                     ends: fixed, pinned, free, or elastic and its stiffness: elastic 500 kN*m/rad (supported, and
                     held against rotation by that); limit: L/250 or the like, or a length
   supports.csv      mark,at,kind,stiffness,settlement
-                    further supports of a beam, between its ends or at a free end; this file may be missing
+                    hinges of a beam, and supports between its ends or at a free end; this file may be missing
                     pinned             at a place, rigid
                     spring             at a place, with a stiffness: 8 kN/mm
                     hinge              at a place between the ends: no moment is passed on
@@ -66,7 +66,7 @@ further columns with a name are noted and not read. Values carry their unit: 7.2
 
 A beam with a row in supports.csv, or with an elastic end, is a continuous one. It is held against its limit span by
 span: L of L/250 is the length of the span, of an overhang beyond the last support twice its length (common practice,
-no source); of a beam that only one end carries its length. Deflections are those from the undeformed beam, so a
+no source), of a beam carried by one end alone its length. Deflections are those from the undeformed beam, so a
 support that gives way moves the spans beside it. The table has a line for each span and for the reaction and moment
 at each support; results_spans.csv and results_supports.csv have them in every combination.
 

@@ -231,6 +231,14 @@ TEST_CASE("a settlement in supports.csv acts in every combination as it is, case
     CHECK(line.find(two(by_settlement + w * l * l / 8) + "\n") != std::string::npos);
 }
 
+TEST_CASE("a support that has settled deflects a beam without loads too") {
+    const auto of = results_of("pinned,pinned,7.2 m", "", "B,3.6 m,pinned,,3 mm\n");
+    CHECK(of.worst.greatest_deflection_mm == doctest::Approx(3).epsilon(precise));
+    CHECK(of.worst.at_m == doctest::Approx(3.6).epsilon(precise));
+    CHECK(says(table_line(of.ran.out, "B"), "all"));
+    CHECK(of.ran.out.find("(no load)") == std::string::npos);
+}
+
 TEST_CASE("elastic ends: between pinned and fixed") {
     const double L = 7.2;
     const double k = 5e6;  // N m/rad
