@@ -49,11 +49,21 @@ template <class Dimension>
     return value;
 }
 
-[[nodiscard]] std::optional<holding> read_holding(const input_row& row, std::size_t column, findings& found);
+/// How an end is held; its stiffness where it is elastic.
+struct end_holding {
+    holding how;
+    sagitta::quantity<sagitta::dimension::rotational_stiffness> stiffness{};
+};
+
+/// fixed, pinned, free, or elastic with its stiffness behind it.
+[[nodiscard]] std::optional<end_holding> read_holding(const input_row& row, std::size_t column, findings& found);
 
 /// L/250 or a length. Without a span (it was refused) only the shape of L/250 is checked.
-[[nodiscard]] std::optional<span_length> read_limit(const input_row& row, std::size_t column,
-                                                    const std::optional<span_length>& span, findings& found);
+[[nodiscard]] std::optional<deflection_limit> read_limit(const input_row& row, std::size_t column,
+                                                         const std::optional<span_length>& span, findings& found);
+
+/// Refuses a cell that is not empty; user is what does not use it, such as "a load of the kind point".
+void expect_empty(const input_row& row, std::size_t column, std::string_view user, findings& found);
 
 /// A finite number.
 [[nodiscard]] std::optional<double> read_factor(const input_row& row, std::size_t column, findings& found);

@@ -1,6 +1,7 @@
 // The computation: every beam in every combination.
 #pragma once
 
+#include "compute_combination.hpp"
 #include "findings.hpp"
 #include "model.hpp"
 #include "read_beams.hpp"
@@ -17,6 +18,13 @@ namespace beam_schedule {
 /// Closed forms and integration that differ by more are not to be trusted: rounding alone is below 1e-12.
 inline constexpr double plausible_cross_check = 1e-9;
 
+inline constexpr std::string_view results_head =
+    "mark,combination,greatest_deflection_mm,at_m,limit_mm,utilisation,verdict,cross_check\n";
+inline constexpr std::string_view spans_head =
+    "mark,combination,span,from_m,to_m,greatest_deflection_mm,at_m,limit_mm,utilisation,verdict\n";
+inline constexpr std::string_view supports_head =
+    "mark,combination,at_m,support,reaction_kN,moment_kNm,deflection_mm\n";
+
 enum class verdict {
     ok,
     exceeds,
@@ -27,25 +35,33 @@ enum class verdict {
 
 [[nodiscard]] std::string_view name_of(verdict v);
 
-/// A beam in one combination.
-struct utilised {
-    std::size_t combination = 0;
-    double deflection_mm = 0;
-    double at_m = 0;
-    double utilisation = 0;
+/// Least and greatest of the forces of a support in all combinations.
+struct support_range {
+    double least_reaction_kN, greatest_reaction_kN;
+    double least_moment_kNm, greatest_moment_kNm;
 };
 
 struct beam_outcome {
     verdict result = verdict::refused;
-    std::optional<utilised> governing;  // nothing where no combination could be computed
-    double cross_check = 0;             // the greatest of all combinations
+    std::optional<utilised> governing;    // nothing where no combination could be computed
+    std::vector<utilised> spans;          // of a continuous beam: what governs each span
+    std::vector<support_range> supports;  // likewise
+    double cross_check = 0;               // the greatest of all combinations
+    bool is_cross_checked = true;
     bool is_loaded = false;
 };
 
+/// Rows of an output file in parts, one behind the other.
+struct output_rows {
+    std::vector<std::string> parts;
+    std::size_t count = 0;
+};
+
 struct schedule {
-    std::vector<beam_outcome> outcomes;     // of each beam
-    std::vector<std::string> results_text;  // the rows of results.csv, in parts
-    std::size_t result_count = 0;
+    std::vector<beam_outcome> outcomes;  // of each beam
+    output_rows results;                 // a row for a beam and combination
+    output_rows spans;                   // of continuous beams: for a span and combination
+    output_rows supports;                // for a support and combination
 };
 
 /// Computes all beams that are not refused. A beam whose numbers leave the range of double is refused, with its

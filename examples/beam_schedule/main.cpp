@@ -8,8 +8,9 @@
 #include "read_beams.hpp"
 #include "read_combinations.hpp"
 #include "read_loads.hpp"
-#include "replace_file.hpp"
+#include "read_supports.hpp"
 #include "report.hpp"
+#include "write_results.hpp"
 
 #include <sagitta/version.hpp>
 
@@ -39,23 +40,38 @@ Reads the beams of a project, their loads and the load combinations, prints the 
 against its limit, and writes every beam in every combination to results.csv in OUTPUT_FOLDER (which is made if need
 be; without --out it is INPUT_FOLDER).
 
-INPUT_FOLDER holds three CSV files (RFC 4180, UTF-8) with a header; their columns may stand in any order, further
-columns with a name are noted and not read. Values carry their unit: 7.2 m, 12 ft 6 in, 4.5 kN/m, 8356 cm4, 29000 ksi.
+INPUT_FOLDER holds three or four CSV files (RFC 4180, UTF-8) with a header; their columns may stand in any order,
+further columns with a name are noted and not read. Values carry their unit: 7.2 m, 12 ft 6 in, 4.5 kN/m, 8356 cm4,
+29000 ksi.
 
   beams.csv         mark,left,right,span,E,I,limit
-                    ends: fixed, pinned or free; limit: L/250 or the like, or a length
+                    ends: fixed, pinned, free, or elastic and its stiffness: elastic 500 kN*m/rad (supported, and
+                    held against rotation by that); limit: L/250 or the like, or a length
+  supports.csv      mark,at,kind,stiffness,settlement
+                    hinges of a beam, and supports between its ends or at a free end; this file may be missing
+                    pinned             at a place, rigid
+                    spring             at a place, with a stiffness: 8 kN/mm
+                    hinge              at a place between the ends: no moment is passed on
+                    settlement: how far a pinned support, or the ground below a spring, has moved down in every
+                    combination, or empty
   loads.csv         mark,case,kind,size,size_to,from,to
                     point, couple      size, at from
                     uniform            size, between from and to (both empty: the whole beam)
                     linear             from size to size_to, between from and to (both empty: the whole beam)
                     settlement         a length size, of the end from: left or right
-                    rotation           an angle size, of the fixed end from: left or right
+                    rotation           an angle size, of the fixed or elastic end from: left or right
                     cells that a kind does not use stay empty
   combinations.csv  combination,case,factor
                     a combination is the sum of factor times all loads of the case
 
-Down and clockwise are positive, places count from the left end. The folder demo beside the source of this program
-holds an invented project to start from.
+A beam with a row in supports.csv, or with an elastic end, is a continuous one. It is held against its limit span by
+span: L of L/250 is the length of the span, of an overhang beyond the last support twice its length (common practice,
+no source), of a beam carried by one end alone its length. Deflections are those from the undeformed beam, so a
+support that gives way moves the spans beside it. The table has a line for each span and for the reaction and moment
+at each support; results_spans.csv and results_supports.csv have them in every combination.
+
+Down and clockwise are positive, reactions upward, moments sagging; places count from the left end. The folder demo
+beside the source of this program holds an invented project to start from.
 
 A row that cannot be accepted is refused with its place on standard error, and its beam is not called ok. The input
 is read as a whole or not at all where a file or a column is missing; results.csv is replaced only when whole.
@@ -124,27 +140,17 @@ bool is_without_rows(const std::optional<input_table>& table, findings& found) {
     return true;
 }
 
-struct written_results {
-    bool is_good = false;
-    std::string message;
-};
-
-written_results write_results(const fs::path& folder, const schedule& computed) {
-    std::error_code wrong;
-    fs::create_directories(folder, wrong);
-    const fs::path path = folder / "results.csv";
-    constexpr std::string_view head =
-        "mark,combination,greatest_deflection_mm,at_m,limit_mm,utilisation,verdict,cross_check\n";
-    const std::string failure = wrong ? wrong.message() : replace_file(path, head, computed.results_text);
-    const std::string name = printable(path.string());
-    if (failure.empty()) return {true, fmt::format("{} results are in {}", computed.result_count, name)};
-    return {false, fmt::format("beam_schedule: {} could not be written and is as it was: {}", name, failure)};
-}
-
 bool print_report(const std::string& text) {
     const bool good = std::fwrite(text.data(), 1, text.size(), stdout) == text.size() && std::fflush(stdout) == 0;
     if (!good) say("beam_schedule: the table could not be printed");
     return good;
+}
+
+/// Also where it is no file that can be read, which has to be said then.
+bool is_there(const fs::path& path) {
+    std::error_code wrong;
+    const auto status = fs::symlink_status(path, wrong);
+    return status.type() != fs::file_type::not_found && status.type() != fs::file_type::none;
 }
 
 int run(const arguments& folders) {
@@ -152,24 +158,29 @@ int run(const arguments& folders) {
     const auto beams_file = input_table::open(folders.input, "beams.csv", beam_columns, found);
     const auto loads_file = input_table::open(folders.input, "loads.csv", load_columns, found);
     const auto combinations_file = input_table::open(folders.input, "combinations.csv", combination_columns, found);
+    const bool has_supports = is_there(folders.input / "supports.csv");
+    std::optional<input_table> supports_file;
+    if (has_supports) supports_file = input_table::open(folders.input, "supports.csv", support_columns, found);
     const bool no_beams = is_without_rows(beams_file, found);
     const bool no_combinations = is_without_rows(combinations_file, found);
-    if (!beams_file || !loads_file || !combinations_file || no_beams || no_combinations) {
+    const bool is_readable = beams_file && loads_file && combinations_file && supports_file.has_value() == has_supports;
+    if (!is_readable || no_beams || no_combinations) {
         say_all(found);
         say("beam_schedule: nothing is computed, nothing is written");
         return something_refused;
     }
-    auto beams = read_beams(*beams_file, found);
+    auto beams = read_beams(*beams_file, supported_marks(supports_file), found);
+    const auto supports = read_supports(supports_file, beams, found);
     const auto combinations = read_combinations(*combinations_file, found);
     const auto loads = read_loads(*loads_file, beams, combinations, found);
-    const bool is_sure = combinations.is_complete && loads.rows_of_any_beam == 0;
+    const bool is_sure = combinations.is_complete && loads.rows_of_any_beam == 0 && supports.rows_of_any_beam == 0;
     const auto computed = compute_schedule(beams, loads.loads, combinations, is_sure, found);
 
     say_all(found);
     // The results come first: whoever reads the table may stop reading.
-    const auto written = write_results(folders.output, computed);
-    const bool is_printed = print_report(report_of(beams, loads, combinations, computed));
-    say(written.message);
+    const auto written = write_results(folders.output, beams, computed);
+    const bool is_printed = print_report(report_of(beams, supports, loads, combinations, computed));
+    fmt::print(stderr, "{}", written.message);
 
     const auto any = [&](verdict v) {
         for (const auto& outcome : computed.outcomes) {

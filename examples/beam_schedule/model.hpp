@@ -7,6 +7,7 @@
 
 #include <cstddef>
 #include <cstdint>
+#include <memory>
 #include <optional>
 #include <span>
 #include <string_view>
@@ -15,10 +16,13 @@
 
 namespace beam_schedule {
 
-enum class holding { fixed, pinned, free };
+/// How a beam is held at an end, or at a support between its ends. Elastic is supported and held against rotation by
+/// a spring; spring is supported by one, free to rotate.
+enum class holding { fixed, pinned, elastic, spring, free };
 
 [[nodiscard]] constexpr std::string_view name_of(holding end) {
-    return end == holding::fixed ? "fixed" : end == holding::pinned ? "pinned" : "free";
+    constexpr std::string_view names[]{"fixed", "pinned", "elastic", "spring", "free"};
+    return names[static_cast<std::size_t>(end)];
 }
 
 using span_length = sagitta::quantity<sagitta::dimension::length>;
@@ -31,16 +35,45 @@ using clamped = decltype(sagitta::fixed_beam(span_length(), rigidity()));
 using clamped_right = decltype(mirrored(std::declval<clamped_left>()));
 using propped_right = decltype(mirrored(std::declval<propped>()));
 
-/// How a beam is held is a type in sagitta; these are the ways that stand.
+/// How a beam of one span is held is a type in sagitta; these are the ways that stand.
 using any_beam = std::variant<simple, clamped_left, clamped_right, propped, propped_right, clamped>;
+
+/// The allowed deflection: a length, or a fraction of a span.
+struct deflection_limit {
+    span_length length{};
+    double divisor = 0;  // 0: the length counts
+
+    [[nodiscard]] span_length over(const span_length& span) const { return divisor > 0 ? span / divisor : length; }
+};
+
+struct beam_support {
+    span_length at;
+    holding how;
+};
+
+/// A stretch between neighbouring supports, or from the last one to a free end.
+struct beam_span {
+    span_length from, to;
+    holding left, right;
+    span_length limit;
+};
+
+/// A beam for which there is no closed form of one span: on supports of supports.csv, or with an elastic end.
+struct continuous {
+    sagitta::continuous_beam<double> beam;
+    std::vector<beam_support> supports;  // from left to right, held ends included
+    std::vector<beam_span> spans;
+    bool is_settled = false;  // supports.csv moves a support
+};
 
 struct beam_entry {
     std::string_view mark;
     place where;  // of its mark in the file
     holding left{}, right{};
-    std::optional<any_beam> beam;
+    std::optional<any_beam> beam;  // nothing for a continuous beam
+    std::unique_ptr<continuous> supported;
     span_length span{};
-    span_length limit{};
+    deflection_limit limit;
     bool is_refused = false;
 };
 

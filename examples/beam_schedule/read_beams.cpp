@@ -5,11 +5,14 @@
 
 #include <fmt/format.h>
 
+#include <memory>
+
 namespace beam_schedule {
 namespace {
 
 enum column : std::size_t { mark, left, right, span, E, I, limit };
 
+/// The closed form of one span; nothing where there is none.
 std::optional<any_beam> beam_held(holding at_left, holding at_right, const span_length& L, const rigidity& EI) {
     using enum holding;
     if (at_left == pinned && at_right == pinned) return sagitta::simple_beam(L, EI);
@@ -21,7 +24,30 @@ std::optional<any_beam> beam_held(holding at_left, holding at_right, const span_
     return std::nullopt;
 }
 
-beam_entry read_beam(const input_row& row, findings& found) {
+template <class End>
+void hold(sagitta::continuous_beam<double>& beam, End which, const span_length& at, const end_holding& held) {
+    if (held.how == holding::fixed) beam.clamp(which);
+    if (held.how == holding::pinned || held.how == holding::elastic) beam.support_at(at);
+    if (held.how == holding::elastic) beam.turning_spring(which, held.stiffness);
+}
+
+std::unique_ptr<continuous> continuous_held(const end_holding& at_left, const end_holding& at_right,
+                                            const span_length& L, const rigidity& EI) {
+    auto made = std::make_unique<continuous>(continuous{sagitta::continuous_beam<double>(L, EI), {}, {}});
+    hold(made->beam, sagitta::end::left, span_length(), at_left);
+    hold(made->beam, sagitta::end::right, L, at_right);
+    if (at_left.how != holding::free) made->supports.push_back({span_length(), at_left.how});
+    if (at_right.how != holding::free) made->supports.push_back({L, at_right.how});
+    return made;
+}
+
+/// Whether two ends alone carry a beam.
+bool stands(holding at_left, holding at_right) {
+    const auto clamps = [](holding end) { return end == holding::fixed || end == holding::elastic; };
+    return clamps(at_left) || clamps(at_right) || (at_left == holding::pinned && at_right == holding::pinned);
+}
+
+beam_entry read_beam(const input_row& row, const std::unordered_set<std::string_view>& supported, findings& found) {
     const std::size_t refusals_before = found.refusals.size();
     beam_entry entry;
     entry.mark = row.cell(mark);
@@ -34,19 +60,24 @@ beam_entry read_beam(const input_row& row, findings& found) {
         const auto modulus = read_positive<sagitta::dimension::stress>(row, E, found);
         const auto inertia = read_positive<sagitta::dimension::second_moment_of_area>(row, I, found);
         const auto allowed = read_limit(row, limit, L, found);
-        entry.left = at_left.value_or(entry.left);
-        entry.right = at_right.value_or(entry.right);
+        if (at_left) entry.left = at_left->how;
+        if (at_right) entry.right = at_right->how;
         entry.span = L.value_or(span_length());
-        entry.limit = allowed.value_or(span_length());
+        entry.limit = allowed.value_or(deflection_limit());
         const bool is_held = at_left && at_right;
-        const rigidity any_EI = rigidity::from_value(1);
-        if (is_held && !beam_held(*at_left, *at_right, L.value_or(span_length::from_value(1)), any_EI)) {
+        const bool is_supported = supported.contains(entry.mark);
+        if (is_held && !is_supported && !stands(entry.left, entry.right)) {
             found.refuse(row.at(right),
                          fmt::format("'{}' behind '{}' at the left, a mechanism", row.cell(right), row.cell(left)),
-                         "one fixed end, or both ends pinned or fixed");
+                         "one fixed or elastic end, both ends pinned, or further supports in supports.csv");
         } else if (is_held && L && modulus && inertia) {
             try {
-                entry.beam = beam_held(*at_left, *at_right, *L, *modulus * *inertia);
+                const rigidity EI = *modulus * *inertia;
+                if (is_supported || entry.left == holding::elastic || entry.right == holding::elastic) {
+                    entry.supported = continuous_held(*at_left, *at_right, *L, EI);
+                } else {
+                    entry.beam = beam_held(entry.left, entry.right, *L, EI);
+                }
             } catch (const sagitta::invalid_input& wrong) {
                 found.refuse(row.at(I), wrong.what(), "E and I whose product is within the range of double");
             }
@@ -58,14 +89,14 @@ beam_entry read_beam(const input_row& row, findings& found) {
 
 }  // namespace
 
-beam_list read_beams(const input_table& table, findings& found) {
+beam_list read_beams(const input_table& table, const std::unordered_set<std::string_view>& supported, findings& found) {
     struct part {
         std::vector<beam_entry> beams;
         findings found;
     };
     auto parts = in_parallel<part>(table.row_count(), [&](part& p, std::size_t from, std::size_t to) {
         p.beams.reserve(to - from);
-        for (std::size_t i = from; i < to; ++i) p.beams.push_back(read_beam(table.row(i), p.found));
+        for (std::size_t i = from; i < to; ++i) p.beams.push_back(read_beam(table.row(i), supported, p.found));
     });
 
     beam_list list;

@@ -9,6 +9,7 @@
 #include <cstddef>
 #include <string_view>
 #include <unordered_map>
+#include <unordered_set>
 #include <vector>
 
 namespace beam_schedule {
@@ -21,6 +22,9 @@ struct beam_list {
     std::unordered_map<std::string_view, std::size_t> number_of;  // by mark
 };
 
-[[nodiscard]] beam_list read_beams(const input_table& table, findings& found);
+/// Beams with an elastic end, and those that are supported further (by their marks), become continuous beams. Of the
+/// latter their supports decide whether they stand (read_supports.hpp).
+[[nodiscard]] beam_list read_beams(const input_table& table, const std::unordered_set<std::string_view>& supported,
+                                   findings& found);
 
 }  // namespace beam_schedule

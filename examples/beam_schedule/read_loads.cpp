@@ -56,9 +56,8 @@ private:
     std::optional<span_length> span() const { return beam ? std::optional(beam->span) : std::nullopt; }
 
     void expect_empty(column unused) const {
-        if (row.cell(unused).empty()) return;
-        found.refuse(row.at(unused), quoted(row.cell(unused)),
-                     fmt::format("nothing, since a load of the kind {} does not use it", row.cell(kind)));
+        if (row.cell(unused).empty()) return;  // before the words are put together, which takes time
+        beam_schedule::expect_empty(row, unused, fmt::format("a load of the kind {}", row.cell(kind)), found);
     }
 
     template <class Dimension, class Make>
@@ -123,10 +122,11 @@ private:
             found.refuse(row.at(from), quoted(end), "left or right");
         } else if (beam != nullptr) {
             const holding held = is_left ? beam->left : beam->right;
-            const bool can_move = turns ? held == holding::fixed : held != holding::free;
+            const bool can_turn = held == holding::fixed || held == holding::elastic;
+            const bool can_move = turns ? can_turn : held != holding::free;
             if (!can_move) {
                 found.refuse(row.at(from), fmt::format("{}, an end that is {}", quoted(end), name_of(held)),
-                             turns ? "an end that is fixed" : "an end that is fixed or pinned");
+                             turns ? "an end that is fixed or elastic" : "an end that is fixed, elastic or pinned");
             }
         }
         expect_empty(to);
@@ -150,7 +150,7 @@ load_row read_row(const input_row& row, const beam_list& beams, const combinatio
         if (!out.beam) found.refuse(row.at(mark), quoted(name), "the mark of a beam in beams.csv");
         if (load_case.empty()) found.refuse(row.at(case_name), "nothing", "the name of a load case");
         const beam_entry* beam = out.beam ? &beams.beams[*out.beam] : nullptr;
-        const bool can_check = beam != nullptr && beam->beam && !beam->is_refused;
+        const bool can_check = beam != nullptr && !beam->is_refused;
         out.load = load_reader{row, found, can_check ? beam : nullptr}.read();
     }
     out.is_refused = found.refusals.size() != refusals_before;

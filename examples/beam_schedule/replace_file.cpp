@@ -7,6 +7,7 @@
 #include <cstring>
 #include <random>
 #include <system_error>
+#include <utility>
 
 namespace beam_schedule {
 namespace {
@@ -17,25 +18,37 @@ bool write_all(std::FILE* file, std::string_view text) {
 
 }  // namespace
 
-std::string replace_file(const std::filesystem::path& path, std::string_view head, std::span<const std::string> parts) {
-    const std::filesystem::path temporary = path.string() + fmt::format(".{:08x}.part", std::random_device()());
+replacement::replacement(std::filesystem::path path, std::string_view head, std::span<const std::string> parts)
+    : path_(std::move(path)) {
+    const std::filesystem::path name = path_.string() + fmt::format(".{:08x}.part", std::random_device()());
     errno = 0;
-    std::FILE* const file = std::fopen(temporary.string().c_str(), "wbx");  // x: never into a file that exists
-    if (file == nullptr) return std::strerror(errno);
-
+    std::FILE* const file = std::fopen(name.string().c_str(), "wbx");  // x: never into a file that exists
+    if (file == nullptr) {
+        failure_ = std::strerror(errno);
+        return;
+    }
+    temporary_ = name;
     bool good = write_all(file, head);
     for (const auto& part : parts) good = good && write_all(file, part);
-    std::string failure = good ? "" : std::strerror(errno);
+    if (!good) failure_ = std::strerror(errno);
     // A full disk may show no earlier than when the buffers are emptied.
-    if (std::fclose(file) != 0 && good) failure = std::strerror(errno);
+    if (std::fclose(file) != 0 && good) failure_ = std::strerror(errno);
+}
 
+replacement::~replacement() {
+    std::error_code ignored;
+    if (!temporary_.empty()) std::filesystem::remove(temporary_, ignored);
+}
+
+void replacement::put_in_place() {
+    if (!failure_.empty()) return;
     std::error_code wrong;
-    if (failure.empty()) {
-        std::filesystem::rename(temporary, path, wrong);
-        if (wrong) failure = wrong.message();
+    std::filesystem::rename(temporary_, path_, wrong);
+    if (wrong) {
+        failure_ = wrong.message();
+    } else {
+        temporary_.clear();
     }
-    if (!failure.empty()) std::filesystem::remove(temporary, wrong);
-    return failure;
 }
 
 }  // namespace beam_schedule

@@ -2,6 +2,7 @@
 
 #include "parallel.hpp"
 #include "printable_text.hpp"
+#include "text_table.hpp"
 
 #include <fmt/format.h>
 
@@ -10,16 +11,11 @@
 #include <cmath>
 #include <iterator>
 #include <string_view>
+#include <utility>
 #include <vector>
 
 namespace beam_schedule {
 namespace {
-
-struct table_column {
-    std::string_view name;
-    std::string_view unit;
-    bool is_number;
-};
 
 constexpr std::array columns{
     table_column{"mark", "", false},       table_column{"held", "", false},       table_column{"span", "m", true},
@@ -27,8 +23,15 @@ constexpr std::array columns{
     table_column{"limit", "mm", true},     table_column{"utilisation", "", true}, table_column{"verdict", "", false},
     table_column{"cross-check", "", true},
 };
-using table_line = std::array<std::string, columns.size()>;
-using widths = std::array<std::size_t, columns.size()>;
+using beam_line = table_line<columns.size()>;
+
+constexpr std::array support_columns_shown{
+    table_column{"mark", "", false},  table_column{"support", "", false},
+    table_column{"at", "m", true},    table_column{"reaction from", "kN", true},
+    table_column{"to", "kN", true},   table_column{"moment from", "kN*m", true},
+    table_column{"to", "kN*m", true},
+};
+using support_line = table_line<support_columns_shown.size()>;
 
 /// With so many decimals, or as a power of ten where that would be a long row of digits.
 std::string decimals(double value, int places) {
@@ -49,7 +52,9 @@ std::string utilisation_text(double utilisation) {
 }
 
 /// Rounding as a bound, since its digits say nothing.
-std::string cross_check_text(double residual) {
+std::string cross_check_text(const beam_outcome& outcome) {
+    const double residual = outcome.cross_check;
+    if (!outcome.is_cross_checked) return "not checked";
     if (!(residual <= plausible_cross_check)) return fmt::format("! {:.0e}", residual);
     return residual < 1e-12 ? "< 1e-12" : fmt::format("{:.0e}", residual);
 }
@@ -65,38 +70,69 @@ std::string combination_text(const combination& named) {
     return cut_to_width(printable(named.name), widest);
 }
 
-table_line line_of(const beam_entry& entry, const beam_outcome& outcome, const std::vector<std::string>& names) {
-    table_line line;
+void fill_in(const utilised& worst, beam_line& line) {
+    line[4] = decimals(worst.deflection_mm, 2);
+    line[5] = decimals(worst.at_m, 3);
+    line[6] = decimals(worst.limit_mm, 2);
+    line[7] = utilisation_text(worst.utilisation);
+}
+
+beam_line line_of(const beam_entry& entry, const beam_outcome& outcome, const std::vector<std::string>& names) {
+    beam_line line;
     line.fill("-");
     line[0] = mark_text(entry);
     line[8] = name_of(outcome.result);
     if (outcome.result == verdict::refused) return line;
     line[1] = fmt::format("{}-{}", name_of(entry.left), name_of(entry.right));
     line[2] = decimals(entry.span / sagitta::units::m, 3);
-    line[6] = decimals(entry.limit / sagitta::units::mm, 2);
+    if (!entry.supported) line[6] = decimals(entry.limit.over(entry.span) / sagitta::units::mm, 2);
     if (!outcome.governing) return line;
     line[3] = outcome.is_loaded ? names[outcome.governing->combination] : "(no load)";
-    line[4] = decimals(outcome.governing->deflection_mm, 2);
-    line[5] = decimals(outcome.governing->at_m, 3);
-    line[7] = utilisation_text(outcome.governing->utilisation);
-    line[9] = cross_check_text(outcome.cross_check);
+    fill_in(*outcome.governing, line);
+    line[9] = cross_check_text(outcome);
     return line;
 }
 
-void widen(widths& width, const table_line& line) {
-    for (std::size_t i = 0; i < width.size(); ++i) width[i] = std::max(width[i], display_width(line[i]));
+/// The spans of a beam that has several, below its own line.
+std::vector<beam_line> span_lines(const beam_entry& entry, const beam_outcome& outcome,
+                                  const std::vector<std::string>& names) {
+    std::vector<beam_line> lines;
+    if (outcome.spans.size() < 2) return lines;
+    for (const utilised& worst : outcome.spans) {
+        const beam_span& span = entry.supported->spans[worst.span];
+        beam_line& line = lines.emplace_back();
+        line[0] = fmt::format("  {}", worst.span + 1);
+        line[1] = fmt::format("{}-{}", name_of(span.left), name_of(span.right));
+        line[2] = decimals((span.to - span.from) / sagitta::units::m, 3);
+        line[3] = outcome.is_loaded ? names[worst.combination] : "(no load)";
+        fill_in(worst, line);
+        // Whatever makes the whole beam doubtful or incomplete does so to each span.
+        const bool can_tell = outcome.result == verdict::ok || outcome.result == verdict::exceeds;
+        line[8] = name_of(!can_tell ? outcome.result : worst.utilisation > 1 ? verdict::exceeds : verdict::ok);
+    }
+    return lines;
 }
 
-void append(std::string& out, const table_line& line, const widths& width) {
-    for (std::size_t i = 0; i < width.size(); ++i) {
-        const std::size_t pad = width[i] - std::min(width[i], display_width(line[i]));
-        if (columns[i].is_number) out.append(pad, ' ');
-        out += line[i];
-        const bool is_last = i + 1 == width.size();
-        if (!is_last) out.append((columns[i].is_number ? 0 : pad) + 2, ' ');
+/// A table of what the supports of continuous beams carry; nothing where there are none.
+std::string supports_of(const beam_list& beams, const schedule& computed) {
+    std::vector<support_line> lines;
+    text_table<support_columns_shown.size()> table(support_columns_shown);
+    for (std::size_t i = 0; i < computed.outcomes.size(); ++i) {
+        const auto& ranges = computed.outcomes[i].supports;
+        for (std::size_t j = 0; j < ranges.size(); ++j) {
+            const beam_support& support = beams.beams[i].supported->supports[j];
+            lines.push_back({mark_text(beams.beams[i]), std::string(name_of(support.how)),
+                             decimals(support.at / sagitta::units::m, 3), decimals(ranges[j].least_reaction_kN, 2),
+                             decimals(ranges[j].greatest_reaction_kN, 2), decimals(ranges[j].least_moment_kNm, 2),
+                             decimals(ranges[j].greatest_moment_kNm, 2)});
+            table.widen(lines.back());
+        }
     }
-    while (out.back() == ' ') out.pop_back();
-    out += '\n';
+    if (lines.empty()) return {};
+    std::string out = "\nSupports of continuous beams: reactions and moments from least to greatest\n\n";
+    table.append_head(out);
+    for (const auto& line : lines) table.append(out, line);
+    return out;
 }
 
 std::string counted(std::size_t count, std::string_view one, std::string_view many) {
@@ -140,8 +176,19 @@ void append_summary(std::string& out, const tally& count, const beam_list& beams
     out += '\n';
 }
 
-void append_reasons(std::string& out, const tally& count, const load_table& loads, const combination_list& combinations,
-                    const std::vector<std::string>& names) {
+void append_lost_rows(std::string& out, std::size_t of_any_beam, std::size_t of_no_beam, std::string_view file) {
+    if (of_any_beam != 0) {
+        out += fmt::format("incomplete: {} of {} {} refused; nobody can tell of which beam.\n",
+                           counted(of_any_beam, "row", "rows"), file, of_any_beam == 1 ? "is" : "are");
+    }
+    if (of_no_beam != 0) {
+        out += fmt::format("{} of {} {} on no beam: beams.csv does not have the mark.\n",
+                           counted(of_no_beam, "row", "rows"), file, of_no_beam == 1 ? "is" : "are");
+    }
+}
+
+void append_reasons(std::string& out, const tally& count, const support_table& supports, const load_table& loads,
+                    const combination_list& combinations, const std::vector<std::string>& names) {
     if (count.count(verdict::refused) != 0) {
         out += "refused: a row of the beam or of its loads is not accepted; the reasons stand on standard error.\n";
     }
@@ -158,16 +205,8 @@ void append_reasons(std::string& out, const tally& count, const load_table& load
     } else if (!combinations.is_complete) {
         out += "incomplete: combinations.csv has a refused row.\n";
     }
-    if (loads.rows_of_any_beam != 0) {
-        out += fmt::format(
-            "incomplete: {}; nobody can tell of which beam.\n",
-            counted(loads.rows_of_any_beam, "row of loads.csv is refused", "rows of loads.csv are refused"));
-    }
-    if (loads.rows_of_no_beam != 0) {
-        out += fmt::format(
-            "{}: beams.csv does not have the mark.\n",
-            counted(loads.rows_of_no_beam, "row of loads.csv is on no beam", "rows of loads.csv are on no beam"));
-    }
+    append_lost_rows(out, supports.rows_of_any_beam, supports.rows_of_no_beam, "supports.csv");
+    append_lost_rows(out, loads.rows_of_any_beam, loads.rows_of_no_beam, "loads.csv");
     if (count.count(verdict::doubtful) != 0) {
         out += "doubtful: closed forms and integration differ by more than rounding (!); do not use these results.\n";
     }
@@ -175,50 +214,69 @@ void append_reasons(std::string& out, const tally& count, const load_table& load
 
 }  // namespace
 
-std::string report_of(const beam_list& beams, const load_table& loads, const combination_list& combinations,
-                      const schedule& computed) {
+std::string report_of(const beam_list& beams, const support_table& supports, const load_table& loads,
+                      const combination_list& combinations, const schedule& computed) {
     std::vector<std::string> names;
     for (const auto& named : combinations.combinations) names.push_back(combination_text(named));
 
-    table_line head, units, rule;
-    for (std::size_t i = 0; i < columns.size(); ++i) {
-        head[i] = columns[i].name;
-        units[i] = columns[i].unit;
-    }
+    text_table<columns.size()> table(columns);
     struct part {
-        std::vector<table_line> lines;
-        widths width{};
+        std::vector<beam_line> lines;
+        text_table<columns.size()> table{columns};
+        bool has_spans = false, has_unchecked = false;
     };
     auto parts = in_parallel<part>(beams.beams.size(), [&](part& p, std::size_t from, std::size_t to) {
         for (std::size_t i = from; i < to; ++i) {
-            p.lines.push_back(line_of(beams.beams[i], computed.outcomes[i], names));
-            widen(p.width, p.lines.back());
+            const beam_outcome& outcome = computed.outcomes[i];
+            p.lines.push_back(line_of(beams.beams[i], outcome, names));
+            p.table.widen(p.lines.back());
+            for (auto& line : span_lines(beams.beams[i], outcome, names)) {
+                p.table.widen(line);
+                p.lines.push_back(std::move(line));
+                p.has_spans = true;
+            }
+            p.has_unchecked = p.has_unchecked || !outcome.is_cross_checked;
         }
     });
-    widths width{};
-    widen(width, head);
+    bool has_spans = false, has_unchecked = false;
     for (const auto& p : parts) {
-        for (std::size_t i = 0; i < width.size(); ++i) width[i] = std::max(width[i], p.width[i]);
+        table.widen(p.table);
+        has_spans = has_spans || p.has_spans;
+        has_unchecked = has_unchecked || p.has_unchecked;
     }
-    for (std::size_t i = 0; i < columns.size(); ++i) rule[i] = std::string(width[i], '-');
 
     std::string out = fmt::format(
         "Beam schedule: the greatest deflection of {} in {}\n\n", counted(beams.beams.size(), "beam", "beams"),
         counted(combinations.combinations.size() - combinations.left_out(), "combination", "combinations"));
-    append(out, head, width);
-    append(out, units, width);
-    append(out, rule, width);
+    table.append_head(out);
     for (const auto& p : parts) {
-        for (const auto& line : p.lines) append(out, line, width);
+        for (const auto& line : p.lines) table.append(out, line);
     }
     out += '\n';
     const tally count(computed);
     append_summary(out, count, beams, names);
-    append_reasons(out, count, loads, combinations, names);
+    append_reasons(out, count, supports, loads, combinations, names);
+    const std::string of_supports = supports_of(beams, computed);
+    out += of_supports;
     out +=
         "\n"
-        "Deflection is positive downward, 'at' is measured from the left end, utilisation = |greatest| / limit.\n"
-        "Cross-check: greatest relative difference between the closed forms and an independent integration.\n"
+        "Deflection is positive downward, 'at' is measured from the left end, utilisation = |greatest| / limit.\n";
+    if (has_spans) {
+        out +=
+            "The spans of a continuous beam stand below it, the governing one decides. L of a limit L/n is the span, "
+            "of "
+            "an\n"
+            "overhang twice its length (common practice, no source).\n";
+    }
+    if (!of_supports.empty()) {
+        out +=
+            "Reactions are positive upward (a support with one below 0 must hold the beam down), moments where the "
+            "beam "
+            "sags.\n";
+    }
+    out += "Cross-check: greatest relative difference between the closed forms and an independent integration.\n";
+    if (has_unchecked) out += "Not checked: a continuous beam; nothing integrates it independently.\n";
+    out +=
         "Caution: elastic small-deflection theory of prismatic beams in bending; loads and factors as given, limits "
         "for\n"
         "service loads. Local codes and a licensed engineer decide; this table does not.\n";

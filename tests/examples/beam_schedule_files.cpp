@@ -40,7 +40,10 @@ TEST_CASE("the table of the demo is as it should be") {
     const project_folder project;
     const auto ran = project.run("'" SAGITTA_SOURCE_FOLDER "/examples/beam_schedule/demo' --out results");
     CHECK(ran.status == 0);
-    CHECK(ran.err == "68 results are in results/results.csv\n");
+    CHECK(ran.err ==
+          "84 results are in results/results.csv\n"
+          "32 results of spans are in results/results_spans.csv\n"
+          "40 results of supports are in results/results_supports.csv\n");
     CHECK(ran.out == text_of(SAGITTA_SOURCE_FOLDER "/tests/examples/expected_demo_table.txt"));
     CHECK(project.results_text("results").starts_with("mark,"));
 }
@@ -130,6 +133,96 @@ TEST_CASE("a missing file or column, or no rows: nothing is overwritten") {
     check_that_nothing_is_done(
         project,
         "combinations.csv: line 2, column 2: found an opening quote whose cell never ends, expected a closing quote");
+}
+
+TEST_CASE("supports.csv may be missing, or without rows; what stands there must be readable") {
+    const project_folder project;
+    project.write_rows(one_beam, one_load, one_combination);
+    const auto without = project.run();
+    const std::string results = project.results_text();
+    CHECK(without.status == 0);
+    CHECK(!fs::exists(project.path() / "results_spans.csv"));
+    CHECK(!fs::exists(project.path() / "results_supports.csv"));
+    project.write_supports("");
+    const auto with_none = project.run();
+    CHECK(with_none.status == 0);
+    CHECK(with_none.out == without.out);
+    CHECK(with_none.err == without.err);
+    CHECK(project.results_text() == results);
+    CHECK(!fs::exists(project.path() / "results_spans.csv"));
+
+    write(project.path() / "supports.csv", "mark,at,kind,stiffness\n");
+    check_that_nothing_is_done(project,
+                               "supports.csv: line 1: found no column settlement, expected a header with the columns "
+                               "mark,at,kind,stiffness,settlement");
+    write(project.path() / "supports.csv", "");
+    check_that_nothing_is_done(
+        project,
+        "supports.csv: found an empty file, expected a header with the columns mark,at,kind,stiffness,settlement");
+    fs::remove(project.path() / "supports.csv");
+    fs::create_directory(project.path() / "supports.csv");
+    check_that_nothing_is_done(
+        project, "supports.csv: found no readable file in the folder '.' (Is a directory), expected a CSV file");
+}
+
+TEST_CASE("the files for continuous beams go with those beams") {
+    const project_folder project;
+    project.write_rows(one_beam, one_load, one_combination);
+    project.write_supports("B,3 m,pinned,,\n");
+    CHECK(project.run().status == 0);
+    CHECK(project.spans().at({"B", "all"}).size() == 2);
+    CHECK(project.supports().at({"B", "all"}).size() == 3);
+
+    // One of three cannot be put in place: what stands before it is new, what stands behind it is as it was.
+    const std::string supports = text_of(project.path() / "results_supports.csv");
+    fs::remove(project.path() / "results_spans.csv");
+    fs::create_directories(project.path() / "results_spans.csv" / "inside");
+    project.write_supports("B,4 m,pinned,,\n");
+    const auto ran = project.run();
+    CHECK(ran.status == 2);
+    CHECK(has_line(ran.err, "1 results are in ./results.csv"));
+    CHECK(ran.err.find("beam_schedule: ./results_spans.csv could not be written and is as it was: ") !=
+          std::string::npos);
+    CHECK(has_line(ran.err, "beam_schedule: ./results_supports.csv is as it was"));
+    CHECK(text_of(project.path() / "results_supports.csv") == supports);
+    CHECK(!has_leftovers(project.path()));
+    fs::remove_all(project.path() / "results_spans.csv");
+
+    // No beam is continuous any more: rows of an earlier run would belong to nothing.
+    CHECK(project.run().status == 0);
+    project.write_supports("");
+    CHECK(project.run().status == 0);
+    CHECK(text_of(project.path() / "results_spans.csv") ==
+          "mark,combination,span,from_m,to_m,greatest_deflection_mm,at_m,limit_mm,utilisation,verdict\n");
+    CHECK(text_of(project.path() / "results_supports.csv") ==
+          "mark,combination,at_m,support,reaction_kN,moment_kNm,deflection_mm\n");
+}
+
+TEST_CASE("a full disk leaves all files of continuous beams as they were") {
+    const project_folder project;
+    std::string beams, loads, supports;
+    for (int i = 0; i < 500; ++i) {
+        const std::string mark = "B" + std::to_string(i);
+        beams += mark + one_beam.substr(1);
+        loads += mark + one_load.substr(1);
+        supports += mark + ",3 m,pinned,,\n";
+    }
+    project.write_rows(beams, loads, one_combination);
+    project.write_supports(supports);
+    for (const char* name : {"results.csv", "results_spans.csv", "results_supports.csv"}) {
+        write(project.path() / name, earlier);
+    }
+    // results.csv would still fit.
+    const auto ran = project.run(". >/dev/null 2>said.txt #", "trap '' XFSZ; ulimit -f 100;");
+    CHECK(ran.status == 2);
+    CHECK(text_of(project.path() / "said.txt") ==
+          "beam_schedule: ./results.csv is as it was\n"
+          "beam_schedule: ./results_spans.csv could not be written and is as it was: File too large\n"
+          "beam_schedule: ./results_supports.csv could not be written and is as it was: File too large\n");
+    for (const char* name : {"results.csv", "results_spans.csv", "results_supports.csv"}) {
+        CHECK(text_of(project.path() / name) == earlier);
+    }
+    CHECK(!has_leftovers(project.path()));
 }
 
 TEST_CASE("results.csv is replaced as a whole or not at all") {

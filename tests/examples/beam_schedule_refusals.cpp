@@ -19,17 +19,6 @@ const std::string good_loads =
     "CF,dead,uniform,4.5 kN/m,,,\n";
 const std::string good_combinations = "all,dead,1\n";
 
-/// The line of the table that starts with this mark.
-std::string table_line(const std::string& table, const std::string& mark) {
-    const std::size_t at = ("\n" + table).find("\n" + mark + " ");
-    if (at == std::string::npos) return "";
-    return table.substr(at, table.find('\n', at) - at);
-}
-
-bool says(const std::string& line, const std::string& word) {
-    return (line + " ").find(" " + word + " ") != std::string::npos;
-}
-
 void check_good_beam(const project_folder& project, const run_outcome& ran, const std::string& verdict = "ok") {
     CHECK(says(table_line(ran.out, "GOOD"), verdict));
     const auto results = project.results();
@@ -67,14 +56,16 @@ void check_bad_load(const std::string& row, const std::string& message, const st
 }  // namespace
 
 TEST_CASE("refused beams") {
-    check_bad_beam("X,fixd,free,2 m,210 GPa,8356 cm4,L/250", "2 (left): found 'fixd', expected fixed, pinned or free");
-    check_bad_beam("X,fixed,,2 m,210 GPa,8356 cm4,L/250", "3 (right): found nothing, expected fixed, pinned or free");
+    check_bad_beam("X,fixd,free,2 m,210 GPa,8356 cm4,L/250",
+                   "2 (left): found 'fixd', expected fixed, pinned, free, or elastic and its stiffness");
+    check_bad_beam("X,fixed,,2 m,210 GPa,8356 cm4,L/250",
+                   "3 (right): found nothing, expected fixed, pinned, free, or elastic and its stiffness");
     check_bad_beam("X,pinned,free,2 m,210 GPa,8356 cm4,L/250",
                    "3 (right): found 'free' behind 'pinned' at the left, a mechanism, "
-                   "expected one fixed end, or both ends pinned or fixed");
+                   "expected one fixed or elastic end, both ends pinned, or further supports in supports.csv");
     check_bad_beam("X,free,free,2 m,210 GPa,8356 cm4,L/250",
                    "3 (right): found 'free' behind 'free' at the left, a mechanism, "
-                   "expected one fixed end, or both ends pinned or fixed");
+                   "expected one fixed or elastic end, both ends pinned, or further supports in supports.csv");
     check_bad_beam("X,fixed,free,2,210 GPa,8356 cm4,L/250",
                    "4 (span): found '2': no unit, expected one of the units m, mm, cm, ft, in");
     check_bad_beam("X,fixed,free,2 kN,210 GPa,8356 cm4,L/250",
@@ -130,7 +121,7 @@ TEST_CASE("rows with a wrong number of cells or wrong quotes are refused") {
 
 TEST_CASE("every fault of a row is told at once") {
     check_bad_beam("X,fixd,free,-2 m,210 kN,8356 cm4,L/250",
-                   "2 (left): found 'fixd', expected fixed, pinned or free\n"
+                   "2 (left): found 'fixd', expected fixed, pinned, free, or elastic and its stiffness\n"
                    "beams.csv: line 5, column 4 (span): found '-2 m', expected more than 0\n"
                    "beams.csv: line 5, column 5 (E): found '210 kN': the unit 'kN', "
                    "expected one of the units MPa, GPa, kPa, N/mm2, ksi, psi");
@@ -198,17 +189,17 @@ TEST_CASE("a linear load needs both sizes, a concentrated one its place") {
 
 TEST_CASE("ends that cannot be moved are not moved") {
     check_bad_load("CF,dead,settlement,5 mm,,right,",
-                   "6 (from): found 'right', an end that is free, expected an end that is fixed or pinned");
+                   "6 (from): found 'right', an end that is free, expected an end that is fixed, elastic or pinned");
     check_bad_load("CF,dead,rotation,1 mrad,,right,",
-                   "6 (from): found 'right', an end that is free, expected an end that is fixed");
+                   "6 (from): found 'right', an end that is free, expected an end that is fixed or elastic");
     check_bad_load("CF,dead,settlement,5 mm,,middle,", "6 (from): found 'middle', expected left or right");
     const project_folder project;
     project.write_rows(good_beams, good_loads + "GOOD,dead,rotation,1 mrad,,left,\n", good_combinations);
     const auto ran = project.run();
     CHECK(ran.status == 2);
-    CHECK(has_line(
-        ran.err,
-        "loads.csv: line 5, column 6 (from): found 'left', an end that is pinned, expected an end that is fixed"));
+    CHECK(has_line(ran.err,
+                   "loads.csv: line 5, column 6 (from): found 'left', an end that is pinned, expected an end that is "
+                   "fixed or elastic"));
     CHECK(says(table_line(ran.out, "GOOD"), "refused"));
 }
 
@@ -352,7 +343,8 @@ TEST_CASE("lines are counted through quoted newlines, columns as they stand in t
     const auto ran = project.run();
     CHECK(ran.status == 2);
     CHECK(ran.err ==
-          "beams.csv: line 7, column 7 (left): found 'pinnd', expected fixed, pinned or free\n"
+          "beams.csv: line 7, column 7 (left): found 'pinnd', expected fixed, pinned, free, or elastic and its "
+          "stiffness\n"
           "loads.csv: line 4, column 4 (from): found '9 m', expected a place on the beam, from 0 m to 7.2 m\n"
           "note: beams.csv: line 1, column 8: the column 'remark' is not read\n"
           "0 results are in ./results.csv\n");

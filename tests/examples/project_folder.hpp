@@ -6,6 +6,8 @@
 #include <doctest/doctest.h>
 #include <sys/wait.h>
 
+#include <cmath>
+#include <cstddef>
 #include <cstdlib>
 #include <filesystem>
 #include <fstream>
@@ -43,8 +45,31 @@ struct run_outcome {
 struct result_row {
     double greatest_deflection_mm, at_m, limit_mm, utilisation;
     std::string verdict;
-    double cross_check;
+    double cross_check;  // not-a-number where the cell is empty
 };
+
+struct span_row {
+    double from_m, to_m, greatest_deflection_mm, at_m, limit_mm, utilisation;
+    std::string verdict;
+};
+
+struct support_row {
+    double at_m;
+    std::string kind;
+    double reaction_kN, moment_kNm, deflection_mm;
+};
+
+/// The line of the table that starts with this mark.
+inline std::string table_line(const std::string& table, const std::string& mark) {
+    const std::size_t at = ("\n" + table).find("\n" + mark + " ");
+    if (at == std::string::npos) return "";
+    return table.substr(at, table.find('\n', at) - at);
+}
+
+/// True where a line has this word between blanks or at its end.
+inline bool says(const std::string& line, const std::string& word) {
+    return (line + " ").find(" " + word + " ") != std::string::npos;
+}
 
 class project_folder {
 public:
@@ -69,6 +94,10 @@ public:
         write(folder_ / "combinations.csv", "combination,case,factor\n" + std::string(combinations));
     }
 
+    void write_supports(std::string_view rows) const {
+        write(folder_ / "supports.csv", "mark,at,kind,stiffness,settlement\n" + std::string(rows));
+    }
+
     /// Runs the program with these arguments of a shell, in this folder. before goes in front of the program's name.
     [[nodiscard]] run_outcome run(const std::string& arguments = ".", const std::string& before = "") const {
         const std::string command = "cd '" + folder_.string() + "' && " + before + " '" BEAM_SCHEDULE_PROGRAM "' " +
@@ -84,20 +113,54 @@ public:
 
     /// results.csv by mark and combination.
     [[nodiscard]] std::map<std::pair<std::string, std::string>, result_row> results() const {
-        const beam_schedule::csv_text csv(results_text());
         std::map<std::pair<std::string, std::string>, result_row> rows;
-        for (std::size_t i = 1; i < csv.records().size(); ++i) {
-            const auto cells = csv.cells(csv.records()[i]);
-            REQUIRE(cells.size() == 8);
-            const auto number = [&](std::size_t column) { return std::stod(std::string(cells[column])); };
-            const std::pair key{std::string(cells[0]), std::string(cells[1])};
+        for (const auto& cells : rows_of("results.csv", 8)) {
+            const std::pair key{cells[0], cells[1]};
             CHECK(rows.count(key) == 0);
-            rows[key] = {number(2), number(3), number(4), number(5), std::string(cells[6]), number(7)};
+            rows[key] = {std::stod(cells[2]),
+                         std::stod(cells[3]),
+                         std::stod(cells[4]),
+                         std::stod(cells[5]),
+                         cells[6],
+                         cells[7].empty() ? std::nan("") : std::stod(cells[7])};
+        }
+        return rows;
+    }
+
+    /// results_spans.csv by mark and combination, from left to right.
+    [[nodiscard]] std::map<std::pair<std::string, std::string>, std::vector<span_row>> spans() const {
+        std::map<std::pair<std::string, std::string>, std::vector<span_row>> rows;
+        for (const auto& cells : rows_of("results_spans.csv", 10)) {
+            auto& of_beam = rows[{cells[0], cells[1]}];
+            CHECK(cells[2] == std::to_string(of_beam.size() + 1));
+            of_beam.push_back({std::stod(cells[3]), std::stod(cells[4]), std::stod(cells[5]), std::stod(cells[6]),
+                               std::stod(cells[7]), std::stod(cells[8]), cells[9]});
+        }
+        return rows;
+    }
+
+    /// results_supports.csv by mark and combination, from left to right.
+    [[nodiscard]] std::map<std::pair<std::string, std::string>, std::vector<support_row>> supports() const {
+        std::map<std::pair<std::string, std::string>, std::vector<support_row>> rows;
+        for (const auto& cells : rows_of("results_supports.csv", 7)) {
+            rows[{cells[0], cells[1]}].push_back(
+                {std::stod(cells[2]), cells[3], std::stod(cells[4]), std::stod(cells[5]), std::stod(cells[6])});
         }
         return rows;
     }
 
 private:
+    [[nodiscard]] std::vector<std::vector<std::string>> rows_of(const char* name, std::size_t cell_count) const {
+        const beam_schedule::csv_text csv(text_of(folder_ / name));
+        std::vector<std::vector<std::string>> rows;
+        for (std::size_t i = 1; i < csv.records().size(); ++i) {
+            const auto cells = csv.cells(csv.records()[i]);
+            REQUIRE(cells.size() == cell_count);
+            rows.emplace_back(cells.begin(), cells.end());
+        }
+        return rows;
+    }
+
     fs::path folder_;
 };
 

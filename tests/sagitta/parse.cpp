@@ -51,6 +51,10 @@ TEST_CASE("each dimension") {
     CHECK(parse<dimension::plane_angle>("0.5 mrad") == 0.5 * mrad);
     CHECK(parse<dimension::plane_angle>("90 deg") == 90 * deg);
     CHECK(parse<dimension::flexural_rigidity>("17548 kN*m2") == 17548 * kN * m2);
+    CHECK(parse<dimension::spring_stiffness>("8 kN/mm") == 8 * kN / mm);
+    CHECK(parse<dimension::rotational_stiffness>("500 kN*m/rad") == 500 * kN * m / rad);
+    CHECK(relative(parse<dimension::rotational_stiffness>("2 kip*ft/deg").value(),
+                   2 * 4448.2216152605 * 0.3048 * 180 / std::acos(-1.0)) < 1e-15);
 }
 
 TEST_CASE("numbers as people write them") {

@@ -150,6 +150,7 @@ constexpr std::string_view usual_units(const dimension_powers& powers) {
         habit{{1, -1, 0}, "kN/m N/m kip/ft lbf/ft"},
         habit{{1, -2, 0}, "MPa GPa kPa N/mm2 ksi psi"},
         habit{{1, 2, 0}, "kN*m2 N*m2 kip*in2 kip*ft2"},
+        habit{{1, 1, -1}, "kN*m/rad N*m/rad kip*ft/rad kip*in/rad"},
         habit{{0, 0, 1}, "mrad rad deg"},
         habit{{-1, 1, 0}, "mm/kN m/N in/kip"},
         habit{{-1, 0, 0}, "1/kN 1/kip"},

@@ -37,6 +37,8 @@ TEST_CASE("units read as the constants of the same name") {
     CHECK(means("N/mm/mm", N / mm2));
     CHECK(means("kN*m2", kN * m2));
     CHECK(means("kip*in2", kip * in2));
+    CHECK(means("kN*m/rad", kN * m / rad));
+    CHECK(means("kN/mm", kN / mm));
     CHECK(means("m/m*kN", kN));
     CHECK(means("mm1", mm));
     static_assert(read_unit("kN*m").known);
@@ -75,6 +77,8 @@ TEST_CASE("the usual units of each dimension are units of that dimension") {
     check(powers_of<dimension::stress>);
     check(powers_of<dimension::flexural_rigidity>);
     check(powers_of<dimension::plane_angle>);
+    check(powers_of<dimension::spring_stiffness>);
+    check(powers_of<dimension::rotational_stiffness>);
 }
 
 TEST_CASE("dimensions as powers of force, length and angle") {
@@ -85,5 +89,6 @@ TEST_CASE("dimensions as powers of force, length and angle") {
     static_assert(powers_of<dimension::stress> == dimension_powers{1, -2, 0});
     static_assert(powers_of<dimension::flexural_rigidity> == dimension_powers{1, 2, 0});
     static_assert(powers_of<dimension::plane_angle> == dimension_powers{0, 0, 1});
+    static_assert(powers_of<dimension::rotational_stiffness> == dimension_powers{1, 1, -1});
     static_assert(powers_of<dimension::dimensionless> == dimension_powers{});
 }
