@@ -40,7 +40,8 @@ public:
     /// invalid_input.
     template <class X>
     [[nodiscard]] constexpr quantity<ordinate_unit, number> ordinate(const X& x) const {
-        return ordinate(x, side_of_load(detail::expect_length<number>(x)));
+        const auto place = detail::expect_length<number>(x);
+        return ordinate(place, side_of_load(place));
     }
     template <class X>
     [[nodiscard]] constexpr quantity<ordinate_unit, number> ordinate(const X& x, side which) const {
