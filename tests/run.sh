@@ -10,6 +10,7 @@ cd "$(dirname "$0")/.." || exit 1
 packages="libboost-dev libfmt-dev doctest-dev"
 command -v g++ > /dev/null || packages="$packages g++"
 command -v clang++ > /dev/null || packages="$packages clang"
+packages="$packages libclang-rt-dev" # libFuzzer and the sanitizers of clang
 command -v cmake > /dev/null || packages="$packages cmake"
 command -v ninja > /dev/null || command -v make > /dev/null || packages="$packages ninja-build"
 # shellcheck disable=SC2086 # a list of words
@@ -25,13 +26,13 @@ jobs=$(getconf _NPROCESSORS_ONLN 2> /dev/null) || jobs=2
 passed=0
 failed=0
 
-run_with() { # run_with COMPILER BUILD_FOLDER
+run_with() { # run_with COMPILER BUILD_FOLDER [OPTION_OF_CMAKE]
     echo "== $1: configuring"
     # A cache that another generator, compiler or folder has left behind would only get in the way.
     rm -rf "$2/CMakeCache.txt" "$2/CMakeFiles"
     # -O1 compiles fastest of the levels at which inlined headers are still run and not walked through.
     if ! cmake -S . -B "$2" -G "$generator" -D CMAKE_CXX_COMPILER="$1" -D CMAKE_CXX_FLAGS=-O1 \
-        -D SAGITTA_BENCHMARKS=OFF > "$2.log" 2>&1; then
+        -D SAGITTA_BENCHMARKS=OFF ${3:+"$3"} > "$2.log" 2>&1; then
         cat "$2.log"
         echo "== $1: configuring failed"
         failed=$((failed + 1))
@@ -68,7 +69,7 @@ run_with() { # run_with COMPILER BUILD_FOLDER
 
 mkdir -p build
 run_with g++ build/tests-gcc
-run_with clang++ build/tests-clang
+run_with clang++ build/tests-clang -DSAGITTA_FUZZ=ON
 
 echo "$passed passed, $failed failed"
 [ "$failed" -eq 0 ]

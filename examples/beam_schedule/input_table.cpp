@@ -93,8 +93,13 @@ std::optional<input_table> input_table::open(const std::filesystem::path& folder
                      fmt::format("no readable file in the folder '{}' ({})", folder.string(), why_not), "a CSV file");
         return std::nullopt;
     }
+    return of_text(*std::move(text), file_name, column_names, found);
+}
+
+std::optional<input_table> input_table::of_text(std::string text, std::string_view file_name,
+                                                std::span<const std::string_view> column_names, findings& found) {
     try {
-        input_table table(file_name, column_names, csv_text(*std::move(text)));
+        input_table table(file_name, column_names, csv_text(std::move(text)));
         if (table.csv_.records().empty()) {
             found.refuse({file_name, 0, 0, {}}, "an empty file",
                          fmt::format("a header with the columns {}", fmt::join(column_names, ",")));

@@ -8,6 +8,7 @@
 #include <filesystem>
 #include <optional>
 #include <span>
+#include <string>
 #include <string_view>
 #include <vector>
 
@@ -44,6 +45,10 @@ public:
                                                          std::string_view file_name,
                                                          std::span<const std::string_view> column_names,
                                                          findings& found);
+    /// The same of the text of a file.
+    [[nodiscard]] static std::optional<input_table> of_text(std::string text, std::string_view file_name,
+                                                            std::span<const std::string_view> column_names,
+                                                            findings& found);
 
     [[nodiscard]] std::size_t row_count() const { return csv_.records().size() - 1; }
     [[nodiscard]] input_row row(std::size_t i) const { return {*this, csv_.records()[i + 1]}; }

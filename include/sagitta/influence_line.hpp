@@ -112,13 +112,13 @@ private:
 
     template <load_types::action What, class N>
     quantity<Action, number> effect_of_case(const load_types::concentrated<What, N>& load) const {
-        if constexpr (load.is_lack_of_fit) {
+        if constexpr (load_types::concentrated<What, N>::is_lack_of_fit) {
             refuse_movement(load.size());
         } else {
             const auto x = detail::coherent<dimension::length, number>(load.at());
             if (!(x <= span())) [[unlikely]]
                 detail::refuse("at", x, "must not lie beyond the span of the beam, ", span());
-            if constexpr (load.is_couple) {
+            if constexpr (load_types::concentrated<What, N>::is_couple) {
                 return quantity<Action, number>::from_value(turn(x) * load.size().value());
             } else {
                 return ordinate(x) * load.size();

@@ -17,7 +17,10 @@
 
 namespace reference {
 
-enum class hold { fixed, pinned, free };
+enum class hold { fixed, pinned, free, guided };
+
+constexpr bool against_deflection(hold end) { return end == hold::fixed || end == hold::pinned; }
+constexpr bool against_rotation(hold end) { return end == hold::fixed || end == hold::guided; }
 
 /// Which value is meant at a jump; at the ends of the beam the outer one belongs to the support.
 enum class from { left, right };
@@ -57,15 +60,15 @@ public:
         std::array<std::array<T, 5>, 4> rows{};
         const T zero(0);
         const T one(1);
-        const bool left_held = left_ != hold::free;
-        const bool left_clamped = left_ == hold::fixed;
+        const bool left_held = against_deflection(left_);
+        const bool left_clamped = against_rotation(left_);
         rows[0][left_held ? 0 : 3] = one;
         rows[0][4] = left_held ? left_settlement_ : zero;
         rows[1][left_clamped ? 1 : 2] = one;
         rows[1][4] = left_clamped ? left_rotation_ : zero;
 
-        const bool right_held = right_ != hold::free;
-        const bool right_clamped = right_ == hold::fixed;
+        const bool right_held = against_deflection(right_);
+        const bool right_clamped = against_rotation(right_);
         if (right_held) {
             rows[2] = {one, L_, -L_ * L_ / T(2) / EI_, -L_ * L_ * L_ / T(6) / EI_,
                        right_settlement_ - particular(quantity::deflection, L_, from::right)};

@@ -79,7 +79,7 @@ private:
     void add(const load_types::concentrated<Action, N>& load, const T&) {
         const T a = static_cast<T>(load.at().value());
         const T size = static_cast<T>(load.size().value());
-        if constexpr (load.is_lack_of_fit) {
+        if constexpr (load_types::concentrated<Action, N>::is_lack_of_fit) {
             misfits.push_back({a, load.is_kink ? size : T(0), load.is_kink ? T(0) : size});
         } else {
             loads.push_back({load.is_couple ? acting_kind::couple : acting_kind::point_force, a, a, size, size});

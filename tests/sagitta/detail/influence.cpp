@@ -19,7 +19,8 @@ namespace {
 
 template <class End>
 constexpr hold hold_of() {
-    return End::against_rotation ? hold::fixed : End::against_deflection ? hold::pinned : hold::free;
+    if constexpr (End::against_deflection) return End::against_rotation ? hold::fixed : hold::pinned;
+    return End::against_rotation ? hold::guided : hold::free;
 }
 
 /// A beam of span 1 and stiffness 1 under what act adds to it.
@@ -96,3 +97,7 @@ TEST_CASE("influence functions: clamped, the far end pinned") { compare_all<held
 TEST_CASE("influence functions: clamped, the far end clamped") { compare_all<held::fixed, held::fixed>(); }
 TEST_CASE("influence functions: clamped, the far end free") { compare_all<held::fixed, held::free>(); }
 TEST_CASE("influence functions: free, the far end clamped") { compare_all<held::free, held::fixed>(); }
+TEST_CASE("influence functions: guided, the far end clamped") { compare_all<held::guided, held::fixed>(); }
+TEST_CASE("influence functions: clamped, the far end guided") { compare_all<held::fixed, held::guided>(); }
+TEST_CASE("influence functions: guided, the far end pinned") { compare_all<held::guided, held::pinned>(); }
+TEST_CASE("influence functions: pinned, the far end guided") { compare_all<held::pinned, held::guided>(); }
