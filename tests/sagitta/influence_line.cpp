@@ -9,6 +9,8 @@
 #include <sagitta/extremes.hpp>
 #include <sagitta/shear_flexible.hpp>
 
+#include <boost/multiprecision/cpp_int.hpp>
+
 #include <doctest/doctest.h>
 
 #include <array>
@@ -149,6 +151,49 @@ TEST_CASE("random continuous beams: ordinates are responses to a unit load, also
                                       << worst_reaction);
     CHECK(found.worst < 1e-11);
     CHECK(worst_reaction < 1e-10);
+}
+
+TEST_CASE("ordinates, effects of trains and patterns against direct stiffness in rational numbers") {
+    using exact = boost::multiprecision::cpp_rational;
+    constexpr std::uint64_t seed = 503;
+    CAPTURE(seed);
+    scene::chance random(seed);
+    scene::continuous_kind small;
+    small.spans_most = 4;
+    small.spring_decades = 2;
+    small.may_move = false;
+    double worst = 0;
+    int compared = 0;
+    while (compared < 400) {
+        auto c = scene::random_continuous(random, small).draw();
+        const auto b = scene::beam_of(c);
+        if (refusal([&] { (void)b.under(load_list<>{}); }) != "nothing was refused") continue;
+        CAPTURE(scene::text(c));
+        const double section = random.in(0, c.L);
+        const auto eta = influence_of_moment(b, section * m);
+        const auto eta_v = influence_of_shear(b, section * m);
+        // Two loads, as of a train or a pattern, then each of them alone.
+        const scene::load first{scene::kind::point, random.in(1, 9), 0, random.in(0, c.L), 0};
+        const scene::load second{scene::kind::partial_uniform, random.in(1, 9) / c.mean_span, 0, 0.1 * c.L, 0.6 * c.L};
+        for (const auto& loads : {std::vector{first, second}, std::vector{first}, std::vector{second}}) {
+            c.loads = loads;
+            auto reference = scene::reference_of<exact>(c);
+            REQUIRE(reference.solve());
+            const auto list = scene::list_of(loads);
+            const auto line = b.under(list);
+            const auto note = [&](double computed, reference::quantity what, double size) {
+                const exact truth = reference.value(what, exact(section));
+                worst = std::max(worst, std::abs(static_cast<double>(exact(exact(computed) - truth))) / size);
+                ++compared;
+            };
+            note(eta.effect_of(list).value(), reference::quantity::moment,
+                 std::abs(extremes_of_moment(line).governing().value.value()));
+            note(eta_v.effect_of(list).value(), reference::quantity::shear,
+                 std::abs(extremes_of_shear(line).governing().value.value()));
+        }
+    }
+    MESSAGE("greatest difference of " << compared << " effects, of the greatest of the response: " << worst);
+    CHECK(worst < 1e-12);
 }
 
 TEST_CASE("the effect of a load case is the response to it") {
