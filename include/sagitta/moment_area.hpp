@@ -13,6 +13,7 @@
 #include <sagitta/elastic_line.hpp>
 #include <sagitta/units.hpp>
 
+#include <algorithm>
 #include <initializer_list>
 #include <limits>
 #include <type_traits>
@@ -33,13 +34,10 @@ struct moment_area_result {
 
 namespace detail {
 
-/// A length on a beam of this span, as a plain number.
-template <class T, class X>
-T place_on_span(const X& x, const quantity<dimension::length, T>& span) {
-    const auto place = expect_length<T>(x);
-    if (!(place.value() >= T(0) && place <= span)) [[unlikely]]
-        refuse("x", place, "must lie on the beam, from 0 m to ", span);
-    return place.value();
+template <class T>
+void require_on_span(const quantity<dimension::length, T>& x, const quantity<dimension::length, T>& span) {
+    if (!(x.value() >= T(0) && x <= span)) [[unlikely]]
+        refuse("x", x, "must lie on the beam, from 0 m to ", span);
 }
 
 /// The two theorems between two places, in either order.
@@ -144,7 +142,9 @@ public:
 private:
     template <class X>
     T on_beam(const X& x) const {
-        return detail::place_on_span<T>(x, quantity<dimension::length, T>::from_value(integrator_.span()));
+        const auto place = detail::expect_length<T>(x);
+        detail::require_on_span(place, quantity<dimension::length, T>::from_value(integrator_.span()));
+        return place.value();
     }
     side inner_side(const T& x) const { return x < integrator_.span() ? just_right : just_left; }
 
@@ -211,17 +211,19 @@ template <detail::line_on_nodes Line, class From, class To>
 [[nodiscard]] auto moment_area(const Line& line, const From& first, const To& second) {
     using T = typename Line::number;
     const auto& beam = line.supported();
-    const T a = detail::place_on_span<T>(first, beam.span());
-    const T b = detail::place_on_span<T>(second, beam.span());
+    const auto from = detail::expect_length<T>(first);
+    const auto to = detail::expect_length<T>(second);
+    detail::require_on_span(from, beam.span());
+    detail::require_on_span(to, beam.span());
     if (beam.shear_flexibility().value() > T(0)) [[unlikely]]
         detail::refuse("moment_area: kGA", T(1) / beam.shear_flexibility(),
                        "must be infinite: the theorems hold for bending alone");
     for (const auto& node : beam.nodes()) {
-        const T& at = node.at.value();
-        if (node.is_hinge && (a < b ? a < at && at < b : b < at && at < a)) [[unlikely]]
+        if (node.is_hinge && std::min(from, to) < node.at && node.at < std::max(from, to)) [[unlikely]]
             detail::refuse("moment_area: the hinge", node.at, "must not stand between the two points");
     }
-    return detail::theorems_between<T>(detail::continuous_integrator<T>(beam, line.loads()), a, b);
+    const detail::continuous_integrator<T> integrated(beam, line.loads());
+    return detail::theorems_between<T>(integrated, from.value(), to.value());
 }
 
 }  // namespace sagitta

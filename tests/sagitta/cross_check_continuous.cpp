@@ -82,6 +82,7 @@ scene::continuous jetty() {
                {kind::couple, 2e4, 0, 8},
                {kind::couple, -3e4, 0, 0},
                {kind::point, 2e4, 0, 26},
+               {kind::couple, 1e4, 0, 26},
                {kind::settlement_left, 0.002},
                {kind::rotation_left, 0.003},
                {kind::rotation_right, -0.002},
