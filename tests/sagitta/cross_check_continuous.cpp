@@ -254,10 +254,10 @@ TEST_CASE("a beam solved with any one figure wrong by a millionth is noticed") {
     REQUIRE(cross_check(mistaken_line(solved(told), told)).greatest() <= 1e-13);
     int figures = 0;
     double least = 1;
-    const auto mistake = [&](const std::string& figure, const std::function<double&(scene::continuous&)>& in) {
+    const auto mistake = [&](const std::string& figure, const std::function<double&(scene::continuous&)>& stands) {
         CAPTURE(figure);
         auto misread = told;
-        double& value = in(misread);
+        double& value = stands(misread);
         if (value == 0 || std::isinf(value)) return;
         value *= 1 + 1e-6;
         const double greatest = cross_check(mistaken_line(solved(misread), told)).greatest();

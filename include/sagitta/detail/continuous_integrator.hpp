@@ -69,16 +69,7 @@ public:
     [[nodiscard]] panel_moments<T> curvature_between(const T& a, const T& b) const {
         panel_moments<T> sum;
         for (std::size_t i = part_at(a); i < parts_.size() && parts_[i].from() < b; ++i) {
-            for (const auto& p : parts_[i].panels()) {
-                const T from = std::max(a, p.from);
-                const T to = std::min(b, p.to);
-                if (!(from < to)) continue;
-                const bool is_whole = from == p.from && to == p.to;
-                const auto part = is_whole ? p.curvature : parts_[i].curvature_between(from, to);
-                sum.area += part.area;
-                sum.about_from += part.about_from + part.area * (from - a);
-                sum.about_to += part.about_to + part.area * (b - to);
-            }
+            parts_[i].add_curvature_within(sum, a, b);
         }
         return sum;
     }

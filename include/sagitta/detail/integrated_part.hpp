@@ -63,17 +63,9 @@ public:
     void divide_into_panels() {
         std::sort(joints_.begin(), joints_.end());
         joints_.erase(std::unique(joints_.begin(), joints_.end()), joints_.end());
-        panels_.reserve((joints_.size() - 1) * panels_between_joints);
-        for (std::size_t i = 1; i < joints_.size(); ++i) {
-            const T width = (joints_[i] - joints_[i - 1]) / T(panels_between_joints);
-            T from = joints_[i - 1];
-            for (int k = 1; k <= panels_between_joints; ++k) {
-                const T to = k == panels_between_joints ? joints_[i] : joints_[i - 1] + T(k) * width;
-                // Places a few roundings apart may leave nothing between them.
-                if (from < to) panels_.push_back({from, to});
-                from = to;
-            }
-        }
+        const auto bounds = panel_places(joints_, panels_between_joints);
+        panels_.reserve(bounds.size() - 1);
+        for (std::size_t i = 1; i < bounds.size(); ++i) panels_.push_back({bounds[i - 1], bounds[i]});
     }
 
     /// What the end becomes if the start is this, with or without the loads and curvatures of the part.
@@ -99,9 +91,10 @@ public:
     [[nodiscard]] const line_state<T>& start() const { return start_; }
     [[nodiscard]] const line_state<T>& end() const { return panels_.back().at_to; }
 
-    /// Moments of the curvature of the placed part about both ends of a stretch of one panel.
-    [[nodiscard]] panel_moments<T> curvature_between(const T& from, const T& to) const {
-        return bending(start_, from, to, true);
+    /// Adds what the placed part bends within a stretch from a to b to its moments about a and b.
+    void add_curvature_within(panel_moments<T>& sum, const T& a, const T& b) const {
+        const auto part = [this](const T& from, const T& to) { return bending(start_, from, to, true); };
+        for (const auto& p : panels_) add_within(sum, a, b, p, part);
     }
 
 private:
