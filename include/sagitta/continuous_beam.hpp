@@ -167,7 +167,7 @@ public:
         static_assert(right, "sagitta: a load is expected here, such as uniform_load(4.5*kN/m) or a load_list");
         load_list<T> list;
         if constexpr (right) list += loads;
-        return continuous_line<T>(*this, list);
+        return continuous_line<T>(*this, std::move(list));
     }
 
 private:

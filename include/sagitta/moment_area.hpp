@@ -4,13 +4,16 @@
 
 #include <sagitta/beam.hpp>
 #include <sagitta/detail/acting_loads.hpp>
+#include <sagitta/detail/continuous_integrator.hpp>
 #include <sagitta/detail/expect.hpp>
 #include <sagitta/detail/integrator.hpp>
 #include <sagitta/detail/numeric_profile.hpp>
+#include <sagitta/detail/panel.hpp>
 #include <sagitta/detail/refuse.hpp>
 #include <sagitta/elastic_line.hpp>
 #include <sagitta/units.hpp>
 
+#include <algorithm>
 #include <initializer_list>
 #include <limits>
 #include <type_traits>
@@ -18,7 +21,8 @@
 
 namespace sagitta {
 
-/// What the two moment-area theorems (Mohr) say about two points of an elastic line.
+/// What the two moment-area theorems (Mohr) say about two points of an elastic line. A kink or an offset between them
+/// counts, one that stands right at either of them does not.
 template <class T>
 struct moment_area_result {
     /// Slope at the second point less the slope at the first.
@@ -28,6 +32,32 @@ struct moment_area_result {
     /// Of the first point from the tangent at the second.
     quantity<dimension::length, T> deviation_of_first;
 };
+
+namespace detail {
+
+template <class T>
+void require_on_span(const quantity<dimension::length, T>& x, const quantity<dimension::length, T>& span) {
+    if (!(x.value() >= T(0) && x <= span)) [[unlikely]]
+        refuse("x", x, "must lie on the beam, from 0 m to ", span);
+}
+
+/// The two theorems between two places, in either order.
+template <class T, class Integrator>
+moment_area_result<T> theorems_between(const Integrator& integrated, const T& first, const T& second) {
+    const auto result = [](const T& angle, const T& of_second, const T& of_first) -> moment_area_result<T> {
+        return {quantity<dimension::plane_angle, T>::from_value(angle),
+                quantity<dimension::length, T>::from_value(of_second),
+                quantity<dimension::length, T>::from_value(of_first)};
+    };
+    if (first <= second) {
+        const auto sum = integrated.curvature_between(first, second);
+        return result(-sum.area, -sum.about_to, -sum.about_from);
+    }
+    const auto sum = integrated.curvature_between(second, first);
+    return result(sum.area, -sum.about_from, -sum.about_to);
+}
+
+}  // namespace detail
 
 /// A beam under loads, integrated numerically (integrate_moment_area makes one). Answers as elastic_line does:
 /// x is a length on the beam, else invalid_input; side says which value is meant where shear or moment jump.
@@ -115,23 +145,14 @@ public:
     /// The moment-area theorems between two points, in either order.
     template <class From, class To>
     [[nodiscard]] moment_area_result<T> between(const From& first, const To& second) const {
-        const T a = on_beam(first);
-        const T b = on_beam(second);
-        if (a <= b) {
-            const auto sum = integrator_.curvature_between(a, b);
-            return result(-sum.area, -sum.about_to, -sum.about_from);
-        }
-        const auto sum = integrator_.curvature_between(b, a);
-        return result(sum.area, -sum.about_from, -sum.about_to);
+        return detail::theorems_between<T>(integrator_, on_beam(first), on_beam(second));
     }
 
 private:
     template <class X>
     T on_beam(const X& x) const {
         const auto place = detail::expect_length<T>(x);
-        if (!(place.value() >= T(0) && place.value() <= integrator_.span())) [[unlikely]]
-            detail::refuse("x", place, "must lie on the beam, from 0 m to ",
-                           quantity<dimension::length, T>::from_value(integrator_.span()));
+        detail::require_on_span(place, quantity<dimension::length, T>::from_value(integrator_.span()));
         return place.value();
     }
     side inner_side(const T& x) const { return x < integrator_.span() ? just_right : just_left; }
@@ -140,12 +161,6 @@ private:
         std::vector<quantity<dimension::length, T>> places;
         for (const T& number : numbers) places.push_back(quantity<dimension::length, T>::from_value(number));
         return places;
-    }
-
-    static moment_area_result<T> result(const T& angle, const T& of_second, const T& of_first) {
-        return {quantity<dimension::plane_angle, T>::from_value(angle),
-                quantity<dimension::length, T>::from_value(of_second),
-                quantity<dimension::length, T>::from_value(of_first)};
     }
 
     prismatic_beam<Left, Right, T> beam_;
@@ -196,6 +211,28 @@ template <class Left, class Right, class T, class Loads, class Stiffness>
 template <class Beam, class Loads, class From, class To>
 [[nodiscard]] auto moment_area(const elastic_line<Beam, Loads>& line, const From& first, const To& second) {
     return integrate_moment_area(line.supported(), line.loads()).between(first, second);
+}
+
+/// The same on a continuous beam: the integrator finds what the supports do by itself. The theorems hold for an
+/// unbroken line that only bends: throws invalid_input where a hinge stands between the two points (a point may stand
+/// at one), or the beam deforms in shear.
+template <detail::line_on_nodes Line, class From, class To>
+[[nodiscard]] auto moment_area(const Line& line, const From& first, const To& second) {
+    using T = typename Line::number;
+    const auto& beam = line.supported();
+    const auto from = detail::expect_length<T>(first);
+    const auto to = detail::expect_length<T>(second);
+    detail::require_on_span(from, beam.span());
+    detail::require_on_span(to, beam.span());
+    if (beam.shear_flexibility().value() > T(0)) [[unlikely]]
+        detail::refuse("moment_area: kGA", T(1) / beam.shear_flexibility(),
+                       "must be infinite: the theorems hold for bending alone");
+    for (const auto& node : beam.nodes()) {
+        if (node.is_hinge && std::min(from, to) < node.at && node.at < std::max(from, to)) [[unlikely]]
+            detail::refuse("moment_area: the hinge", node.at, "must not stand between the two points");
+    }
+    const detail::continuous_integrator<T> integrated(beam, line.loads());
+    return detail::theorems_between<T>(integrated, from.value(), to.value());
 }
 
 }  // namespace sagitta

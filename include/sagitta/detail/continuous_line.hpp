@@ -17,6 +17,7 @@
 #include <iterator>
 #include <limits>
 #include <type_traits>
+#include <utility>
 #include <variant>
 #include <vector>
 
@@ -34,9 +35,10 @@ class continuous_line {
 public:
     using number = T;
 
-    continuous_line(const continuous_beam<T>& described, const load_list<T>& loads) : beam_(described) {
+    continuous_line(const continuous_beam<T>& described, load_list<T> loads)
+        : beam_(described), loads_(std::move(loads)) {
         make_parts();
-        distribute(loads);
+        distribute(loads_);
         solve();
     }
 
@@ -129,6 +131,7 @@ public:
     [[nodiscard]] const auto& shear_flexibility() const { return beam_.shear_flexibility(); }
 
     [[nodiscard]] const continuous_beam<T>& supported() const { return beam_; }
+    [[nodiscard]] const load_list<T>& loads() const { return loads_; }
 
     [[nodiscard]] std::vector<quantity<dimension::length, T>> joints() const {
         std::vector<quantity<dimension::length, T>> places;
@@ -232,6 +235,7 @@ private:
     void solve();
 
     continuous_beam<T> beam_;
+    load_list<T> loads_;
     std::vector<detail::node<T>> nodes_;
     std::vector<part> parts_;
     std::vector<quantity<dimension::moment, T>> M_;

@@ -40,9 +40,9 @@ public:
                const T& tolerance = T(0))
         : L_(span), EI_(rigidity), balance_(span, acting) {
         joints_ = acting.joints(span, steps);
-        make_panels(joints_);
+        make_panels(panel_places(joints_, panels_between_joints));
         if constexpr (!is_prismatic) refine(tolerance);
-        insert_misfits(acting);
+        for (const auto& misfit : acting.misfits) insert_misfit(panels_, misfit);
         solve_redundants(acting);
         march(acting);
     }
@@ -75,21 +75,11 @@ public:
         }
     }
 
-    /// Moments of the curvature about both ends of a stretch that may cross panels. Of a lack of fit at one of them it
-    /// takes what elastic lines answer for by default: the one at b, unless b is the end of the beam.
+    /// Moments of the curvature about both ends of a stretch that may cross panels.
     [[nodiscard]] panel_moments<T> curvature_between(const T& a, const T& b) const {
         panel_moments<T> sum;
-        for (const auto& p : panels_) {
-            const T from = std::max(a, p.from);
-            const T to = std::min(b, p.to);
-            const bool is_misfit_between = p.from == p.to && a < p.from && p.from <= b && p.from < L_;
-            if (!(from < to) && !is_misfit_between) continue;
-            const bool is_whole = from == p.from && to == p.to;
-            const auto part = is_whole ? p.curvature : bending(from, to);
-            sum.area += part.area;
-            sum.about_from += part.about_from + part.area * (from - a);
-            sum.about_to += part.about_to + part.area * (b - to);
-        }
+        const auto part = [this](const T& from, const T& to) { return bending(from, to); };
+        for (const auto& p : panels_) add_within(sum, a, b, p, part);
         return sum;
     }
 
@@ -143,28 +133,12 @@ private:
         });
     }
 
-    void make_panels(const std::vector<T>& joints) {
-        panels_.reserve(joints.size() * panels_between_joints);
-        for (std::size_t i = 1; i < joints.size(); ++i) {
-            const T width = (joints[i] - joints[i - 1]) / T(panels_between_joints);
-            T from = joints[i - 1];
-            for (int k = 1; k < panels_between_joints; ++k) {
-                const T to = joints[i - 1] + T(k) * width;
-                panels_.push_back({from, to});
-                from = to;
-            }
-            panels_.push_back({from, joints[i]});
-        }
+    void make_panels(const std::vector<T>& bounds) {
+        panels_.clear();
+        panels_.reserve(bounds.size() - 1);
+        for (std::size_t i = 1; i < bounds.size(); ++i) panels_.push_back({bounds[i - 1], bounds[i]});
     }
 
-    /// A kink is curvature on no width; an offset is a pair of them, of no area but with a moment.
-    void insert_misfits(const acting_loads<T>& acting) {
-        for (const auto& misfit : acting.misfits) {
-            const auto here = std::find_if(panels_.begin(), panels_.end(),
-                                           [&](const panel& p) { return p.from >= misfit.at; });
-            panels_.insert(here, {misfit.at, misfit.at, {misfit.kink, misfit.offset, -misfit.offset}});
-        }
-    }
     void integrate_curvature() {
         for (auto& p : panels_) {
             if (p.from < p.to) p.curvature = bending(p.from, p.to);
@@ -186,10 +160,7 @@ private:
         };
         const auto refined = refine_panels<T, count>(panel_bounds(), fields, tolerance);
         error_estimate_ = refined.error_estimate;
-        panels_.clear();
-        for (std::size_t i = 1; i < refined.bounds.size(); ++i) {
-            panels_.push_back({refined.bounds[i - 1], refined.bounds[i]});
-        }
+        make_panels(refined.bounds);
     }
 
     /// The integral over the beam of a curvature times a moment that varies linearly from end to end: the
