@@ -111,8 +111,7 @@ private:
     }
 
     static void gather(const combination_result& result, beam_outcome& outcome) {
-        outcome.cross_check = std::max(outcome.cross_check, result.cross_check.value_or(0));
-        outcome.is_cross_checked = outcome.is_cross_checked && result.cross_check;
+        outcome.cross_check = std::max(outcome.cross_check, result.cross_check);
         const bool is_first = !outcome.governing;
         if (is_first || result.governing.utilisation > outcome.governing->utilisation) {
             outcome.governing = result.governing;
@@ -155,7 +154,7 @@ private:
         append_cells(out.results.text, {worst.deflection_mm, worst.at_m, worst.limit_mm, worst.utilisation});
         out.results.text += verdict_cell(worst);
         out.results.text += ',';
-        if (result.cross_check) append_number(out.results.text, *result.cross_check);
+        append_number(out.results.text, result.cross_check);
         out.results.text += '\n';
         for (const utilised& value : result.spans) {
             const beam_span& span = entry.supported->spans[value.span];

@@ -47,7 +47,6 @@ struct beam_outcome {
     std::vector<utilised> spans;          // of a continuous beam: what governs each span
     std::vector<support_range> supports;  // likewise
     double cross_check = 0;               // the greatest of all combinations
-    bool is_cross_checked = true;
     bool is_loaded = false;
 };
 

@@ -6,7 +6,6 @@
 #include <sagitta/core.hpp>
 
 #include <cstddef>
-#include <optional>
 #include <vector>
 
 namespace beam_schedule {
@@ -33,7 +32,7 @@ struct combination_result {
     utilised governing;
     std::vector<utilised> spans;           // of a continuous beam only
     std::vector<support_forces> supports;  // likewise
-    std::optional<double> cross_check;     // nothing where there is no independent integration
+    double cross_check = 0;                // greatest discrepancy of an independent integration
     bool is_finite = false;
 };
 

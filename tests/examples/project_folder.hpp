@@ -45,7 +45,7 @@ struct run_outcome {
 struct result_row {
     double greatest_deflection_mm, at_m, limit_mm, utilisation;
     std::string verdict;
-    double cross_check;  // not-a-number where the cell is empty
+    double cross_check;
 };
 
 struct span_row {
