@@ -1,5 +1,6 @@
 #!/bin/sh
-# Builds and runs all tests with g++ and then with clang++: sh tests/run.sh, from any folder.
+# Builds and runs all tests with g++ and then with clang++: sh tests/run.sh, from any folder. A newer compiler of
+# Debian's packages reads each header by itself first.
 #
 # Packages that are missing are installed where that is allowed. The last line is "N passed, N failed", the sum
 # over both compilers; the exit status is 0 only if nothing failed.
@@ -10,6 +11,8 @@ cd "$(dirname "$0")/.." || exit 1
 packages="libboost-dev libfmt-dev doctest-dev"
 command -v g++ > /dev/null || packages="$packages g++"
 command -v clang++ > /dev/null || packages="$packages clang"
+newer_compiler=clang++-16
+command -v "$newer_compiler" > /dev/null || packages="$packages clang-16"
 packages="$packages libclang-rt-dev" # libFuzzer and the sanitizers of clang
 command -v cmake > /dev/null || packages="$packages cmake"
 command -v ninja > /dev/null || command -v make > /dev/null || packages="$packages ninja-build"
@@ -67,7 +70,21 @@ run_with() { # run_with COMPILER BUILD_FOLDER [OPTION_OF_CMAKE]
     passed=$((passed + ${summary#* } - failed_here))
 }
 
+headers_with() { # headers_with COMPILER: each public header by itself, with the warnings of the tests
+    echo "== $1: each header by itself"
+    for header in include/sagitta/*.hpp; do
+        if echo "#include <${header#include/}>" | "$1" -std=c++20 -fsyntax-only -Wall -Wextra -Wpedantic -Wconversion \
+            -Wshadow -Werror -Iinclude -x c++ -; then
+            passed=$((passed + 1))
+        else
+            echo "$header fails"
+            failed=$((failed + 1))
+        fi
+    done
+}
+
 mkdir -p build
+headers_with "$newer_compiler"
 run_with g++ build/tests-gcc
 run_with clang++ build/tests-clang -DSAGITTA_FUZZ=ON
 
