@@ -174,6 +174,10 @@ public:
             required_[i] = static_cast<number>(r.movement().value()) - displacements_[i];
         });
         redundants_ = method_.equations().solve(required_);
+        for (const auto& X : redundants_) {
+            if (!detail::is_finite(X)) [[unlikely]]
+                detail::refuse("force_method: redundant", X, "must come out as a finite number");
+        }
     }
 
     /// 1. The released structure under the loads alone.
