@@ -11,6 +11,13 @@
 #include <system_error>
 #include <type_traits>
 
+#if !defined(__cpp_exceptions)
+#error "sagitta: wrong input is refused by an exception, which -fno-exceptions would turn into something else"
+#endif
+#if defined(__FINITE_MATH_ONLY__) && __FINITE_MATH_ONLY__
+#error "sagitta: -ffast-math (-ffinite-math-only) would drop the refusal of numbers that are not finite"
+#endif
+
 namespace sagitta::detail {
 
 template <class Dimension>
