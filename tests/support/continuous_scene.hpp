@@ -52,30 +52,32 @@ inline std::string text(const continuous& c) {
     return s;
 }
 
-inline sagitta::continuous_beam<> beam_of(const continuous& c) {
+template <class T = double>
+sagitta::continuous_beam<T> beam_of(const continuous& c) {
     using namespace sagitta;
     using namespace sagitta::units;
-    sagitta::continuous_beam<> b(c.L * m, c.EI * N * m2);
+    const auto t = [](double x) { return static_cast<T>(x); };
+    sagitta::continuous_beam<T> b(t(c.L) * m, t(c.EI) * N * m2);
     for (const auto& each : c.supports) {
         if (std::isinf(each.stiffness)) {
-            b.support_at(each.at * m);
+            b.support_at(t(each.at) * m);
         } else {
-            b.spring_at(each.at * m, each.stiffness * N / m);
+            b.spring_at(t(each.at) * m, t(each.stiffness) * N / m);
         }
-        if (each.settled != 0) b.settle_at(each.at * m, each.settled * m);
+        if (each.settled != 0) b.settle_at(t(each.at) * m, t(each.settled) * m);
     }
     const auto hold = [&](auto which, double k) {
         if (std::isinf(k)) {
             b.guide(which);
         } else if (k != 0) {
-            b.turning_spring(which, k * N * m / rad);
+            b.turning_spring(which, t(k) * N * m / rad);
         }
     };
     hold(end::left, c.turning[0]);
     hold(end::right, c.turning[1]);
-    for (const double at : c.hinges) b.hinge_at(at * m);
-    for (const auto& each : c.steps) b.rigidity_from(each.from * m, each.EI * N * m2);
-    if (!std::isinf(c.kGA)) b.shear_rigidity(c.kGA * N);
+    for (const double at : c.hinges) b.hinge_at(t(at) * m);
+    for (const auto& each : c.steps) b.rigidity_from(t(each.from) * m, t(each.EI) * N * m2);
+    if (!std::isinf(c.kGA)) b.shear_rigidity(t(c.kGA) * N);
     return b;
 }
 

@@ -66,57 +66,61 @@ inline bool can_act(const load& l, reference::hold left, reference::hold right) 
     }
 }
 
-inline void add(sagitta::load_list<>& list, const load& l) {
+template <class T>
+void add(sagitta::load_list<T>& list, const load& l) {
+    const T size = static_cast<T>(l.size), size_to = static_cast<T>(l.size_to);
+    const T from = static_cast<T>(l.from), to = static_cast<T>(l.to);
     using namespace sagitta;
     using namespace sagitta::units;
     switch (l.what) {
         case kind::point:
-            list += point_load(l.size * N, at(l.from * m));
+            list += point_load(size * N, at(from * m));
             return;
         case kind::couple:
-            list += applied_couple(l.size * N * m, at(l.from * m));
+            list += applied_couple(size * N * m, at(from * m));
             return;
         case kind::uniform:
-            list += uniform_load(l.size * N / m);
+            list += uniform_load(size * N / m);
             return;
         case kind::partial_uniform:
-            list += partial_uniform_load(l.size * N / m, between(l.from * m, l.to * m));
+            list += partial_uniform_load(size * N / m, between(from * m, to * m));
             return;
         case kind::linear_whole:
-            list += linear_load(l.size * N / m, l.size_to * N / m);
+            list += linear_load(size * N / m, size_to * N / m);
             return;
         case kind::linear:
-            list += linear_load(l.size * N / m, l.size_to * N / m, between(l.from * m, l.to * m));
+            list += linear_load(size * N / m, size_to * N / m, between(from * m, to * m));
             return;
         case kind::settlement_left:
-            list += settlement(end::left, l.size * m);
+            list += settlement(end::left, size * m);
             return;
         case kind::settlement_right:
-            list += settlement(end::right, l.size * m);
+            list += settlement(end::right, size * m);
             return;
         case kind::rotation_left:
-            list += support_rotation(end::left, l.size * rad);
+            list += support_rotation(end::left, size * rad);
             return;
         case kind::rotation_right:
-            list += support_rotation(end::right, l.size * rad);
+            list += support_rotation(end::right, size * rad);
             return;
         case kind::curvature:
-            list += imposed_curvature(l.size / m);
+            list += imposed_curvature(size / m);
             return;
         case kind::partial_curvature:
-            list += imposed_curvature(l.size / m, between(l.from * m, l.to * m));
+            list += imposed_curvature(size / m, between(from * m, to * m));
             return;
         case kind::kink:
-            list += imposed_kink(l.size * rad, at(l.from * m));
+            list += imposed_kink(size * rad, at(from * m));
             return;
         case kind::offset:
-            list += imposed_offset(l.size * m, at(l.from * m));
+            list += imposed_offset(size * m, at(from * m));
             return;
     }
 }
 
-inline sagitta::load_list<> list_of(const std::vector<load>& all) {
-    sagitta::load_list<> list;
+template <class T = double>
+sagitta::load_list<T> list_of(const std::vector<load>& all) {
+    sagitta::load_list<T> list;
     for (const auto& l : all) add(list, l);
     return list;
 }

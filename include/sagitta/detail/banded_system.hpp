@@ -126,8 +126,8 @@ private:
     }
 
     static T magnitude(const T& x) { return x < T(0) ? -x : x; }
-    /// Some 1e-14 in double.
-    static T smallest_pivot() { return T(64) * std::numeric_limits<T>::epsilon(); }
+    /// Some 1e-15 in double: what rounding leaves of a pivot that is none.
+    static T smallest_pivot() { return T(8) * std::numeric_limits<T>::epsilon(); }
 
     std::size_t n_;
     std::vector<T> rows_;
