@@ -1,5 +1,6 @@
 #!/bin/sh
-# Instruction counts of the library against the same deflections by hand (GCC, -O2; callgrind repeats exactly).
+# Instruction counts of the library against the same deflections by hand (GCC, -O2; callgrind repeats exactly); then what a
+# continuous beam costs by its number of spans.
 set -eu
 root=$(cd "$(dirname "$0")/.." && pwd)
 . "$root/.ci/setup.sh"
@@ -7,7 +8,7 @@ need_packages g++ cmake make libboost-dev libfmt-dev valgrind
 build="$root/build/benchmarks"
 cmake -S "$root" -B "$build" -DCMAKE_BUILD_TYPE=Release -DCMAKE_CXX_FLAGS_RELEASE=-O2 -DCMAKE_CXX_COMPILER=g++ \
     -DSAGITTA_TESTS=OFF -DSAGITTA_EXAMPLES=OFF >/dev/null
-cmake --build "$build" --target instruction_counts >/dev/null
+cmake --build "$build" --target instruction_counts --target spans >/dev/null
 program="$build/benchmarks/instruction_counts"
 "$program"
 
@@ -27,3 +28,6 @@ row "evaluate three loads, against textbook formulas" library_evaluates_three_lo
 row "compose three and evaluate, against the same with its checks" library_composes_and_evaluates same_formulas_checked
 row "compose three and evaluate, against the same, nothing checked" library_composes_and_evaluates same_formulas_unchecked
 row "compose three and evaluate, against textbook, nothing checked" library_composes_and_evaluates textbook_evaluates_three_loads
+
+echo
+"$build/benchmarks/spans"
