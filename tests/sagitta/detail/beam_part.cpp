@@ -21,7 +21,8 @@ using flexibility = quantity<beam_part<double>::inverse_force>;
 beam_part<double> part(const flexibility& shear = {}) { return {4.0 * m, 10.0 * m, EI * N * m2, shear}; }
 
 void place(beam_part<double>& p, double M_left = 0, double M_right = 0, double v_left = 0, double v_right = 0) {
-    p.place(M_left * N * m, M_right * N * m, v_left * m, v_right * m);
+    p.place(M_left * N * m, M_right * N * m, v_left * m, v_right * m, (v_right - v_left) / 6 * rad,
+            (M_right - M_left) / 6 * N);
 }
 
 double deflection(const beam_part<double>& p, double x) { return p.at<response::deflection>(x * m, just_right) / m; }
