@@ -2,10 +2,10 @@
 // between them make it one.
 #pragma once
 
-#include <sagitta/detail/banded_system.hpp>
 #include <sagitta/detail/beam_part.hpp>
 #include <sagitta/detail/expect.hpp>
 #include <sagitta/detail/node.hpp>
+#include <sagitta/detail/place_parts.hpp>
 #include <sagitta/detail/refuse.hpp>
 #include <sagitta/ends.hpp>
 #include <sagitta/load.hpp>
@@ -14,8 +14,6 @@
 
 #include <algorithm>
 #include <cstddef>
-#include <iterator>
-#include <limits>
 #include <type_traits>
 #include <utility>
 #include <variant>
@@ -39,7 +37,7 @@ public:
         : beam_(described), loads_(std::move(loads)) {
         make_parts();
         distribute(loads_);
-        solve();
+        M_ = detail::place_parts(nodes_, parts_);
     }
 
     template <class X>
@@ -232,120 +230,11 @@ private:
         }
     }
 
-    void solve();
-
     continuous_beam<T> beam_;
     load_list<T> loads_;
     std::vector<detail::node<T>> nodes_;
     std::vector<part> parts_;
     std::vector<quantity<dimension::moment, T>> M_;
 };
-
-/// Two unknowns a node, its moment and its deflection, and two equations: the sections left and right of it turn
-/// alike, and forces balance. Two more a part, the tilt of its chord and the shear that its end moments make: written out
-/// as equations of their own, so that differences of deflections and of moments keep coefficients that are exact (a beam
-/// on soft springs moves far more than it bends). Scaled to a mean span and the first EI, so that every coefficient is near
-/// 1 and any stiffness k from 0 to infinite enters as k/(1 + k) and 1/(1 + k).
-template <class T>
-void continuous_line<T>::solve() {
-    const std::size_t count = nodes_.size();
-    const T L0 = beam_.span().value() / T(static_cast<double>(parts_.size()));
-    const T EI0 = parts_.front().EI().value();
-    // Nothing is computed with an infinite stiffness: inf * 0 would spoil what a number carries besides its value.
-    const auto is_rigid = [](const T& k) { return k > std::numeric_limits<T>::max(); };
-    const auto stiff = [&](const T& k) {
-        if (is_rigid(k)) return T(1);
-        return k > T(1) ? T(1) / (T(1) + T(1) / k) : k / (T(1) + k);
-    };
-    const auto soft = [&](const T& k) { return is_rigid(k) ? T(0) : T(1) / (T(1) + k); };
-    const auto scaled = [&](const T& k, const T& unit) { return is_rigid(k) ? k : k * unit; };
-    const auto M = [](std::size_t i) { return 4 * i; };
-    const auto v = [](std::size_t i) { return 4 * i + 1; };
-    const auto tilt = [](std::size_t part_number) { return 4 * part_number + 2; };
-    const auto V = [](std::size_t part_number) { return 4 * part_number + 3; };
-    detail::banded_system<T, 4> equations(4 * count - 2);
-
-    std::vector<T> turning_weight(count, T(1)), balance_weight(count, T(1));
-    for (std::size_t i = 0; i < count; ++i) {
-        const detail::node<T>& here = nodes_[i];
-        const bool at_end = i == 0 || i + 1 == count;
-        const T k_turning = scaled(here.turning, L0 / EI0);
-        const T k_transverse = scaled(here.transverse, L0 * L0 * L0 / EI0);
-        balance_weight[i] = soft(k_transverse);
-        equations(v(i), v(i)) = -stiff(k_transverse);
-        equations.right_hand_side(v(i)) = -stiff(k_transverse) * here.settled / L0;
-        if (here.is_hinge || (at_end && here.turning == T(0))) {
-            turning_weight[i] = T(0);
-            equations(M(i), M(i)) = T(1);
-            equations.right_hand_side(M(i)) = here.passed * L0 / EI0;
-        } else if (at_end) {
-            // A spring resists with the moment -k (turn - imposed) at the left end, with +k at the right one.
-            turning_weight[i] = stiff(k_turning);
-            equations(M(i), M(i)) = -soft(k_turning);
-            equations.right_hand_side(M(i)) = (i == 0 ? -turning_weight[i] : turning_weight[i]) * here.turned;
-        }
-    }
-    std::vector<T> powers;
-    powers.reserve(parts_.size());
-    for (std::size_t i = 0; i < parts_.size(); ++i) {
-        const part& p = parts_[i];
-        const auto loaded = p.simply_supported();
-        const T L = p.span().value() / L0;
-        const T bend = EI0 / p.EI().value() * L;
-        const T slide = p.shear_flexibility().value() * EI0 / (L0 * L0);
-        const T load_turn = p.shear_turn().value();
-        // Tilt and shear are counted in units of 1/power, so that a short part has coefficients near 1 as well.
-        const T power = detail::power_of_two_below(L);
-        equations(tilt(i), v(i + 1)) = T(1);
-        equations(tilt(i), v(i)) = T(-1);
-        equations(tilt(i), tilt(i)) = -L / power;
-        equations(V(i), M(i + 1)) = T(1);
-        equations(V(i), M(i)) = T(-1);
-        equations(V(i), V(i)) = -L / power;
-        powers.push_back(power);
-        // One end of the part at a time: sign is 1 for its left end, -1 for its right end.
-        const auto join = [&](std::size_t near, std::size_t far, int sign, const T& slope, const T& reaction) {
-            // The turn of the section, equal on both sides of the node.
-            const T w = T(-sign) * turning_weight[near];
-            equations(M(near), M(near)) += w * T(sign) * bend / T(3);
-            equations(M(near), M(far)) += w * T(sign) * bend / T(6);
-            equations(M(near), V(i)) -= w * slide / power;
-            equations(M(near), tilt(i)) += w / power;
-            equations.right_hand_side(M(near)) -= w * (slope + load_turn);
-            // What the part rests on the node with.
-            const T b = balance_weight[near];
-            equations(v(near), V(i)) += T(sign) * b / power;
-            equations.right_hand_side(v(near)) -= b * reaction * L0 * L0 / EI0;
-        };
-        // A kink that stands right at a node lies between the slope of the node and that of the part.
-        const quantity<dimension::length, T> start{};
-        join(i, i + 1, 1, loaded.slope(start, just_left).value(), loaded.reaction(end::left).value());
-        join(i + 1, i, -1, loaded.slope(p.span(), just_right).value(), loaded.reaction(end::right).value());
-    }
-
-    std::vector<T> unknowns;
-    const std::size_t free_unknown = equations.solve(unknowns);
-    if (free_unknown < 4 * count - 2) [[unlikely]]
-        detail::refuse("continuous_beam: the place", nodes_[free_unknown / 4].at,
-                       free_unknown % 4 == 0 ? "can turn freely: the beam is a mechanism"
-                                             : "can move freely: the beam is a mechanism");
-    // What is known beforehand is exact: the moment in a hinge, the movement of a rigid support.
-    std::vector<quantity<dimension::length, T>> moved;
-    for (std::size_t i = 0; i < count; ++i) {
-        const T& weight = turning_weight[i];
-        const T known = nodes_[i].passed;
-        M_.push_back(quantity<dimension::moment, T>::from_value(weight == T(0) ? known : unknowns[M(i)] * EI0 / L0));
-        const T settled = nodes_[i].settled;
-        moved.push_back(
-            quantity<dimension::length, T>::from_value(balance_weight[i] == T(0) ? settled : unknowns[v(i)] * L0));
-    }
-    for (std::size_t i = 0; i < parts_.size(); ++i) {
-        const T tilted = unknowns[tilt(i)] / powers[i];
-        const T shear = unknowns[V(i)] / powers[i] * EI0 / (L0 * L0);
-        parts_[i].place(M_[i], M_[i + 1], moved[i], moved[i + 1],
-                        quantity<dimension::plane_angle, T>::from_value(tilted),
-                        quantity<dimension::force, T>::from_value(shear));
-    }
-}
 
 }  // namespace sagitta
