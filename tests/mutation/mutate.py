@@ -19,6 +19,7 @@ The headers are copied; the tree is never touched.
 import argparse
 import collections
 import json
+import os
 import pathlib
 import random
 import resource
@@ -230,7 +231,7 @@ def main():
         lock = threading.Lock()
 
         def work(number):
-            table = bench(options.build, options.compiler, f"worker-{number}")
+            table = bench(options.build, options.compiler, f"worker-{os.getpid()}-{number}")
             while time.monotonic() - began < options.stop_after:
                 with lock:
                     if not waiting:
