@@ -169,4 +169,6 @@ TEST_CASE("other number types are refused in the same words") {
     CHECK_REFUSED(simple_beam(-2.0L * m, 1.0L * kN * m2), "span = -2 m");
     using precise = boost::multiprecision::cpp_bin_float_50;
     CHECK_REFUSED(simple_beam(precise(-2) * m, precise(1) * kN * m2), "span = -2 m");
+    CHECK_REFUSED(simple_beam(precise(0) * m, precise(1) * kN * m2), "span = 0 m");
+    CHECK_REFUSED(simple_beam(precise(2) * m, std::numeric_limits<precise>::infinity() * kN * m2), "EI = inf N*m^2");
 }
