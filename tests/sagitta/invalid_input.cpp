@@ -162,6 +162,8 @@ TEST_CASE("values are printed so that they can be told from the bound") {
     const auto said = refusal([&] { (void)line.deflection(6.000000000006 * m); });
     CAPTURE(said);
     CHECK(holds(said, {"x = 6.0000000000", " m must", "6 m"}));
+    // Seventeen digits tell any two doubles apart; more would say nothing.
+    CHECK_REFUSED(line.deflection(std::nextafter(6.0, 7.0) * m), "x = 6.0000000000000009 m must");
 }
 
 TEST_CASE("other number types are refused in the same words") {
@@ -170,5 +172,6 @@ TEST_CASE("other number types are refused in the same words") {
     using precise = boost::multiprecision::cpp_bin_float_50;
     CHECK_REFUSED(simple_beam(precise(-2) * m, precise(1) * kN * m2), "span = -2 m");
     CHECK_REFUSED(simple_beam(precise(0) * m, precise(1) * kN * m2), "span = 0 m");
+    CHECK_NOTHROW((void)simple_beam(precise(1) / 1000 * m, precise(1) / 1000 * kN * m2));
     CHECK_REFUSED(simple_beam(precise(2) * m, std::numeric_limits<precise>::infinity() * kN * m2), "EI = inf N*m^2");
 }

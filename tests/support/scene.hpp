@@ -51,16 +51,15 @@ inline std::string text(const load& l) {
 }
 
 inline bool can_act(const load& l, reference::hold left, reference::hold right) {
-    using reference::hold;
     switch (l.what) {
         case kind::settlement_left:
-            return left != hold::free;
+            return against_deflection(left);
         case kind::settlement_right:
-            return right != hold::free;
+            return against_deflection(right);
         case kind::rotation_left:
-            return left == hold::fixed;
+            return against_rotation(left);
         case kind::rotation_right:
-            return right == hold::fixed;
+            return against_rotation(right);
         default:
             return true;
     }
