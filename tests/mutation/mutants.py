@@ -57,7 +57,7 @@ class mutant:
     def key(self):
         """What stays the same while lines above move: which token of which line, and what becomes of it."""
         again = f" ({self.occurrence})" if self.occurrence > 1 else ""
-        return f"{self.header} | {self.source} | {self.column} | {self.old} -> {self.new}{again}"
+        return f"{self.header} | {self.source} | {self.column} | {self.old} -> {self.new or 'nothing'}{again}"
 
     def applied_to(self, text):
         return text[: self.begin] + self.new + text[self.begin + len(self.old):]
@@ -111,10 +111,10 @@ def mutants_of(header, text):
                 for new in others:
                     add(what, new)
             elif token == "-" and text[begin - 1] in " (,<{" and not text[end].isspace():
-                # The sign in front of a term; a blank keeps what stands before it apart.
-                add("coefficient" if header == "detail/influence.hpp" else "sign", " ")
+                # The sign in front of a term; what stands before it is apart already.
+                add("coefficient" if header == "detail/influence.hpp" else "sign", "")
             elif token == "!" and text[end] != "=":
-                add("condition", " ")
+                add("condition", "")
         elif kind == "word" and token in OTHER:
             is_declared = re.search(r"[\w&>] $", text[:begin][-3:]) and not re.search(r"return $", text[:begin][-7:])
             if not is_declared:

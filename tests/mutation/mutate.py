@@ -213,7 +213,7 @@ def main():
         wanted += found[: options.count]
     if options.list:
         for m in wanted:
-            print(f"{m.kind:<12}{m.header}:{m.line}  {m.old} -> {m.new}  in  {m.source}")
+            print(f"{m.kind:<12}{m.header}:{m.line}  {m.old} -> {m.new or 'nothing'}  in  {m.source}")
         print(len(wanted), "mutants")
         return 0
 
@@ -244,7 +244,7 @@ def main():
                     results[m.key] = {"key": m.key, "kind": m.kind, "how": how, "by": test, "seconds": seconds}
                     with open(options.build / "results.jsonl", "a") as file:
                         file.write(json.dumps(results[m.key]) + "\n")
-                    print(f"{how:<9}{seconds:>6} s  {m.header}:{m.line}: {m.old} -> {m.new}  in  {m.source}", flush=True)
+                    print(f"{how:<9}{seconds:>6} s  {m.header}:{m.line}: {m.old} -> {m.new or 'nothing'}  in  {m.source}", flush=True)
 
         workers = [threading.Thread(target=work, args=(number,)) for number in range(options.jobs)]
         for worker in workers:
