@@ -139,6 +139,15 @@ TEST_CASE("what cannot do better than nothing is empty") {
     CHECK(found.least.loads.cases().empty());
 }
 
+TEST_CASE("a span without any load is in no pattern") {
+    const auto b = equal_spans(3);
+    std::vector<load_list<>> loads(3);
+    loads[1] += uniform_load(1.0 * N / m);
+    const auto found = governing_patterns(influence_of_moment(b, 1.5 * m), loads);
+    CHECK(found.greatest.spans == std::vector<std::size_t>{1});
+    CHECK(found.least.spans.empty());
+}
+
 TEST_CASE("what is refused, by name") {
     const auto b = equal_spans(3);
     const auto eta = influence_of_moment(b, 0.5 * m);
