@@ -267,7 +267,8 @@ std::string report_of(const beam_list& beams, const support_table& supports, con
     }
     if (!of_supports.empty()) {
         out +=
-            "Reactions are positive upward (a support with one below 0 must hold the beam down), moments where the beam "
+            "Reactions are positive upward (a support with one below 0 must hold the beam down), moments where the "
+            "beam "
             "sags.\n";
     }
     out += "Cross-check: greatest relative difference between the closed forms and an independent integration.\n";

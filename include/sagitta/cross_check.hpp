@@ -126,9 +126,9 @@ template <class Left, class Right, class N, class Loads>
 /// steps of stiffness, shear rigidity) and its loads, and finds by itself what its supports do. Reactions count as
 /// shears, moments of the ends as moments; slopes are compared on both sides too.
 ///
-/// Rounding is up to 1e-11, of slopes 1e-10; of shears on springs a million times softer than the beam 1e-9, since they may be a
-/// millionth of the forces that they are the difference of. It grows by the square of how much shorter than a fiftieth of
-/// the mean span the shortest part is. Not-a-number where the beam cannot be told from a mechanism.
+/// Rounding is up to 1e-11, of slopes 1e-10; of shears on springs a million times softer than the beam 1e-9, since they
+/// may be a millionth of the forces that they are the difference of. It grows by the square of how much shorter than a
+/// fiftieth of the mean span the shortest part is. Not-a-number where the beam cannot be told from a mechanism.
 template <detail::line_on_nodes Line>
 [[nodiscard]] auto cross_check(const Line& line) {
     using T = typename Line::number;

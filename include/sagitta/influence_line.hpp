@@ -4,8 +4,8 @@
 //     eta.ordinate(4.0*m);          // moment at 9 m for a load of 1 at 4 m: a length
 //
 // Each is the elastic line of the same beam, unloaded, under a unit displacement of the action that it tells (Müller-
-// Breslau): a kink for a moment, an offset for a shear, a settlement for a reaction; the deflection at a section is that
-// under a unit load there (Maxwell). So it is an exact piecewise cubic, and nothing here knows a formula.
+// Breslau): a kink for a moment, an offset for a shear, a settlement for a reaction; the deflection at a section is
+// that under a unit load there (Maxwell). So it is an exact piecewise cubic, and nothing here knows a formula.
 #pragma once
 
 #include <sagitta/detail/expect.hpp>
@@ -88,7 +88,7 @@ private:
         return x < span() ? just_right : just_left;
     }
 
-    /// The integral of the ordinates times a factor that is linear in x. Three Gauss points are exact to the fifth degree.
+    /// The integral of the ordinates times a factor that is linear in x: the moments of a polynomial, exact.
     template <class Factor>
     constexpr auto integral(const quantity<dimension::length, number>& from,
                             const quantity<dimension::length, number>& to, const Factor& factor) const {

@@ -1,8 +1,9 @@
 // Load cases and their vector space.
 //
 // point_load, applied_couple, uniform_load, partial_uniform_load, linear_load, settlement, support_rotation,
-// imposed_kink, imposed_offset, imposed_curvature and temperature_gradient make load cases; + - * / compose them. A composition whose length is known when compiling allocates nothing
-// and is constexpr; load_list (load_list.hpp) grows at run time.
+// imposed_kink, imposed_offset, imposed_curvature and temperature_gradient make load cases; + - * / compose them. A
+// composition whose length is known when compiling allocates nothing and is constexpr; load_list (load_list.hpp) grows
+// at run time.
 #pragma once
 
 #include <sagitta/detail/expect.hpp>

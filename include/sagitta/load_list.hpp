@@ -12,12 +12,12 @@ namespace load_types {
 /// Any one load case, held by value.
 template <class T>
 using any_load =
-    std::variant<concentrated<action::point_force, T>, concentrated<action::couple, T>,
-                 concentrated<action::kink, T>, concentrated<action::offset, T>, uniform<T, whole_beam>,
-                 uniform<T, stretch<T>>, linear<T, whole_beam>, linear<T, stretch<T>>,
-                 movement<end::left_end, motion::settlement, T>, movement<end::right_end, motion::settlement, T>,
-                 movement<end::left_end, motion::rotation, T>, movement<end::right_end, motion::rotation, T>,
-                 imposed_curvature<T, whole_beam>, imposed_curvature<T, stretch<T>>>;
+    std::variant<concentrated<action::point_force, T>, concentrated<action::couple, T>, concentrated<action::kink, T>,
+                 concentrated<action::offset, T>, uniform<T, whole_beam>, uniform<T, stretch<T>>, linear<T, whole_beam>,
+                 linear<T, stretch<T>>, movement<end::left_end, motion::settlement, T>,
+                 movement<end::right_end, motion::settlement, T>, movement<end::left_end, motion::rotation, T>,
+                 movement<end::right_end, motion::rotation, T>, imposed_curvature<T, whole_beam>,
+                 imposed_curvature<T, stretch<T>>>;
 
 }  // namespace load_types
 

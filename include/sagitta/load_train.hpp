@@ -75,8 +75,8 @@ private:
 };
 
 /// The effect of a train, and where its origin stands then. Where a load of it stands right at a jump of the influence
-/// line, it is meant just beside it: on the way there from the left (just_left) or from the right (just_right). Of a load
-/// right over an end of the beam it is the effect of a load just inside.
+/// line, it is meant just beside it: on the way there from the left (just_left) or from the right (just_right). Of a
+/// load right over an end of the beam it is the effect of a load just inside.
 template <class Action, class T>
 struct train_effect {
     quantity<dimension::length, T> at;
@@ -109,10 +109,10 @@ public:
     train_on_its_way(const Influence& influence, const load_train<T>& train) : train_(train) {
         for (const auto& segment : piecewise_form(influence.deflected())) {
             const auto c = segment.deflection_coefficients();
-            pieces_.push_back({segment.from().value(),
-                               segment.to().value(),
-                               {std::get<0>(c).value(), std::get<1>(c).value(), std::get<2>(c).value(),
-                                std::get<3>(c).value()}});
+            pieces_.push_back(
+                {segment.from().value(),
+                 segment.to().value(),
+                 {std::get<0>(c).value(), std::get<1>(c).value(), std::get<2>(c).value(), std::get<3>(c).value()}});
         }
     }
 
@@ -138,8 +138,8 @@ public:
             if (here == nullptr) continue;
             const auto& c = here->c;
             const T s = from + place - here->from;
-            const T shifted[] = {c[0] + s * (c[1] + s * (c[2] + s * c[3])), c[1] + s * (T(2) * c[2] + s * (T(3) * c[3])),
-                                 c[2] + T(3) * s * c[3], c[3]};
+            const T shifted[] = {c[0] + s * (c[1] + s * (c[2] + s * c[3])),
+                                 c[1] + s * (T(2) * c[2] + s * (T(3) * c[3])), c[2] + T(3) * s * c[3], c[3]};
             T power = axle.force.value();
             for (std::size_t k = 0; k < 4; ++k) {
                 sum.c[k] += shifted[k] * power;

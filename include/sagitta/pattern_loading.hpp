@@ -1,9 +1,11 @@
 // Pattern loading: which spans of a continuous beam have to be loaded for an action to become greatest or least.
 //
 //     const auto worst = governing_patterns(influence_of_moment(bridge, 9.0*m), 12.0*kN/m);
-//     worst.greatest.value; worst.greatest.spans;     // the moment, and the numbers of the spans that are loaded for it
+//     worst.greatest.value; worst.greatest.spans;     // the moment, and the numbers of the spans that are loaded for
+//     it
 //
-// The influence line tells at once: a span adds to the action if the load on it has a positive effect. No pattern is tried.
+// The influence line tells at once: a span adds to the action if the load on it has a positive effect. No pattern is
+// tried.
 #pragma once
 
 #include <sagitta/detail/expect.hpp>
@@ -62,7 +64,7 @@ template <class Influence>
 /// The same for a uniform load w (force per length) on whole spans.
 template <class Influence, class W>
 requires(!std::is_convertible_v<W, std::vector<load_list<typename Influence::number>>>)
-[[nodiscard]] auto governing_patterns(const Influence& influence, const W& uniform) {
+    [[nodiscard]] auto governing_patterns(const Influence& influence, const W& uniform) {
     using T = typename Influence::number;
     const auto w = detail::expect_line_load<T>(uniform);
     std::vector<load_list<T>> loads;

@@ -1,5 +1,6 @@
 """What can be changed in a header: one token at a time, comments, texts and preprocessor lines left alone."""
 
+import collections
 import re
 from dataclasses import dataclass
 
@@ -50,11 +51,13 @@ class mutant:
     new: str
     begin: int       # in the text of the header
     source: str      # the line, without blanks at its ends
+    occurrence: int  # 1, or more where the same line stands in the header again
 
     @property
     def key(self):
         """What stays the same while lines above move: which token of which line, and what becomes of it."""
-        return f"{self.header} | {self.source} | {self.column} | {self.old} -> {self.new}"
+        again = f" ({self.occurrence})" if self.occurrence > 1 else ""
+        return f"{self.header} | {self.source} | {self.column} | {self.old} -> {self.new or 'nothing'}{again}"
 
     def applied_to(self, text):
         return text[: self.begin] + self.new + text[self.begin + len(self.old):]
@@ -79,6 +82,7 @@ def other_numbers(number, is_row):
 def mutants_of(header, text):
     """All mutants of a header, in the order of its text."""
     found = []
+    seen = collections.Counter()
     for match in TOKEN.finditer(text):
         kind = match.lastgroup if match.lastgroup != "suffix" else "number"
         begin, end = match.span(kind)
@@ -92,7 +96,9 @@ def mutants_of(header, text):
         def add(what, new):
             # The column counts from the first character of the line that is no blank: it survives a reformat.
             column = begin - line_begin - (len(source) - len(source.lstrip()))
-            found.append(mutant(header, text.count("\n", 0, begin) + 1, column, what, token, new, begin, source.strip()))
+            seen[source, column, new] += 1
+            found.append(mutant(header, text.count("\n", 0, begin) + 1, column, what, token, new, begin,
+                                source.strip(), seen[source, column, new]))
 
         if kind == "number":
             is_row = "shape<" in source and header == "detail/influence.hpp"
@@ -105,10 +111,10 @@ def mutants_of(header, text):
                 for new in others:
                     add(what, new)
             elif token == "-" and text[begin - 1] in " (,<{" and not text[end].isspace():
-                # The sign in front of a term; a blank keeps what stands before it apart.
-                add("coefficient" if header == "detail/influence.hpp" else "sign", " ")
+                # The sign in front of a term; what stands before it is apart already.
+                add("coefficient" if header == "detail/influence.hpp" else "sign", "")
             elif token == "!" and text[end] != "=":
-                add("condition", " ")
+                add("condition", "")
         elif kind == "word" and token in OTHER:
             is_declared = re.search(r"[\w&>] $", text[:begin][-3:]) and not re.search(r"return $", text[:begin][-7:])
             if not is_declared:

@@ -19,6 +19,7 @@ The headers are copied; the tree is never touched.
 import argparse
 import collections
 import json
+import os
 import pathlib
 import random
 import resource
@@ -161,7 +162,8 @@ def read_results(build):
 
 
 def report(results, wanted, accepted):
-    """Prints what is known about the wanted mutants. True if every survivor is accepted."""
+    """Prints what is known about the wanted mutants: how many of each kind are caught, of all and of those that are
+    unlike the original. True if every survivor is accepted."""
     known = [(m, results[m.key]) for m in wanted if m.key in results]
     print(f"\n{len(known)} of {len(wanted)} mutants tried")
     rows = collections.defaultdict(collections.Counter)
@@ -172,11 +174,12 @@ def report(results, wanted, accepted):
         rows[m.kind][how] += 1
         rows["together"][how] += 1
     columns = ["compile", "fail", "time", "equivalent", "survived"]
-    print(f"{'':<12}" + "".join(f"{c:>12}" for c in ["tried", *columns, "caught"]))
+    print(f"{'':<12}" + "".join(f"{c:>12}" for c in ["tried", *columns, "caught", "of unlike"]))
     for kind in sorted(rows, key=lambda kind: (kind == "together", kind)):
         count = sum(rows[kind].values())
         caught = sum(rows[kind][how] for how in ("compile", "fail", "time"))
-        print(f"{kind:<12}{count:>12}" + "".join(f"{rows[kind][c]:>12}" for c in columns) + f"{caught / count:>11.1%}")
+        print(f"{kind:<12}{count:>12}" + "".join(f"{rows[kind][c]:>12}" for c in columns)
+              + f"{caught / count:>12.1%}{caught / max(count - rows[kind]['equivalent'], 1):>12.1%}")
     survivors = [m for m, result in known if result["how"] == "survived" and m.key not in accepted]
     for m in survivors:
         print(f"survived: {m.header}:{m.line}: {m.kind}\n{m.key}")
@@ -212,7 +215,7 @@ def main():
         wanted += found[: options.count]
     if options.list:
         for m in wanted:
-            print(f"{m.kind:<12}{m.header}:{m.line}  {m.old} -> {m.new}  in  {m.source}")
+            print(f"{m.kind:<12}{m.header}:{m.line}  {m.old} -> {m.new or 'nothing'}  in  {m.source}")
         print(len(wanted), "mutants")
         return 0
 
@@ -230,7 +233,7 @@ def main():
         lock = threading.Lock()
 
         def work(number):
-            table = bench(options.build, options.compiler, f"worker-{number}")
+            table = bench(options.build, options.compiler, f"worker-{os.getpid()}-{number}")
             while time.monotonic() - began < options.stop_after:
                 with lock:
                     if not waiting:
@@ -243,7 +246,7 @@ def main():
                     results[m.key] = {"key": m.key, "kind": m.kind, "how": how, "by": test, "seconds": seconds}
                     with open(options.build / "results.jsonl", "a") as file:
                         file.write(json.dumps(results[m.key]) + "\n")
-                    print(f"{how:<9}{seconds:>6} s  {m.header}:{m.line}: {m.old} -> {m.new}  in  {m.source}", flush=True)
+                    print(f"{how:<9}{seconds:>6} s  {m.header}:{m.line}: {m.old} -> {m.new or 'nothing'}  in  {m.source}", flush=True)
 
         workers = [threading.Thread(target=work, args=(number,)) for number in range(options.jobs)]
         for worker in workers:

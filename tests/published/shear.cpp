@@ -26,16 +26,19 @@ TEST_CASE("the shear part of the greatest deflection") {
     for (const auto& [l, EI, w, P, kGA] : beams) {
         const auto simple = sagitta::simple_beam(l * m, stiffness(EI));
         const auto arm = sagitta::cantilever(l * m, stiffness(EI));
-        row(roark_blodgett, "simple span, uniform load").equals(w * l * l / (8 * kGA), shear_part(simple, uniform(w), kGA, l / 2));
-        row(roark_blodgett, "simple span, load at centre").equals(P * l / (4 * kGA), shear_part(simple, point(P, l / 2), kGA, l / 2));
-        row(roark_blodgett, "cantilever, uniform load").equals(w * l * l / (2 * kGA), shear_part(arm, uniform(w), kGA, l));
+        row(roark_blodgett, "simple span, uniform load")
+            .equals(w * l * l / (8 * kGA), shear_part(simple, uniform(w), kGA, l / 2));
+        row(roark_blodgett, "simple span, load at centre")
+            .equals(P * l / (4 * kGA), shear_part(simple, point(P, l / 2), kGA, l / 2));
+        row(roark_blodgett, "cantilever, uniform load")
+            .equals(w * l * l / (2 * kGA), shear_part(arm, uniform(w), kGA, l));
         row(roark_blodgett, "cantilever, load at tip").equals(P * l / kGA, shear_part(arm, point(P, l), kGA, l));
     }
 }
 
 TEST_CASE("Boresi and Schmidt, example 6: the share of shear in the deflection of a tip") {
-    // Rectangular section, span five times the depth h, E = 200 GPa, G = 77.5 GPa, a load at the tip and one at midspan;
-    // the shear area is 5/6 of the section.
+    // Rectangular section, span five times the depth h, E = 200 GPa, G = 77.5 GPa, a load at the tip and one at
+    // midspan; the shear area is 5/6 of the section.
     const double h = 0.2, width = 0.1, l = 5 * h, E = 200e9, G = 77.5e9, P = 1000;
     const auto arm = sagitta::cantilever(l * m, stiffness(E * width * h * h * h / 12));
     const auto both = point(P, l) + point(P, l / 2);

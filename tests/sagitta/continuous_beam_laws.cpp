@@ -252,9 +252,9 @@ TEST_CASE("units: the same beam in feet and kip and in metres and newtons") {
         const auto in_si =
             si.under(uniform_load(w * kip_in_N / 0.3048 * N / m) + point_load(P * kip_in_N * N, at(metric(a) * m)));
         const double x = random.in(0, l1);
-        worst = std::max({worst,
-                          std::abs((in_us.deflection(x * ft) - in_si.deflection(metric(x) * m)).value()) / sizes(in_si).v,
-                          std::abs((in_us.moment(x * ft) - in_si.moment(metric(x) * m)).value()) / sizes(in_si).M});
+        worst = std::max(
+            {worst, std::abs((in_us.deflection(x * ft) - in_si.deflection(metric(x) * m)).value()) / sizes(in_si).v,
+             std::abs((in_us.moment(x * ft) - in_si.moment(metric(x) * m)).value()) / sizes(in_si).M});
     }
     MESSAGE("greatest difference, of the greatest value: " << worst);
     CHECK(worst < 1e-14);
@@ -277,13 +277,13 @@ TEST_CASE("continuity over supports, and the chain of derivatives between") {
             }
             const auto x = s.at * m;
             const auto jump = [&](const auto& before, const auto& after) { return (after - before).value(); };
-            worst_jump = std::max(worst_jump, std::abs(jump(line.deflection(x, just_left), line.deflection(x, just_right)) -
-                                                       offset) /
-                                                  size.v);
+            worst_jump = std::max(
+                worst_jump,
+                std::abs(jump(line.deflection(x, just_left), line.deflection(x, just_right)) - offset) / size.v);
             if (!hinged && std::isinf(c.kGA)) {
-                worst_jump = std::max(
-                    worst_jump, std::abs(jump(line.slope(x, just_left), line.slope(x, just_right)) + kink) /
-                                    std::max(size.slope, size.v / c.L));
+                worst_jump =
+                    std::max(worst_jump, std::abs(jump(line.slope(x, just_left), line.slope(x, just_right)) + kink) /
+                                             std::max(size.slope, size.v / c.L));
             }
         }
         // V is the derivative of M: over a stretch without joints the secant of a cubic is Simpson's mean of the slope.

@@ -50,7 +50,8 @@ result random_beams(std::uint64_t seed, int count, const scene::continuous_kind&
             CHECK(std::max(one.deflection, one.moment) <= bound);
             CHECK(one.slope <= std::max(bound, bound_of_slope));
             CHECK(one.shear <= bound_of_shear);
-            CHECK(one.greatest() <= std::max({bound, bound_of_slope, bound_of_shear}));  // not-a-number would slip through a maximum
+            CHECK(one.greatest() <=
+                  std::max({bound, bound_of_slope, bound_of_shear}));  // not-a-number would slip through a maximum
             worst = {std::max(worst.shear, one.shear), std::max(worst.moment, one.moment),
                      std::max(worst.slope, one.slope), std::max(worst.deflection, one.deflection)};
         } catch (const invalid_input&) {
@@ -166,7 +167,8 @@ TEST_CASE("random continuous beams on springs a hundred times softer to stiffer,
     MESSAGE("greatest discrepancies: " << text(random_beams(7302, 3000, how, 1e-11, 1e-11)));
 }
 
-TEST_CASE("random continuous beams on springs a million times softer to stiffer, to 1e-11, slopes to 1e-10, shears to 1e-9") {
+TEST_CASE(
+    "random continuous beams on springs a million times softer to stiffer, to 1e-11, slopes to 1e-10, shears to 1e-9") {
     MESSAGE("greatest discrepancies: " << text(random_beams(7303, 3000, {}, 1e-11, 1e-9)));
 }
 

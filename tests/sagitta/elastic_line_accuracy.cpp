@@ -86,8 +86,7 @@ std::vector<double> sections(double L, const std::vector<double>& joints, scene:
 
 /// The greatest magnitude of each quantity along a beam.
 template <class T>
-std::array<double, 4> greatest_values(const reference::beam<T>& exact, double L,
-                                      const std::vector<double>& places) {
+std::array<double, 4> greatest_values(const reference::beam<T>& exact, double L, const std::vector<double>& places) {
     std::vector<double> dense = places;
     for (int i = 1; i < 40; ++i) dense.push_back(L * i / 40);
     std::array<double, 4> greatest{};

@@ -47,6 +47,12 @@ std::vector<summit> summits(hold left, hold right, double L, double EI, const st
     };
     consider(0);
     consider(L);
+    for (const auto& l : loads) {
+        if (l.what != scene::kind::offset && l.what != scene::kind::kink) continue;
+        for (const auto which : {reference::from::left, reference::from::right}) {
+            found.push_back({l.from, exact.value(reference::quantity::deflection, l.from, which)});
+        }
+    }
     constexpr int samples = 2000;
     cpp_bin_float_50 at = 0;
     bool rising = exact.value(reference::quantity::slope, at) > 0;

@@ -56,6 +56,8 @@ TEST_CASE("without a unit the usual one") {
     CHECK(fmt::format("{:.0f}", 999.0 * mm) == "999 mm");
     CHECK(fmt::format("{:.1f}", -12.3 * mm) == "-12.3 mm");
     CHECK(fmt::format("{:.1f}", -3.6 * m) == "-3.6 m");
+    CHECK(fmt::format("{:.1f}", -1.5 * m) == "-1.5 m");
+    CHECK(fmt::format("{:.1f}", -1.0 * m) == "-1.0 m");
     CHECK(fmt::format("{:.0f}", 0.0 * m) == "0 mm");
     CHECK(fmt::format("{:.1f}", 22e3 * N) == "22.0 kN");
     CHECK(fmt::format("{:.1f}", 8e3 * N * m) == "8.0 kN*m");

@@ -53,8 +53,8 @@ answers all_of(const Line& line) {
         all.push_back(line.imposed_curvature(x).value());
     }
     const auto add = [&](const auto& extremes) {
-        all.insert(all.end(), {extremes.greatest.at.value(), extremes.greatest.value.value(),
-                               extremes.least.at.value(), extremes.least.value.value()});
+        all.insert(all.end(), {extremes.greatest.at.value(), extremes.greatest.value.value(), extremes.least.at.value(),
+                               extremes.least.value.value()});
     };
     add(extremes_of_deflection(line));
     add(extremes_of_slope(line));
@@ -86,11 +86,13 @@ struct entrance {
 };
 
 const std::vector<entrance> entrances{
-    {"span of a simple beam", [](double v) { return all_of(simple_beam(v * m, EI).under(uniform_load(1.0 * kN / m))); }},
+    {"span of a simple beam",
+     [](double v) { return all_of(simple_beam(v * m, EI).under(uniform_load(1.0 * kN / m))); }},
     {"span of a fixed beam",
      [](double v) { return all_of(fixed_beam(v * m, EI).under(load_list<>(uniform_load(1.0 * kN / m)))); }},
     {"EI", [](double v) { return all_of(propped_cantilever(L, v * N * m2).under(uniform_load(1.0 * kN / m))); }},
-    {"kGA", [](double v) { return all_of(fixed_beam(L, EI).with_shear_rigidity(v * N).under(uniform_load(1.0 * kN / m))); }},
+    {"kGA",
+     [](double v) { return all_of(fixed_beam(L, EI).with_shear_rigidity(v * N).under(uniform_load(1.0 * kN / m))); }},
     {"point load", [](double v) { return all_of(simple_beam(L, EI).under(point_load(v * N, at(3.0 * m)))); }},
     {"place of a point load", [](double v) { return all_of(fixed_beam(L, EI).under(point_load(1.0 * N, at(v * m)))); }},
     {"couple", [](double v) { return all_of(simple_beam(L, EI).under(applied_couple(v * N * m, at(3.0 * m)))); }},
@@ -98,9 +100,13 @@ const std::vector<entrance> entrances{
      [](double v) { return all_of(fixed_beam(L, EI).under(applied_couple(1.0 * N * m, at(v * m)))); }},
     {"uniform load", [](double v) { return all_of(cantilever(L, EI).under(uniform_load(v * N / m))); }},
     {"start of a stretch",
-     [](double v) { return all_of(fixed_beam(L, EI).under(partial_uniform_load(1.0 * N / m, between(v * m, 5.0 * m)))); }},
+     [](double v) {
+         return all_of(fixed_beam(L, EI).under(partial_uniform_load(1.0 * N / m, between(v * m, 5.0 * m))));
+     }},
     {"stop of a stretch",
-     [](double v) { return all_of(fixed_beam(L, EI).under(partial_uniform_load(1.0 * N / m, between(0.0 * m, v * m)))); }},
+     [](double v) {
+         return all_of(fixed_beam(L, EI).under(partial_uniform_load(1.0 * N / m, between(0.0 * m, v * m))));
+     }},
     {"first size of a linear load",
      [](double v) { return all_of(simple_beam(L, EI).under(linear_load(v * N / m, 1.0 * N / m))); }},
     {"last size of a linear load",
@@ -121,11 +127,13 @@ const std::vector<entrance> entrances{
      }},
     {"load factor", [](double v) { return all_of(simple_beam(L, EI).under(v * uniform_load(1.0 * N / m))); }},
     {"divisor of a load", [](double v) { return all_of(simple_beam(L, EI).under(uniform_load(1.0 * N / m) / v)); }},
-    {"factor of a list", [](double v) { return all_of(simple_beam(L, EI).under(load_list<>(uniform_load(1.0 * N / m)) * v)); }},
+    {"factor of a list",
+     [](double v) { return all_of(simple_beam(L, EI).under(load_list<>(uniform_load(1.0 * N / m)) * v)); }},
     {"section",
      [](double v) {
          const auto line = simple_beam(L, EI).under(uniform_load(1.0 * N / m));
-         return answers{line.deflection(v * m).value(), line.moment(v * m).value(), tangent_at(line, v * m).slope().value()};
+         return answers{line.deflection(v * m).value(), line.moment(v * m).value(),
+                        tangent_at(line, v * m).slope().value()};
      }},
     {"stretch of a question",
      [](double v) {
@@ -150,9 +158,8 @@ const std::vector<entrance> entrances{
      }},
     {"stiffness that varies",
      [](double v) {
-         const auto line = integrate_moment_area(simple_beam(L, EI), uniform_load(1.0 * N / m), [v](const auto& x) {
-             return EI * (1.0 + v * (x / L).value());
-         });
+         const auto line = integrate_moment_area(simple_beam(L, EI), uniform_load(1.0 * N / m),
+                                                 [v](const auto& x) { return EI * (1.0 + v * (x / L).value()); });
          return answers{line.deflection(3.0 * m).value(), greatest_deflection(line).value.value()};
      }},
     {"step of stiffness",
@@ -163,8 +170,9 @@ const std::vector<entrance> entrances{
      }},
     {"tolerance",
      [](double v) {
-         const auto line = integrate_moment_area(simple_beam(L, EI), uniform_load(1.0 * N / m),
-                                                 [](const auto& x) { return EI * (1.0 + (x / L).value()); }, {}, v);
+         const auto line = integrate_moment_area(
+             simple_beam(L, EI), uniform_load(1.0 * N / m), [](const auto& x) { return EI * (1.0 + (x / L).value()); },
+             {}, v);
          return answers{line.deflection(3.0 * m).value()};
      }},
     {"length of a continuous beam",
@@ -175,8 +183,10 @@ const std::vector<entrance> entrances{
      }},
     {"EI of a continuous beam",
      [](double v) { return all_of(girder().rigidity_from(6.0 * m, v * N * m2).under(uniform_load(1.0 * N / m))); }},
-    {"place of a support", [](double v) { return all_of(girder().support_at(v * m).under(uniform_load(1.0 * N / m))); }},
-    {"spring", [](double v) { return all_of(girder().spring_at(14.0 * m, v * N / m).under(uniform_load(1.0 * N / m))); }},
+    {"place of a support",
+     [](double v) { return all_of(girder().support_at(v * m).under(uniform_load(1.0 * N / m))); }},
+    {"spring",
+     [](double v) { return all_of(girder().spring_at(14.0 * m, v * N / m).under(uniform_load(1.0 * N / m))); }},
     {"turning spring",
      [](double v) {
          return all_of(girder().turning_spring(end::left, v * N * m / rad).under(uniform_load(1.0 * N / m)));
@@ -186,7 +196,8 @@ const std::vector<entrance> entrances{
     {"hinge", [](double v) { return all_of(girder().hinge_at(v * m).under(uniform_load(1.0 * N / m))); }},
     {"moment of a hinge",
      [](double v) { return all_of(girder().hinge_at(3.0 * m, v * N * m).under(uniform_load(1.0 * N / m))); }},
-    {"shear rigidity", [](double v) { return all_of(girder().shear_rigidity(v * N).under(uniform_load(1.0 * N / m))); }},
+    {"shear rigidity",
+     [](double v) { return all_of(girder().shear_rigidity(v * N).under(uniform_load(1.0 * N / m))); }},
     {"load on a continuous beam", [](double v) { return all_of(girder().under(point_load(v * N, at(7.0 * m)))); }},
     {"place of a load on a continuous beam",
      [](double v) { return all_of(girder().under(applied_couple(1.0 * N * m, at(v * m)))); }},
@@ -209,8 +220,8 @@ const std::vector<entrance> entrances{
      }},
     {"position of a train",
      [](double v) {
-         return answers{effect_of_train(influence_of_moment(girder(), 7.0 * m), load_train<>{{1.0 * N, 0.0 * m}}, v * m)
-                            .value()};
+         return answers{
+             effect_of_train(influence_of_moment(girder(), 7.0 * m), load_train<>{{1.0 * N, 0.0 * m}}, v * m).value()};
      }},
     {"pattern",
      [](double v) {
@@ -218,8 +229,10 @@ const std::vector<entrance> entrances{
      }},
     {"place of a release",
      [](double v) {
-         return answers{
-             force_method(simple_beam(L, EI), translation_at(v * m)).under(uniform_load(1.0 * N / m)).redundant<0>().value()};
+         return answers{force_method(simple_beam(L, EI), translation_at(v * m))
+                            .under(uniform_load(1.0 * N / m))
+                            .redundant<0>()
+                            .value()};
      }},
     {"movement of a release",
      [](double v) {

@@ -43,9 +43,9 @@ std::string refusal(const F& f) {
     return "nothing was refused";
 }
 
-/// The greatest differences between ordinates and responses to a unit load, relative to the greatest ordinate. Where that
-/// is less than 1e-6 of the size that the beam implies (a moment in a hinge, the deflection of a support), only rounding is
-/// left, and the implied size counts.
+/// The greatest differences between ordinates and responses to a unit load, relative to the greatest ordinate. Where
+/// that is less than 1e-6 of the size that the beam implies (a moment in a hinge, the deflection of a support), only
+/// rounding is left, and the implied size counts.
 struct differences {
     double worst = 0;
     int compared = 0;
@@ -60,7 +60,8 @@ struct differences {
             gap = std::max(gap, std::abs(eta.ordinate(x * m).value() - direct));
             ++compared;
         }
-        for (int i = 0; i <= 20; ++i) size = std::max(size, std::abs(eta.ordinate(std::min(L * i / 20, L) * m).value()));
+        for (int i = 0; i <= 20; ++i)
+            size = std::max(size, std::abs(eta.ordinate(std::min(L * i / 20, L) * m).value()));
         worst = std::max(worst, gap / size);
     }
 };
@@ -73,7 +74,8 @@ void compare(const Beam& b, double section, const std::vector<double>& places, d
     const double soft = L * L * L / b.under(load_list<>{}).rigidity(x).value();
     const auto under = [&](double at_x) { return b.under(load_list<>(point_load(1.0 * N, at(at_x * m)))); };
     found.take(influence_of_moment(b, x), L, L, places, [&](double p) { return under(p).moment(x).value(); });
-    found.take(influence_of_deflection(b, x), L, soft, places, [&](double p) { return under(p).deflection(x).value(); });
+    found.take(influence_of_deflection(b, x), L, soft, places,
+               [&](double p) { return under(p).deflection(x).value(); });
     for (const side which : {just_left, just_right}) {
         if (section == 0 && which == just_left) continue;
         if (section == L && which == just_right) continue;
@@ -142,8 +144,8 @@ TEST_CASE("random continuous beams: ordinates are responses to a unit load, also
             const auto eta = influence_of_reaction(b, s.at * m);
             for (const double x : places) {
                 const auto line = b.under(point_load(1.0 * N, at(x * m)));
-                worst_reaction = std::max(
-                    worst_reaction, std::abs(eta.ordinate(x * m).value() - (line.reaction_at(s.at * m) / N)));
+                worst_reaction =
+                    std::max(worst_reaction, std::abs(eta.ordinate(x * m).value() - (line.reaction_at(s.at * m) / N)));
             }
         }
     }
@@ -198,8 +200,8 @@ TEST_CASE("ordinates, effects of trains and patterns against direct stiffness in
 
 TEST_CASE("the effect of a load case is the response to it") {
     load_list<> loads;
-    loads += point_load(3.0 * kN, at(1.0 * m)) + applied_couple(2.0 * kN * m, at(5.5 * m)) + uniform_load(1.5 * kN / m) +
-             partial_uniform_load(4.0 * kN / m, between(2.0 * m, 7.0 * m)) +
+    loads += point_load(3.0 * kN, at(1.0 * m)) + applied_couple(2.0 * kN * m, at(5.5 * m)) +
+             uniform_load(1.5 * kN / m) + partial_uniform_load(4.0 * kN / m, between(2.0 * m, 7.0 * m)) +
              linear_load(1.0 * kN / m, -2.0 * kN / m, between(0.5 * m, 8.0 * m));
     const auto EI = 1.0e6 * N * m2;
     continuous_beam bridge(10.0 * m, EI);
@@ -244,8 +246,9 @@ TEST_CASE("they are cubics between the joints") {
 TEST_CASE("what is refused, by name") {
     continuous_beam bridge(10.0 * m, 1.0e6 * N * m2);
     bridge.support_at(0.0 * m).support_at(10.0 * m);
-    CHECK(refusal([&] { (void)influence_of_moment(bridge, 10.5 * m); }).find(
-              "influence line: section x = 10.5 m must lie on the beam, from 0 m to 10 m") == 0);
+    CHECK(refusal([&] {
+              (void)influence_of_moment(bridge, 10.5 * m);
+          }).find("influence line: section x = 10.5 m must lie on the beam, from 0 m to 10 m") == 0);
     CHECK(refusal([&] { (void)influence_of_reaction(bridge, 5.0 * m); }).find("settle_at: x = 5 m") == 0);
     const auto eta = influence_of_moment(bridge, 5.0 * m);
     CHECK(refusal([&] { (void)eta.ordinate(11.0 * m); }).find("x = 11 m must lie on the beam") == 0);

@@ -157,8 +157,10 @@ TEST_CASE("a place on the elastic line") {
 }
 
 TEST_CASE("values are printed so that they can be told from the bound") {
-    // One part in 10^12 beyond: with nine digits the sentence would contradict itself.
     const auto line = joist.under(uniform_load(1.0 * kN / m));
+    // Seventeen digits tell any two doubles apart; more would say nothing.
+    CHECK_REFUSED(line.deflection(std::nextafter(6.0, 7.0) * m), "x = 6.0000000000000009 m must");
+    // One part in 10^12 beyond: with nine digits the sentence would contradict itself.
     const auto said = refusal([&] { (void)line.deflection(6.000000000006 * m); });
     CAPTURE(said);
     CHECK(holds(said, {"x = 6.0000000000", " m must", "6 m"}));
@@ -169,4 +171,7 @@ TEST_CASE("other number types are refused in the same words") {
     CHECK_REFUSED(simple_beam(-2.0L * m, 1.0L * kN * m2), "span = -2 m");
     using precise = boost::multiprecision::cpp_bin_float_50;
     CHECK_REFUSED(simple_beam(precise(-2) * m, precise(1) * kN * m2), "span = -2 m");
+    CHECK_REFUSED(simple_beam(precise(0) * m, precise(1) * kN * m2), "span = 0 m");
+    CHECK_NOTHROW((void)simple_beam(precise(1) / 1000 * m, precise(1) / 1000 * kN * m2));
+    CHECK_REFUSED(simple_beam(precise(2) * m, std::numeric_limits<precise>::infinity() * kN * m2), "EI = inf N*m^2");
 }

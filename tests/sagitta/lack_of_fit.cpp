@@ -154,8 +154,10 @@ TEST_CASE("shear deformation: stiff in shear it is the same, soft in shear the c
 TEST_CASE("what is refused, by name") {
     CHECK(refusal([] { (void)imposed_kink(std::nan("") * rad, at(1.0 * m)); }).find("imposed_kink: size") == 0);
     CHECK(refusal([] { (void)imposed_offset(INFINITY * m, at(1.0 * m)); }).find("imposed_offset: size") == 0);
-    CHECK(refusal([] { (void)simple_beam(L, EI).under(imposed_kink(1.0 * rad, at(8.0 * m))); }).find(
-              "imposed_kink: at = 8 m") == 0);
-    CHECK(refusal([] { (void)simple_beam(L, EI).under(imposed_offset(1.0 * m, at(8.0 * m))); }).find(
-              "imposed_offset: at = 8 m") == 0);
+    CHECK(refusal([] {
+              (void)simple_beam(L, EI).under(imposed_kink(1.0 * rad, at(8.0 * m)));
+          }).find("imposed_kink: at = 8 m") == 0);
+    CHECK(refusal([] {
+              (void)simple_beam(L, EI).under(imposed_offset(1.0 * m, at(8.0 * m)));
+          }).find("imposed_offset: at = 8 m") == 0);
 }

@@ -84,15 +84,16 @@ void compare(const Influence& eta, const load_train<>& train, double L, tally& f
 
 TEST_CASE("one load, two loads: the places of the published rules") {
     // AISC Steel Construction Manual, Table 3-23 diagrams 40 to 42, from memory: one load is worst at midspan; of two
-    // loads P1 >= P2 at a distance a the moment under P1 is greatest where P1 and the resultant are as far from midspan.
+    // loads P1 >= P2 at a distance a the moment under P1 is greatest where P1 and the resultant are as far from
+    // midspan.
     const double l = 10, P1 = 7, P2 = 4, a = 3;
     const auto one = extremes_of_train(influence_of_moment(simple, 5.0 * m), load_train<>{{P1 * N, 0.0 * m}});
     CHECK(relative(one.greatest.value / (N * m), P1 * l / 4) < 1e-14);
     CHECK(one.greatest.at == 5.0 * m);
     CHECK(one.least.value == 0.0 * N * m);
     const double x = (l - P2 * a / (P1 + P2)) / 2;
-    const auto two = extremes_of_train(influence_of_moment(simple, x * m),
-                                       load_train<>{{P1 * N, 0.0 * m}, {P2 * N, a * m}});
+    const auto two =
+        extremes_of_train(influence_of_moment(simple, x * m), load_train<>{{P1 * N, 0.0 * m}, {P2 * N, a * m}});
     CHECK(relative(two.greatest.value / (N * m), (P1 + P2) * x * x / l) < 1e-14);
     CHECK(relative(two.greatest.at / m, x) < 1e-14);
 }

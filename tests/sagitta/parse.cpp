@@ -103,6 +103,7 @@ TEST_CASE("what cannot be read is refused, saying what was found and what would 
     CHECK(other_dimension.expected == "one of the units m, mm, cm, ft, in");
     CHECK(other_dimension.offset == 4);
     CHECK(failure_of<dimension::length>("7.2").found == "no unit");
+    CHECK(failure_of<dimension::length>("+7").found == "no unit");
     CHECK(failure_of<dimension::length>("").found == "nothing");
     CHECK(failure_of<dimension::length>("seven m").found == "'seven m'");
     CHECK(failure_of<dimension::length>("seven m").offset == 0);
@@ -111,6 +112,20 @@ TEST_CASE("what cannot be read is refused, saying what was found and what would 
     CHECK(failure_of<dimension::force>("5 m").expected == "one of the units kN, N, MN, lbf, kip");
     CHECK_THROWS_WITH_AS((void)parse<dimension::force>("5 m"),
                          "'5 m': found the unit 'm', expected one of the units kN, N, MN, lbf, kip", invalid_input);
+}
+
+TEST_CASE("where nothing is written, a value that someone might have written is shown") {
+    const auto shown = [](const parse_failure& failure, const std::string& example) {
+        return failure.expected == "a number with a unit, such as '" + example + "'";
+    };
+    CHECK(shown(failure_of<dimension::length>(""), "7.2 m"));
+    CHECK(shown(failure_of<dimension::second_moment_of_area>(""), "8356 cm4"));
+    CHECK(shown(failure_of<dimension::force>(""), "22 kN"));
+    CHECK(shown(failure_of<dimension::moment>(""), "8 kN*m"));
+    CHECK(shown(failure_of<dimension::line_load>(""), "4.5 kN/m"));
+    CHECK(shown(failure_of<dimension::stress>(""), "210 GPa"));
+    CHECK(shown(failure_of<dimension::plane_angle>(""), "0.5 mrad"));
+    CHECK(shown(failure_of<dimension::flexural_rigidity>(""), "1 kN*m2"));
 }
 
 TEST_CASE("a value survives writing and reading") {

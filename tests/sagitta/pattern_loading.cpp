@@ -70,8 +70,8 @@ double compare(const continuous_beam<>& b, const Influence& eta, const std::vect
 }  // namespace
 
 TEST_CASE("two and three equal spans: the patterns and coefficients that practice uses") {
-    // Coefficients of w L^2 and w L for equal spans, common practice in beam tables, from memory: midspan moments 0.070 and
-    // 0.096 come to lie off the middle, so that here the support moments and reactions are checked, which are exact
+    // Coefficients of w L^2 and w L for equal spans, common practice in beam tables, from memory: midspan moments 0.070
+    // and 0.096 come to lie off the middle, so that here the support moments and reactions are checked, which are exact
     // fractions derived with the theorem of three moments.
     const auto b = equal_spans(3);
     const auto support = governing_patterns(influence_of_moment(b, 1.0 * m), 1.0 * N / m);
@@ -139,9 +139,19 @@ TEST_CASE("what cannot do better than nothing is empty") {
     CHECK(found.least.loads.cases().empty());
 }
 
+TEST_CASE("a span without any load is in no pattern") {
+    const auto b = equal_spans(3);
+    std::vector<load_list<>> loads(3);
+    loads[1] += uniform_load(1.0 * N / m);
+    const auto found = governing_patterns(influence_of_moment(b, 1.5 * m), loads);
+    CHECK(found.greatest.spans == std::vector<std::size_t>{1});
+    CHECK(found.least.spans.empty());
+}
+
 TEST_CASE("what is refused, by name") {
     const auto b = equal_spans(3);
     const auto eta = influence_of_moment(b, 0.5 * m);
-    CHECK(refusal([&] { (void)governing_patterns(eta, std::vector<load_list<>>(2)); }).find(
-              "governing_patterns: number of loads = 2 must be the number of spans") == 0);
+    CHECK(refusal([&] {
+              (void)governing_patterns(eta, std::vector<load_list<>>(2));
+          }).find("governing_patterns: number of loads = 2 must be the number of spans") == 0);
 }

@@ -69,8 +69,8 @@ std::array<double, 4> differences(const Line& line, scene::chance& random) {
         for (int k = 0; k < 6; ++k) {
             const auto x = k == 0 ? s.from() : k == 1 ? s.to() : s.from() + (s.to() - s.from()) * random.in(0, 1);
             const side inside = k == 1 ? just_left : just_right;
-            compare(0, s.deflection(x).value(), line.deflection(x).value());
-            compare(1, s.slope(x).value(), line.slope(x).value());
+            compare(0, s.deflection(x).value(), line.deflection(x, inside).value());
+            compare(1, s.slope(x).value(), line.slope(x, inside).value());
             compare(2, s.moment(x).value(), line.moment(x, inside).value());
             compare(3, s.shear(x).value(), line.shear(x, inside).value());
         }

@@ -115,6 +115,7 @@ TEST_CASE("units of areas and second moments") {
     check(mm2, cpp_rational(1, 1000000));
     check(in2, inch * inch);
     check(m4, 1);
+    static_assert(std::is_same_v<decltype(1.0 * m4)::unit_type, dimension::second_moment_of_area>);
     check(cm4, cpp_rational(1, 100000000));
     check(mm4, cpp_rational(1, 1000000) * cpp_rational(1, 1000000));
     check(in4, inch * inch * inch * inch);
@@ -147,6 +148,13 @@ TEST_CASE("a quantity over a unit of its dimension is a plain number") {
     static_assert(std::is_same_v<decltype(1.0F * m / mm), float>);
     static_assert(std::is_same_v<decltype(6.0 * kN / m)::unit_type, dimension::line_load>);
     static_assert(6.0 * kN / (2.0 * m) == 3.0 * kN / m);
+}
+
+TEST_CASE("a quantity knows its dimension, a plain number has none") {
+    static_assert(detail::has_dimension<decltype(1.0 * m), dimension::length>);
+    static_assert(detail::has_dimension<decltype(1.0F * ft), dimension::length>);
+    static_assert(!detail::has_dimension<decltype(1.0 * m), dimension::force>);
+    static_assert(!detail::has_dimension<double, dimension::length>);
 }
 
 TEST_CASE("integers become doubles, so that nothing is truncated") {

@@ -101,7 +101,8 @@ bool compare(const continuous& c, chance& random, found& one) {
         const T truth = reference.reaction(s.at);
         force = std::max(force, std::abs(static_cast<double>(truth)));
         force_error =
-            std::max(force_error, std::abs(static_cast<double>(T(T(line.reaction_at(static_cast<N>(s.at) * m).value()) - truth))));
+            std::max(force_error,
+                     std::abs(static_cast<double>(T(T(line.reaction_at(static_cast<N>(s.at) * m).value()) - truth))));
     }
     double moment = greatest[2], moment_error = 0;
     for (const bool at_left : {true, false}) {

@@ -45,22 +45,22 @@ struct load {
 inline std::string text(const load& l) {
     const char* const names[] = {"point",         "couple",         "uniform",         "partial uniform",
                                  "linear whole",  "linear",         "settlement left", "settlement right",
-                                 "rotation left", "rotation right", "curvature",       "partial curvature", "kink", "offset"};
+                                 "rotation left", "rotation right", "curvature",       "partial curvature",
+                                 "kink",          "offset"};
     return std::string(names[static_cast<int>(l.what)]) + " " + std::to_string(l.size) + ", " +
            std::to_string(l.size_to) + " from " + std::to_string(l.from) + " to " + std::to_string(l.to);
 }
 
 inline bool can_act(const load& l, reference::hold left, reference::hold right) {
-    using reference::hold;
     switch (l.what) {
         case kind::settlement_left:
-            return left != hold::free;
+            return against_deflection(left);
         case kind::settlement_right:
-            return right != hold::free;
+            return against_deflection(right);
         case kind::rotation_left:
-            return left == hold::fixed;
+            return against_rotation(left);
         case kind::rotation_right:
-            return right == hold::fixed;
+            return against_rotation(right);
         default:
             return true;
     }
@@ -127,7 +127,7 @@ sagitta::load_list<T> list_of(const std::vector<load>& all) {
 
 template <class T>
 reference::beam<T> reference_of(reference::hold left, reference::hold right, double L, double EI,
-                                          const std::vector<load>& all) {
+                                const std::vector<load>& all) {
     reference::beam<T> b(left, right, L, EI);
     for (const auto& l : all) {
         switch (l.what) {

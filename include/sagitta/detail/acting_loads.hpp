@@ -61,7 +61,8 @@ struct acting_loads {
         }
     }
 
-    /// Where loads, curvatures, lacks of fit and the given steps of stiffness begin and end, and the ends of the beam, ascending.
+    /// Where loads, curvatures, lacks of fit and the given steps of stiffness begin and end, and the ends of the beam,
+    /// ascending.
     [[nodiscard]] std::vector<T> joints(const T& beam_span, const std::vector<T>& steps) const {
         std::vector<T> places{T(0), beam_span};
         places.reserve(2 + 2 * (loads.size() + curvatures.size()) + steps.size());

@@ -32,9 +32,9 @@ public:
     T& operator()(std::size_t equation, std::size_t unknown) { return rows_[place(equation, unknown)]; }
     T& right_hand_side(std::size_t equation) { return right_[equation]; }
 
-    /// Solves, with iterative refinement: what a solution leaves over, formed in a wider number type, is solved for once
-    /// more. Then the unknowns are good to rounding unless the equations themselves are not.
-    /// Returns n, or the first unknown that the equations do not determine. Uses the equations up.
+    /// Solves, with iterative refinement: what a solution leaves over, formed in a wider number type, is solved for
+    /// once more. Then the unknowns are good to rounding unless the equations themselves are not. Returns n, or the
+    /// first unknown that the equations do not determine. Uses the equations up.
     std::size_t solve(std::vector<T>& unknowns) {
         scale_rows();
         const std::vector<T> given = rows_;

@@ -144,9 +144,7 @@ private:
         return sum;
     }
 
-    quantity<force, T> mean_shear() const {
-        return shear_ - sum_of_couples(span(), side::just_right) / span();
-    }
+    quantity<force, T> mean_shear() const { return shear_ - sum_of_couples(span(), side::just_right) / span(); }
 
     /// The integral of (shear - mean shear)/kGA up to s. Zero at both ends of the part.
     quantity<length, T> shear_deflection(const quantity<length, T>& s) const {

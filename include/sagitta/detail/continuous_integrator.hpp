@@ -83,7 +83,7 @@ private:
         T transverse, turning;  // stiffnesses, infinite: rigid
         T settled, turned;
         bool is_hinge;
-        T passed;  // by the hinge
+        T passed;                       // by the hinge
         T force = T(0), couple = T(0);  // of the loads
     };
 

@@ -148,9 +148,7 @@ private:
         return place;
     }
 
-    side inner_side(const quantity<dimension::length, T>& x) const {
-        return x < beam_.span() ? just_right : just_left;
-    }
+    side inner_side(const quantity<dimension::length, T>& x) const { return x < beam_.span() ? just_right : just_left; }
     bool is_left_end(const quantity<dimension::length, T>& x, side which) const {
         return which == side::just_left && !(x > quantity<dimension::length, T>{});
     }

@@ -53,8 +53,9 @@ public:
     static constexpr bool is_offset = Action == action::offset;
     /// Whether it imposes a deformation instead of a force.
     static constexpr bool is_lack_of_fit = is_kink || is_offset;
-    using unit = std::conditional_t<
-        is_couple, moment, std::conditional_t<is_kink, plane_angle, std::conditional_t<is_offset, length, force>>>;
+    using unit =
+        std::conditional_t<is_couple, moment,
+                           std::conditional_t<is_kink, plane_angle, std::conditional_t<is_offset, length, force>>>;
 
     constexpr concentrated(const quantity<unit, T>& size, const position<T>& where) : size_(size), where_(where) {
         detail::require_finite(is_couple   ? "applied_couple: size"

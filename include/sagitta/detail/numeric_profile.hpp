@@ -42,11 +42,10 @@ public:
         std::vector<T> cuts{T(0)};
         for (const auto& turning : turning_points(*this)) cuts.push_back(turning.at);
         cuts.push_back(T(1));
-        return roots_between_cuts<std::vector<root<T>>>(
-            *this, cuts, tolerance, [&](const T& low, const T& high) {
-                return bracketed_root([&](const T& t) { return (*this)(t); }, [&](const T& t) { return growth(t); },
-                                      low, high);
-            });
+        return roots_between_cuts<std::vector<root<T>>>(*this, cuts, tolerance, [&](const T& low, const T& high) {
+            return bracketed_root([&](const T& t) { return (*this)(t); }, [&](const T& t) { return growth(t); }, low,
+                                  high);
+        });
     }
 
     friend std::vector<root<T>> turning_points(const numeric_profile& profile) { return profile.turning(); }

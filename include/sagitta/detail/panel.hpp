@@ -49,8 +49,7 @@ panel_moments<T> moments_of(const acting_misfit<T>& misfit) {
 /// Inserts a lack of fit among the panels of a curvature diagram, which are in order, as one of no width.
 template <class Panel, class T>
 void insert_misfit(std::vector<Panel>& panels, const acting_misfit<T>& misfit) {
-    const auto here =
-        std::find_if(panels.begin(), panels.end(), [&](const Panel& p) { return p.from >= misfit.at; });
+    const auto here = std::find_if(panels.begin(), panels.end(), [&](const Panel& p) { return p.from >= misfit.at; });
     panels.insert(here, Panel{misfit.at, misfit.at, moments_of(misfit)});
 }
 
@@ -71,7 +70,8 @@ std::vector<T> panel_places(const std::vector<T>& joints, int between_joints) {
 }
 
 /// Adds what a panel bends within a stretch from a to b to its moments about a and b. The last argument integrates
-/// the curvature between two places of the panel. A panel of no width (a lack of fit) counts between a and b, not at them.
+/// the curvature between two places of the panel. A panel of no width (a lack of fit) counts between a and b, not at
+/// them.
 template <class T, class Panel, class Part>
 void add_within(panel_moments<T>& sum, const T& a, const T& b, const Panel& p, const Part& part_of_panel) {
     const T from = std::max(a, p.from);

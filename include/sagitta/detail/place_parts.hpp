@@ -17,10 +17,10 @@ namespace sagitta::detail {
 /// Places every part and returns the moments at the nodes; invalid_input where the beam is a mechanism.
 ///
 /// Two unknowns a node, its moment and its deflection, and two equations: the sections left and right of it turn
-/// alike, and forces balance. Two more a part, the tilt of its chord and the shear that its end moments make: written out
-/// as equations of their own, so that differences of deflections and of moments keep coefficients that are exact (a beam
-/// on soft springs moves far more than it bends). Scaled to a mean span and the first EI, so that every coefficient is near
-/// 1 and any stiffness k from 0 to infinite enters as k/(1 + k) and 1/(1 + k).
+/// alike, and forces balance. Two more a part, the tilt of its chord and the shear that its end moments make: written
+/// out as equations of their own, so that differences of deflections and of moments keep coefficients that are exact (a
+/// beam on soft springs moves far more than it bends). Scaled to a mean span and the first EI, so that every
+/// coefficient is near 1 and any stiffness k from 0 to infinite enters as k/(1 + k) and 1/(1 + k).
 template <class T>
 std::vector<quantity<moment, T>> place_parts(const std::vector<node<T>>& nodes, std::vector<beam_part<T>>& parts) {
     const std::size_t count = nodes.size();

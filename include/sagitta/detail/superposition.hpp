@@ -38,7 +38,9 @@ struct effect_sums {
 };
 
 template <class Effect>
-inline constexpr bool is_lack_of_fit = requires { requires Effect::is_lack_of_fit; };
+inline constexpr bool is_lack_of_fit = requires {
+    requires Effect::is_lack_of_fit;
+};
 
 /// The effects of loads known when compiling: a tuple, no allocation.
 template <class Beam, class Loads>

@@ -106,6 +106,12 @@ TEST_CASE("one equation, and a long chain") {
     std::vector<double> x;
     REQUIRE(one.solve(x) == 1);
     CHECK(x[0] == 2.5);
+    // How large its numbers are says nothing of whether an equation determines anything.
+    banded_system<double, 3> small(1);
+    small(0, 0) = 4e-30;
+    small.right_hand_side(0) = 1e-29;
+    REQUIRE(small.solve(x) == 1);
+    CHECK(x[0] == doctest::Approx(2.5));
     // x(i-1) - 2 x(i) + x(i+1) = -2/(n+1)^2: the parabola t (1 - t) exactly, t = (i+1)/(n+1).
     const std::size_t n = 999;
     banded_system<double, 1> chain(n);

@@ -17,6 +17,9 @@ TEST_CASE("scales multiply, divide and invert by their powers") {
     static_assert(kip / foot * foot == kip);
     static_assert((kip * foot).inverse().inverse() == kip * foot);
     static_assert(!(kip == foot));
+    constexpr scale degree{.degrees = 1};
+    static_assert(kip * foot / degree == scale{.tens = 3, .twelves = 1, .inches = 1, .pounds = 1, .degrees = -1});
+    static_assert(degree * degree == scale{.degrees = 2});
 }
 
 TEST_CASE("conversion known when compiling and at run time are the same") {

@@ -54,6 +54,13 @@ TEST_CASE("a shape is the sum of its terms over its divisor") {
     CHECK(shape<7, 0, 0, 0>::value(n, f) == 0);
     CHECK(shape<1, 0, 4, 0>::value(n, f) == 4 * n * f);
     CHECK(shape<6, 4, 2>::value(n, f) == (4 * f + 2 * n) / 6);
+    static_assert(shape<7, 0, 0, 0>::is_zero && !shape<1, 1, 1>::is_zero && !shape<6, 0, 2, 0>::is_zero);
+}
+
+TEST_CASE("a stretch seen from the other end") {
+    constexpr sagitta::detail::fractions<double> seen{0.25, 0.75, 0.125};
+    constexpr auto other = seen.mirrored();
+    static_assert(other.near == 0.75 && other.far == 0.25 && other.width == 0.125);
 }
 
 TEST_CASE("derivatives with respect to the nearer distance") {

@@ -63,6 +63,18 @@ TEST_CASE("each released structure balances each load") {
     }
 }
 
+TEST_CASE("a line load acts between its ends, each seen from inside") {
+    const balanced_load<double> field({acting_kind::line, 1, 3, 2, 4}, carried::by_both, L);
+    CHECK(field.intensity(1, just_left) == 0);
+    CHECK(field.intensity(1, just_right) == 2);
+    CHECK(field.intensity(2, just_left) == 3);
+    CHECK(field.intensity(2, just_right) == 3);
+    CHECK(field.intensity(3, just_left) == 4);
+    CHECK(field.intensity(3, just_right) == 0);
+    const balanced_load<double> force({acting_kind::point_force, 1, 1, 2, 2}, carried::by_both, L);
+    CHECK(force.intensity(1, just_right) == 0);
+}
+
 TEST_CASE("the nearer clamped end carries a load") {
     const acting_load<double> left{acting_kind::point_force, 1, 1, 1, 1};
     const acting_load<double> right{acting_kind::point_force, 3, 3, 1, 1};

@@ -79,6 +79,14 @@ TEST_CASE("the usual units of each dimension are units of that dimension") {
     check(powers_of<dimension::plane_angle>);
     check(powers_of<dimension::spring_stiffness>);
     check(powers_of<dimension::rotational_stiffness>);
+    check(powers_of<dimension::curvature>);
+    // Section moduli, and what force, couple and line load make a beam do: powers of force, length, angle.
+    for (const dimension_powers powers :
+         {dimension_powers{0, 3, 0}, dimension_powers{-1, 1, 0}, dimension_powers{-1, 0, 0}, dimension_powers{-1, 0, 1},
+          dimension_powers{-1, -1, 1}, dimension_powers{0, -1, 1}}) {
+        check(powers);
+    }
+    CHECK(usual_units({3, 0, 0}).empty());
 }
 
 TEST_CASE("dimensions as powers of force, length and angle") {
