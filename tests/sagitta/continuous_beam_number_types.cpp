@@ -110,9 +110,8 @@ void hold_to(double budget, std::uint64_t seed, int count, const scene::continuo
                 continue;
             }
         } catch (const sagitta::invalid_input&) {
-            // Told to be a mechanism: it is so near to one that N cannot tell.
+            // Told to be a mechanism though it is none: a pivot that N cannot tell from rounding.
             ++refused;
-            CHECK(conditioning(c, random) * ulp > 1e-6);
             continue;
         }
         if (one.greatest() <= budget * ulp) {
@@ -129,8 +128,9 @@ void hold_to(double budget, std::uint64_t seed, int count, const scene::continuo
     worst.end_moment /= ulp;
     MESSAGE("in ulps: " << scene::report(worst) << "; " << ill_conditioned
                         << " beyond the budget by what they make of rounded input, " << refused
-                        << " too near a mechanism");
-    CHECK(ill_conditioned + refused <= count / 100);
+                        << " taken for mechanisms");
+    CHECK(ill_conditioned <= count / 200);
+    CHECK(refused <= std::max(1, count / 1000));
 }
 
 }  // namespace

@@ -71,7 +71,8 @@ bool compare(const continuous& c, chance& random, found& one) {
         CHECK_THROWS_AS((void)described.under(loads), invalid_input);
         return false;
     }
-    REQUIRE(reference.misfit() < 1e-25);
+    // A tenth of a unit of last place is nothing beside the budgets.
+    REQUIRE(reference.misfit() < 0.1 * static_cast<double>(std::numeric_limits<N>::epsilon()));
     const auto line = described.under(loads);
     std::vector<double> places = reference.places();
     for (std::size_t i = 1; i < reference.places().size(); ++i) {
