@@ -103,14 +103,16 @@ void check_zeros(const scene_of_beam& b, const scene::sampled_line& sampled, std
         if (zeros[i].to.value() != x) continue;
         bool jumps = false;
         double value = size;
+        double product = 1;
         for (const bool from_left : {true, false}) {
             const auto& s = sampled.at(x, from_left);
             const double here = static_cast<double>(s.value(response, scene::real(x) - s.from));
             value = std::min(value, std::abs(here));
+            product *= here / size;
             jumps = jumps || (x == s.from || x == s.to);
         }
         // At a joint the response may jump through zero.
-        if (only_changes && jumps) continue;
+        if (jumps && (only_changes || product < 0)) continue;
         worst.value = std::max(worst.value, value / size);
         CAPTURE(response);
         CAPTURE(x);
