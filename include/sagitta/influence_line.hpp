@@ -254,6 +254,10 @@ template <class Beam, class Where>
         static_assert(has_places, "sagitta: a single span is supported at its ends: write end::left or end::right");
         const auto x = detail::section_on(b, where);
         auto moved = detail::unmoved(b);
+        if constexpr (has_places) {
+            if (!b.is_supported_at(x)) [[unlikely]]
+                detail::refuse("influence_of_reaction: x", x, "must be a place where the beam is supported");
+        }
         if constexpr (has_places) moved.settle_at(x, detail::unit_of<T, dimension::length>());
         return of(moved.under(load_list<T>{}), x);
     }

@@ -18,6 +18,7 @@
 #include <algorithm>
 #include <cstddef>
 #include <initializer_list>
+#include <limits>
 #include <vector>
 
 namespace sagitta {
@@ -57,17 +58,28 @@ public:
     }
 
     /// The loads that stand on a beam of a span L while the origin of the train is at x (lengths): those beyond either
-    /// end are left out.
+    /// end are left out. What is beyond an end by rounding only stands right over it.
     template <class X, class L>
     [[nodiscard]] load_list<T> standing_at(const X& x, const L& span) const {
         const auto origin = detail::expect_length<T>(x);
         const auto end_of_beam = detail::expect_length<T>(span);
         load_list<T> loads;
         for (const auto& each : axles_) {
-            const auto place = origin + each.place;
+            auto place = place_near(origin, each, quantity<dimension::length, T>{});
+            if (place.value() != T(0)) place = place_near(origin, each, end_of_beam);
             if (place.value() >= T(0) && place <= end_of_beam) loads += point_load(each.force, at(place));
         }
         return loads;
+    }
+
+    /// Where a load of the train stands while its origin is at x: right at a mark (a length) where only rounding lies
+    /// between them.
+    [[nodiscard]] static quantity<dimension::length, T> place_near(const quantity<dimension::length, T>& x,
+                                                                   const axle<T>& load,
+                                                                   const quantity<dimension::length, T>& mark) {
+        const auto place = x + load.place;
+        const auto rounding = (abs(x) + abs(load.place) + abs(mark)) * (T(4) * std::numeric_limits<T>::epsilon());
+        return abs(place - mark) <= rounding ? mark : place;
     }
 
 private:
@@ -75,13 +87,13 @@ private:
 };
 
 /// The effect of a train, and where its origin stands then. Where a load of it stands right at a jump of the influence
-/// line, it is meant just beside it: on the way there from the left (just_left) or from the right (just_right). Of a
-/// load right over an end of the beam it is the effect of a load just inside.
+/// line, the train is just left or just right of that place: effect_of_train(influence, train, at, beside) is value. Of
+/// a load right over an end of the beam it is the effect of a load just inside.
 template <class Action, class T>
 struct train_effect {
     quantity<dimension::length, T> at;
     quantity<Action, T> value;
-    side from;
+    side beside;
 };
 
 /// The greatest and the least effect (with their signs) of all positions.
@@ -175,10 +187,32 @@ template <class Influence, class X>
                                    const X& x) {
     return influence.effect_of(train.standing_at(x, influence.deflected().supported().span()));
 }
+/// The same just left or just right of x, which matters where a load stands right at the section of a shear.
+template <class Influence, class X>
+[[nodiscard]] auto effect_of_train(const Influence& influence, const load_train<typename Influence::number>& train,
+                                   const X& x, side beside) {
+    using T = typename Influence::number;
+    const auto origin = detail::expect_length<T>(x);
+    quantity<typename Influence::action_unit, T> sum{};
+    const auto span = influence.deflected().supported().span();
+    for (const auto& single : train.axles()) {
+        const auto mark = [&](const auto& place) { return load_train<T>::place_near(origin, single, place) == place; };
+        // Just beside an end of the beam a load is either on it or off it.
+        const bool is_off = beside == side::just_left ? mark(quantity<dimension::length, T>{}) : mark(span);
+        if (is_off) continue;
+        if (mark(influence.section())) {
+            sum += influence.ordinate(influence.section(), beside) * single.force;
+        } else {
+            sum += effect_of_train(influence, load_train<T>{single}, origin);
+        }
+    }
+    return sum;
+}
 
 /// The greatest and the least effect of a train over all positions, that before it comes onto the beam (effect 0)
-/// included. No position is tried that is not a turning point of one of the cubics, or an end of one: none
-/// can be missed. Accuracy: that of the influence line; the place as for extremes.
+/// included. A train that may drive either way is asked twice, the second time turned_round(). No position is tried
+/// that is not a turning point of one of the cubics, or an end of one: none can be missed. Accuracy: that of the
+/// influence line; the place as for extremes.
 template <class Influence>
 [[nodiscard]] auto extremes_of_train(const Influence& influence, const load_train<typename Influence::number>& train) {
     using T = typename Influence::number;

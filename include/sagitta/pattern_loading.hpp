@@ -36,6 +36,21 @@ struct span_patterns {
     span_pattern<Action, T> least;
 };
 
+namespace detail {
+
+template <class Influence>
+auto spans_along(const Influence& influence) {
+    constexpr bool right = requires { influence.deflected().supported().spans(); };
+    static_assert(right, "sagitta: patterns are asked of a continuous_beam; a single span is loaded or not");
+    if constexpr (right) {
+        return influence.deflected().supported().spans();
+    } else {
+        return std::vector<load_types::stretch<typename Influence::number>>{};
+    }
+}
+
+}  // namespace detail
+
 /// The patterns of a load that may act on any span or not: loads holds one case for each span (a load_list that may be
 /// empty), in the order of beam.spans(). invalid_input where their number is not that of the spans. A pattern that
 /// cannot do better than no load at all is empty, and its value 0.
@@ -43,7 +58,7 @@ template <class Influence>
 [[nodiscard]] auto governing_patterns(const Influence& influence,
                                       const std::vector<load_list<typename Influence::number>>& loads) {
     using T = typename Influence::number;
-    const auto spans = influence.deflected().supported().spans();
+    const auto spans = detail::spans_along(influence);
     if (loads.size() != spans.size()) [[unlikely]]
         detail::refuse("governing_patterns: number of loads", T(static_cast<double>(loads.size())),
                        "must be the number of spans");
@@ -68,7 +83,7 @@ requires(!std::is_convertible_v<W, std::vector<load_list<typename Influence::num
     using T = typename Influence::number;
     const auto w = detail::expect_line_load<T>(uniform);
     std::vector<load_list<T>> loads;
-    for (const auto& span : influence.deflected().supported().spans()) {
+    for (const auto& span : detail::spans_along(influence)) {
         loads.push_back(partial_uniform_load(w, between(span.from, span.to)));
     }
     return governing_patterns(influence, loads);

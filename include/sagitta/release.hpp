@@ -53,8 +53,8 @@ public:
         : at_(at), movement_(movement), spring_flexibility_(spring_flexibility) {}
 
     /// The movement that the release shall have in the end, instead of none: a settlement, a lack of fit, a gap that
-    /// closes. A length (downward) for a translation, a plane angle (clockwise, or a kink that makes the line sag: as
-    /// the displacement) for a rotation.
+    /// closes. A length (downward) for a translation, a plane angle for a rotation (clockwise; a relative rotation
+    /// counts as its displacement does: the section right of the hinge more clockwise than the one left of it).
     template <class D>
     [[nodiscard]] constexpr auto prescribed(const D& by) const {
         using U = std::common_type_t<T, detail::common_number<D>>;
@@ -170,8 +170,9 @@ template <class X>
     return release_types::release_at<release_types::kind::rotation>(x);
 }
 
-/// The rotation of the section right of a hinge at x less that of the section left of it, which is positive where the
-/// hinge sags. The redundant is the pair of couples that closes it: the bending moment in the hinge, sagging positive.
+/// The rotation of the section right of a hinge at x less that of the section left of it: positive where the line has a
+/// peak, negative where it sags (imposed_kink counts the other way). The redundant is the pair of couples that closes
+/// it: the bending moment in the hinge, sagging positive.
 template <class X>
 [[nodiscard]] constexpr auto relative_rotation_at(const X& x) {
     return release_types::release_at<release_types::kind::relative_rotation>(x);

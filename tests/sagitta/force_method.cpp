@@ -295,6 +295,26 @@ TEST_CASE("many spans, as a beam without supports and as hinged spans") {
     CHECK(relative(solved.flexibility(over[3], over[4]) / (rad / (N * m)), 1 / (6 * 17.5e6)) < 1e-13);
 }
 
+TEST_CASE("a relative rotation counts as right less left: the other way than a kink, which sags") {
+    // Two spans of 8 m with a hinge in the first; hinge and lack of fit by both ways of saying it.
+    continuous_beam released(16.0 * m, 2.0e7 * N * m2);
+    released.support_at(0.0 * m).support_at(8.0 * m).support_at(16.0 * m).hinge_at(3.0 * m);
+    continuous_beam whole(16.0 * m, 2.0e7 * N * m2);
+    whole.support_at(0.0 * m).support_at(8.0 * m).support_at(16.0 * m);
+    const auto solved =
+        force_method(released, relative_rotation_at(3.0 * m).prescribed(1.0 * mrad)).under(load_list<>{});
+    const auto kinked = whole.under(imposed_kink(-1.0 * mrad, at(3.0 * m)));
+    for (const double x : {1.0, 3.0, 6.0, 8.0, 12.0}) {
+        CHECK(std::abs((solved.line().deflection(x * m) - kinked.deflection(x * m)) / m) < 1e-15);
+    }
+    CHECK(std::abs((solved.redundant<0>() - kinked.moment(3.0 * m)) / (N * m)) < 1e-9);
+    // Under a load the hinge sags and the released rotation is negative; the redundant then is a sagging moment.
+    const auto loaded =
+        force_method(released, relative_rotation_at(3.0 * m)).under(load_list<>(uniform_load(5.0 * kN / m)));
+    CHECK(loaded.displacement<0>() < 0.0 * rad);
+    CHECK(loaded.redundant<0>() > 0.0 * N * m);
+}
+
 TEST_CASE("what cannot be released is refused by name") {
     const auto simple = simple_beam(L, EI);
     const auto arm = cantilever(L, EI);

@@ -249,7 +249,7 @@ TEST_CASE("what is refused, by name") {
     CHECK(refusal([&] {
               (void)influence_of_moment(bridge, 10.5 * m);
           }).find("influence line: section x = 10.5 m must lie on the beam, from 0 m to 10 m") == 0);
-    CHECK(refusal([&] { (void)influence_of_reaction(bridge, 5.0 * m); }).find("settle_at: x = 5 m") == 0);
+    CHECK(refusal([&] { (void)influence_of_reaction(bridge, 5.0 * m); }).find("influence_of_reaction: x = 5 m") == 0);
     const auto eta = influence_of_moment(bridge, 5.0 * m);
     CHECK(refusal([&] { (void)eta.ordinate(11.0 * m); }).find("x = 11 m must lie on the beam") == 0);
     CHECK(refusal([&] { (void)eta.effect_of(point_load(1.0 * N, at(11.0 * m))); }).find("at = 11 m") == 0);
