@@ -1,7 +1,7 @@
 #!/usr/bin/env python3
 """Changes one token in one header at a time and asks the tests that mirror the header whether they notice.
 
-    python3 tests/mutation/mutate.py [--headers NAME ...] [--kinds KIND ...] [--count N] [--seed S] [--jobs J]
+    sh tests/mutation/run.sh [--headers NAME ...] [--kinds KIND ...] [--count N] [--seed S] [--jobs J]
 
 A mutant counts as caught if it does not compile, if a test fails, or if it takes far longer than the headers as they
 stand. Which mutants are tried, and in which order, depends on the seed alone, so a run can be stopped, continued and

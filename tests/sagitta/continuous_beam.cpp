@@ -230,6 +230,16 @@ TEST_CASE("guided ends") {
     CHECK(relative(roller.slope(L * m) / rad, -P * (L * L - a * a) / (2 * EI)) < 1e-12);
 }
 
+TEST_CASE("the line load is answered too, at an end of it from inside the beam") {
+    const auto line = continuous_beam(4.0 * m, unit_EI)
+                          .support_at(0.0 * m)
+                          .support_at(4.0 * m)
+                          .under(linear_load(1.0 * kN / m, 3.0 * kN / m, between(0.0 * m, 2.0 * m)));
+    CHECK(relative(line.load(0.0 * m) / (kN / m), 1) < 1e-15);
+    CHECK(relative(line.load(1.0 * m) / (kN / m), 2) < 1e-15);
+    CHECK(line.load(3.0 * m) == 0.0 * kN / m);
+}
+
 TEST_CASE("shear deformation") {
     // The shear part of the greatest deflection: Roark's Formulas, section 8.10, and Blodgett, Design of Welded
     // Structures.

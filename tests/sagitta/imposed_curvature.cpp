@@ -101,6 +101,16 @@ TEST_CASE("a temperature gradient is the curvature alpha dT/h, sagging where the
     static_assert(part.size() == bottom.size());
 }
 
+TEST_CASE("a factor on a curvature is a factor on what it does") {
+    const auto beam = simple_beam(span, rigidity);
+    for (const auto& part : {between(0.0 * m, 4.0 * m), between(3.0 * m, span)}) {
+        const auto once = imposed_curvature(kappa / m, part);
+        const auto thrice = beam.under(-3.0 * once);
+        CHECK(relative(thrice.deflection(5.0 * m) / m, -3.0 * (beam.under(once).deflection(5.0 * m) / m)) < 1e-15);
+        CHECK(thrice.imposed_curvature(3.5 * m) == -3.0 * (kappa / m));
+    }
+}
+
 TEST_CASE("wrong values are refused") {
     const double not_a_number = std::numeric_limits<double>::quiet_NaN();
     const auto has = [](const std::string& said, const char* part) { return said.find(part) != std::string::npos; };

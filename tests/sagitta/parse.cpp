@@ -104,6 +104,7 @@ TEST_CASE("what cannot be read is refused, saying what was found and what would 
     CHECK(other_dimension.offset == 4);
     CHECK(failure_of<dimension::length>("7.2").found == "no unit");
     CHECK(failure_of<dimension::length>("+7").found == "no unit");
+    CHECK(failure_of<dimension::force>("1e308 kN").expected == "a number within the range of double");
     CHECK(failure_of<dimension::length>("").found == "nothing");
     CHECK(failure_of<dimension::length>("seven m").found == "'seven m'");
     CHECK(failure_of<dimension::length>("seven m").offset == 0);
