@@ -6,7 +6,7 @@ cmake_minimum_required(VERSION 3.20)
 # The demo as one input: its files parted by FS, in the order in which the target takes them.
 string(ASCII 28 separator)
 set(project "")
-foreach(name IN ITEMS beams loads combinations)
+foreach(name IN ITEMS beams loads combinations supports)
   file(READ ${demo}/${name}.csv text)
   string(APPEND project "${text}${separator}")
 endforeach()

@@ -1,12 +1,14 @@
 // Throws texts at the readers of the beam schedule. Whatever they hold, the readers answer with a model or with
 // refusals that can be printed, each on one line: an exception that leaves them, a crash or a hang is a finding.
 //
-// The files of a project follow one another in the input, parted by the character FS ("file separator", 28).
+// The files of a project follow one another in the input, parted by the character FS ("file separator", 28); the last
+// of them, supports.csv, may be missing.
 #include <beam_schedule/findings.hpp>
 #include <beam_schedule/input_table.hpp>
 #include <beam_schedule/read_beams.hpp>
 #include <beam_schedule/read_combinations.hpp>
 #include <beam_schedule/read_loads.hpp>
+#include <beam_schedule/read_supports.hpp>
 
 #include <cmath>
 #include <cstddef>
@@ -30,6 +32,8 @@ class project {
 public:
     project(std::string_view text, findings& found) : rest_(text), found_(found) {}
 
+    [[nodiscard]] bool has_more() const { return !rest_.empty(); }
+
     /// The next file of the project; an empty one where the text has ended.
     std::optional<input_table> file(std::string_view name, std::span<const std::string_view> columns) {
         const auto length = rest_.find('\x1C');
@@ -49,9 +53,10 @@ void expect_sound(const beam_list& beams, const combination_list& combinations, 
     bool any_refused = false;
     for (const auto& beam : beams.beams) {
         any_refused = any_refused || beam.is_refused;
-        expect(beam.is_refused || beam.beam.has_value());
+        expect(beam.is_refused || beam.beam.has_value() || beam.supported);
         expect(beam.is_refused || (beam.span.value() > 0 && std::isfinite(beam.span.value())));
-        expect(beam.is_refused || (beam.limit.value() > 0 && std::isfinite(beam.limit.value())));
+        const double limit = beam.limit.over(beam.span).value();
+        expect(beam.is_refused || (limit > 0 && std::isfinite(limit)));
     }
     expect(loads.loads.first.size() == beams.beams.size() + 1);
     for (std::size_t i = 0; i < beams.beams.size(); ++i) {
@@ -77,8 +82,12 @@ extern "C" int LLVMFuzzerTestOneInput(const std::uint8_t* data, std::size_t size
     const auto beams_file = files.file("beams.csv", beam_columns);
     const auto loads_file = files.file("loads.csv", load_columns);
     const auto combinations_file = files.file("combinations.csv", combination_columns);
-    if (beams_file && loads_file && combinations_file) {
-        auto beams = read_beams(*beams_file, found);
+    const bool has_supports = files.has_more();
+    std::optional<input_table> supports_file;
+    if (has_supports) supports_file = files.file("supports.csv", support_columns);
+    if (beams_file && loads_file && combinations_file && supports_file.has_value() == has_supports) {
+        auto beams = read_beams(*beams_file, supported_marks(supports_file), found);
+        (void)read_supports(supports_file, beams, found);
         const auto combinations = read_combinations(*combinations_file, found);
         const auto loads = read_loads(*loads_file, beams, combinations, found);
         expect_sound(beams, combinations, loads, found);
