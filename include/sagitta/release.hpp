@@ -2,6 +2,9 @@
 //
 //     translation_at(6.0*m)   rotation_at(0.0*m)   relative_rotation_at(4.0*m)
 //     translation_at(6.0*m).prescribed(5.0*mm)     translation_at(6.0*m).on_spring(8.0*kN/mm)
+//
+// A displacement is that just right of its place: a kink or an offset that stands right there is part of it, and is
+// closed with it.
 #pragma once
 
 #include <sagitta/detail/expect.hpp>
