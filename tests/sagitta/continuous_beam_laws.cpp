@@ -245,8 +245,8 @@ TEST_CASE("units: the same beam in feet and kip and in metres and newtons") {
         const double a = random.in(1, 9), k = random.in(10, 500), E = random.in(1000, 30000), I = random.in(100, 5000);
         continuous_beam us((l1 + l2) * ft, E * ksi * (I * in4));
         us.clamp(end::left).support_at(l1 * ft).spring_at((l1 + l2) * ft, k * kip / ft);
-        const double psi = kip_in_N / 0.0254 / 0.0254, inch4 = 0.0254 * 0.0254 * 0.0254 * 0.0254;
-        continuous_beam si(metric(l1 + l2) * m, E * psi * I * inch4 * N * m2);
+        const double ksi_in_Pa = kip_in_N / 0.0254 / 0.0254, inch4 = 0.0254 * 0.0254 * 0.0254 * 0.0254;
+        continuous_beam si(metric(l1 + l2) * m, E * ksi_in_Pa * I * inch4 * N * m2);
         si.clamp(end::left).support_at(metric(l1) * m).spring_at(metric(l1 + l2) * m, k * kip_in_N / 0.3048 * N / m);
         const auto in_us = us.under(uniform_load(w * kip / ft) + point_load(P * kip, at(a * ft)));
         const auto in_si =
