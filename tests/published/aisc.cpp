@@ -297,7 +297,7 @@ TEST_CASE("AISC diagram 32: simple span with end moments, uniform load") {
 
 TEST_CASE("AISC diagrams 40 to 42: moving loads on a simple beam, at their worst place") {
     for (const auto& b : beams) {
-        const double l = b.l, P = b.P, P2 = b.P2;
+        const double l = b.L, P = b.P, P2 = b.P2;
         // The greatest moment under a load while the train moves: at the section at x, of all positions.
         const auto worst_at = [&](double x, const sagitta::load_train<>& train) {
             return sagitta::extremes_of_train(sagitta::influence_of_moment(simple(b), x * m), train).greatest;
