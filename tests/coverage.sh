@@ -7,6 +7,7 @@ cd "$(dirname "$0")/.."
 need_packages libboost-dev libfmt-dev doctest-dev g++ cmake make python3
 
 jobs=${JOBS:-$(getconf _NPROCESSORS_ONLN 2> /dev/null || echo 2)}
+mkdir -p build
 build=build/coverage
 cmake -S . -B $build -G "Unix Makefiles" -D CMAKE_CXX_COMPILER=g++ -D CMAKE_CXX_FLAGS="-O0 --coverage" \
     -D SAGITTA_BENCHMARKS=OFF -D SAGITTA_EXAMPLES=OFF > $build.log || { cat $build.log; exit 1; }

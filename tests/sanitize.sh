@@ -9,6 +9,7 @@ need_packages libboost-dev libfmt-dev doctest-dev clang libclang-rt-dev cmake ma
 
 jobs=${JOBS:-$(getconf _NPROCESSORS_ONLN 2> /dev/null || echo 2)}
 compiler=${1:-clang++}
+mkdir -p build
 build=build/sanitize
 sanitizers="-fsanitize=address,undefined -fno-sanitize-recover=all -fno-omit-frame-pointer"
 cmake -S . -B $build -G "Unix Makefiles" -D CMAKE_CXX_COMPILER="$compiler" -D CMAKE_CXX_FLAGS="-O1 $sanitizers" \

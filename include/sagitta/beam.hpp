@@ -63,7 +63,12 @@ private:
 template <class Left, class Right, class L, class K>
 [[nodiscard]] constexpr auto beam_with_ends(const L& span, const K& EI) {
     using T = detail::common_number<L, K>;
-    return prismatic_beam<Left, Right, T>(detail::expect_length<T>(span), detail::expect_rigidity<T>(EI));
+    using beam = prismatic_beam<Left, Right, T>;
+    if constexpr (detail::has_dimension<L, dimension::length>) {
+        return beam(detail::expect_length<T>(span), detail::expect_rigidity<T>(EI));
+    } else {  // one sentence is enough
+        return beam(detail::expect_length<T>(span), detail::coherent<dimension::flexural_rigidity, T>(EI));
+    }
 }
 
 /// Supported at both ends, free to rotate there.

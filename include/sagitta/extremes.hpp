@@ -98,7 +98,7 @@ private:
 template <response R, class Line>
 constexpr auto extremes_between(const Line& line, const quantity<dimension::length, typename Line::number>& first,
                                 const quantity<dimension::length, typename Line::number>& last) {
-    using T = typename in_order<typename Line::number>::number;
+    using T = typename Line::number;
     using found = extreme<unit_of_response<R>, T>;
     greatest_of<found, T> greatest, least;
     for_each_candidate<R>(line, first, last,
@@ -112,17 +112,24 @@ constexpr auto extremes_between(const Line& line, const quantity<dimension::leng
 /// Extremes over the whole beam, or over a stretch of it.
 template <response R, class Line>
 constexpr auto extremes_of(const Line& line) {
-    static_assert(is_line<Line>, "sagitta: an elastic line is expected here: beam.under(loads)");
-    return extremes_between<R>(line, {}, line.supported().span());
+    expect_line<Line>();
+    if constexpr (is_line_in_order<Line>) {
+        return extremes_between<R>(line, {}, line.supported().span());
+    } else {
+        return no_answer{};
+    }
 }
 template <response R, class Line, class Stretch>
 constexpr auto extremes_of(const Line& line, const Stretch& where) {
-    static_assert(is_line<Line>, "sagitta: an elastic line is expected here: beam.under(loads)");
-    using T = typename Line::number;
-    const auto stretch = expect_stretch<T>(where);
-    if (!(stretch.to <= line.supported().span())) [[unlikely]]
-        refuse("between: to", stretch.to, "must not lie beyond the span of the beam, ", line.supported().span());
-    return extremes_between<R>(line, stretch.from, stretch.to);
+    expect_line<Line>();
+    if constexpr (is_line_in_order<Line>) {
+        const auto stretch = expect_stretch<typename Line::number>(where);
+        if (!(stretch.to <= line.supported().span())) [[unlikely]]
+            refuse("between: to", stretch.to, "must not lie beyond the span of the beam, ", line.supported().span());
+        return extremes_between<R>(line, stretch.from, stretch.to);
+    } else {
+        return no_answer{};
+    }
 }
 
 }  // namespace detail
@@ -156,15 +163,19 @@ template <class Line, class... Stretch>
 /// The deflection that is greatest in magnitude, with its sign, and where it is; of equal ones the leftmost.
 template <class Line>
 [[nodiscard]] constexpr auto greatest_deflection(const Line& line) {
-    static_assert(detail::is_line<Line>, "sagitta: an elastic line is expected here: beam.under(loads)");
-    using T = typename detail::in_order<typename Line::number>::number;
-    detail::greatest_of<extreme<dimension::length, T>, T> greatest;
-    detail::for_each_candidate<detail::response::deflection>(
-        line, {}, line.supported().span(),
-        [&](const quantity<dimension::length, T>& x, const quantity<dimension::length, T>& v, bool turns) {
-            greatest.offer({x, v}, abs(v).value(), turns);
-        });
-    return greatest.found();
+    detail::expect_line<Line>();
+    if constexpr (detail::is_line_in_order<Line>) {
+        using T = typename Line::number;
+        detail::greatest_of<extreme<dimension::length, T>, T> greatest;
+        detail::for_each_candidate<detail::response::deflection>(
+            line, {}, line.supported().span(),
+            [&](const quantity<dimension::length, T>& x, const quantity<dimension::length, T>& v, bool turns) {
+                greatest.offer({x, v}, abs(v).value(), turns);
+            });
+        return greatest.found();
+    } else {
+        return detail::no_answer{};
+    }
 }
 
 }  // namespace sagitta

@@ -27,6 +27,11 @@ class force_method_solution;
 
 namespace detail {
 
+template <class Released>
+inline constexpr bool is_structure = requires(const Released& released) {
+    released.span();
+};
+
 template <class R>
 inline constexpr bool is_release_list = false;
 template <class T>
@@ -35,9 +40,6 @@ inline constexpr bool is_release_list<release_list<T>> = true;
 /// One by one as a pack, or the list. What is wrong is answered by one sentence, and replaced by something harmless.
 template <class Released, class... R>
 constexpr auto releases_of(const R&... each) {
-    constexpr bool is_structure = requires(const Released& released) { released.span(); };
-    static_assert(is_structure,
-                  "sagitta: a released structure is expected here: a simple_beam, a cantilever, a continuous_beam ...");
     constexpr bool one_by_one = sizeof...(R) > 0 && (... && release_types::is_release<R>);
     constexpr bool in_a_list = sizeof...(R) == 1 && (... && is_release_list<R>);
     constexpr bool right = one_by_one || in_a_list;
@@ -66,6 +68,10 @@ constexpr auto releases_of(const R&... each) {
 /// In a beam that deforms in shear a rotation is that of the section, as a clamp or a couple meets it: dv/dx - V/kGA.
 template <class Released, class Releases>
 class force_method {
+    static constexpr bool is_structure = detail::is_structure<Released>;
+    static_assert(is_structure,
+                  "sagitta: a released structure is expected here: a simple_beam, a cantilever, a continuous_beam ...");
+
 public:
     using number =
         std::common_type_t<typename detail::in_order<typename Released::number>::number, typename Releases::number>;
@@ -118,8 +124,13 @@ private:
 
     /// Fills the flexibility matrix, and adds to its diagonal what the springs give way.
     constexpr auto coefficients() {
-        const Released resting = detail::unmoved(released_);
         auto sum = releases().template values<number, 2>();
+        if constexpr (is_structure) measure(sum);
+        return sum;
+    }
+    template <class Sum>
+    constexpr void measure(Sum& sum) {
+        const Released resting = detail::unmoved(released_);
         const std::size_t n = releases().size();
         releases().for_each([&](std::size_t, const auto& r) { detail::require_place(released_, r); });
         detail::for_each_release<Released>(releases(), [&](std::size_t j, const auto& redundant) {
@@ -132,7 +143,6 @@ private:
             });
             sum[j * n + j] += static_cast<number>(redundant.spring_flexibility().value());
         });
-        return sum;
     }
 
     Released released_;

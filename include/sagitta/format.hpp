@@ -33,6 +33,43 @@ namespace sagitta::detail {
     throw fmt::format_error("the unit in a format string has another dimension than the quantity");
 }
 
+/// The spec of a quantity: [number part][ unit]. A class without the quantity in its name, for short messages.
+template <class T>
+class quantity_spec {
+public:
+    constexpr explicit quantity_spec(const dimension_powers& powers) : powers_(powers) {}
+
+    constexpr auto parse(fmt::format_parse_context& context) {
+        const auto* const begin = context.begin();
+        const auto* stop = begin;
+        while (stop != context.end() && *stop != '}') {
+            if (*stop == '{') no_arguments_inside_the_format_of_a_quantity();
+            ++stop;
+        }
+        const std::string_view spec(begin, static_cast<std::size_t>(stop - begin));
+        const auto space = spec.rfind(' ');
+        if (space != std::string_view::npos) {
+            name_ = spec.substr(space + 1);
+            unit_ = read_unit(name_);
+            if (!unit_.known) unknown_unit_in_format_string();
+            if (!(unit_.powers == powers_)) unit_of_another_dimension_in_format_string();
+        }
+        auto number_part = spec.substr(0, space);
+        if (number_part.empty()) number_part = "g";  // six significant digits
+        fmt::format_parse_context number_context(fmt::string_view(number_part.data(), number_part.size()));
+        if (number_.parse(number_context) != number_context.end()) {
+            number_format_not_understood_or_no_space_before_the_unit();
+        }
+        return stop;
+    }
+
+protected:
+    dimension_powers powers_;
+    fmt::formatter<T> number_;
+    std::string_view name_;
+    described_unit unit_;
+};
+
 /// The unit chosen where the format names none.
 constexpr std::string_view default_unit(const dimension_powers& powers, bool below_one) {
     if (powers == dimension_powers{0, 1, 0}) return below_one ? "mm" : "m";
@@ -44,45 +81,23 @@ constexpr std::string_view default_unit(const dimension_powers& powers, bool bel
 
 /// Formats a quantity. Spec: [number part][ unit], the number part as in fmt; both may be left out.
 template <class D, class System, class T>
-struct fmt::formatter<boost::units::quantity<boost::units::unit<D, System>, T>> {
+struct fmt::formatter<boost::units::quantity<boost::units::unit<D, System>, T>> : sagitta::detail::quantity_spec<T> {
     using unit_type = boost::units::unit<D, System>;
     static constexpr sagitta::detail::dimension_powers powers = sagitta::detail::powers_of<unit_type>;
 
-    constexpr auto parse(fmt::format_parse_context& context) {
-        const auto* const begin = context.begin();
-        const auto* stop = begin;
-        while (stop != context.end() && *stop != '}') {
-            if (*stop == '{') sagitta::detail::no_arguments_inside_the_format_of_a_quantity();
-            ++stop;
-        }
-        const std::string_view spec(begin, static_cast<std::size_t>(stop - begin));
-        const auto space = spec.rfind(' ');
-        if (space != std::string_view::npos) {
-            unit_name_ = spec.substr(space + 1);
-            unit_ = sagitta::detail::read_unit(unit_name_);
-            if (!unit_.known) sagitta::detail::unknown_unit_in_format_string();
-            if (!(unit_.powers == powers)) sagitta::detail::unit_of_another_dimension_in_format_string();
-        }
-        auto number_part = spec.substr(0, space);
-        if (number_part.empty()) number_part = "g";  // six significant digits
-        fmt::format_parse_context number_context(fmt::string_view(number_part.data(), number_part.size()));
-        if (number_.parse(number_context) != number_context.end()) {
-            sagitta::detail::number_format_not_understood_or_no_space_before_the_unit();
-        }
-        return stop;
-    }
+    constexpr formatter() : sagitta::detail::quantity_spec<T>(powers) {}
 
     template <class Context>
     auto format(const boost::units::quantity<unit_type, T>& q, Context& context) const {
         using sagitta::detail::to_coherent;
         const T coherent = q.value() + T(0);  // writes -0 as 0
-        auto unit = unit_;
-        auto name = unit_name_;
+        auto unit = this->unit_;
+        auto name = this->name_;
         if (!unit.known) {
             name = sagitta::detail::default_unit(powers, coherent < T(1) && coherent > T(-1));
             unit = sagitta::detail::read_unit(name);
         }
-        auto out = number_.format(unit.known ? to_coherent(coherent, unit.size.inverse()) : coherent, context);
+        auto out = this->number_.format(unit.known ? to_coherent(coherent, unit.size.inverse()) : coherent, context);
         if (unit.known) {
             *out++ = ' ';
             return std::copy(name.begin(), name.end(), out);
@@ -105,8 +120,4 @@ private:
         write("rad", powers.angle);
         return out;
     }
-
-    fmt::formatter<T> number_;
-    std::string_view unit_name_;
-    sagitta::detail::described_unit unit_;
 };

@@ -47,49 +47,44 @@ template <load_expression A, load_expression B>
 
 // Whatever else is added to a load, or multiplied with it, is answered by a sentence.
 
-template <class X>
-concept not_a_load = !is_loads<X>;
-template <class X>
-concept not_a_number = !detail::number_type<X> && !is_loads<X>;
-
 template <load_expression L, not_a_load X>
 constexpr L operator+(const L& load, const X&) {
-    static_assert(is_loads<X>, "sagitta: to a load only another load is added");
+    expect_load_to_add<X>();
     return load;
 }
 template <not_a_load X, load_expression L>
 constexpr L operator+(const X&, const L& load) {
-    static_assert(is_loads<X>, "sagitta: to a load only another load is added");
+    expect_load_to_add<X>();
     return load;
 }
 template <load_expression L, not_a_load X>
 constexpr L operator-(const L& load, const X&) {
-    static_assert(is_loads<X>, "sagitta: from a load only another load is subtracted");
+    expect_load_to_subtract<X>();
     return load;
 }
 template <not_a_load X, load_expression L>
 constexpr L operator-(const X&, const L& load) {
-    static_assert(is_loads<X>, "sagitta: from a load only another load is subtracted");
+    expect_load_to_subtract<X>();
     return load;
 }
 template <load_expression L, not_a_number X>
 constexpr L operator*(const L& load, const X&) {
-    static_assert(is_loads<X>, "sagitta: a load is multiplied by a plain number");
+    expect_factor<X>();
     return load;
 }
 template <not_a_number X, load_expression L>
 constexpr L operator*(const X&, const L& load) {
-    static_assert(is_loads<X>, "sagitta: a load is multiplied by a plain number");
+    expect_factor<X>();
     return load;
 }
 template <load_expression L, load_expression X>
 constexpr L operator*(const L& load, const X&) {
-    static_assert(!is_loads<X>, "sagitta: a load is multiplied by a plain number");
+    expect_factor<X>();
     return load;
 }
 template <load_expression L, not_a_number X>
 constexpr L operator/(const L& load, const X&) {
-    static_assert(is_loads<X>, "sagitta: a load is divided by a plain number");
+    expect_divisor<X>();
     return load;
 }
 

@@ -64,6 +64,43 @@ public:
     [[nodiscard]] friend load_list operator*(const T& factor, load_list list) { return list *= factor; }
     [[nodiscard]] friend load_list operator/(load_list list, const T& divisor) { return list /= divisor; }
 
+    template <load_types::not_a_load X>
+    load_list& operator+=(const X&) {
+        load_types::expect_load_to_add<X>();
+        return *this;
+    }
+    template <load_types::not_a_load X>
+    load_list& operator-=(const X&) {
+        load_types::expect_load_to_subtract<X>();
+        return *this;
+    }
+    template <load_types::not_a_number X>
+    load_list& operator*=(const X&) {
+        load_types::expect_factor<X>();
+        return *this;
+    }
+    template <load_types::not_a_number X>
+    load_list& operator/=(const X&) {
+        load_types::expect_divisor<X>();
+        return *this;
+    }
+    template <load_types::not_a_load X>
+    friend load_list operator+(load_list list, const X& x) {
+        return list += x;
+    }
+    template <load_types::not_a_load X>
+    friend load_list operator-(load_list list, const X& x) {
+        return list -= x;
+    }
+    template <load_types::not_a_number X>
+    friend load_list operator*(load_list list, const X& x) {
+        return list *= x;
+    }
+    template <load_types::not_a_number X>
+    friend load_list operator/(load_list list, const X& x) {
+        return list /= x;
+    }
+
     [[nodiscard]] const std::vector<load_types::any_load<T>>& cases() const { return cases_; }
     void reserve(std::size_t count) { cases_.reserve(count); }
     void clear() { cases_.clear(); }

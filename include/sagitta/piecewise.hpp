@@ -129,6 +129,20 @@ inline constexpr bool is_line = requires(const Line& line) {
     line.joints();
 };
 
+/// Whether they can be answered.
+template <class Line>
+inline constexpr bool is_line_in_order = false;
+template <class Line>
+requires(is_line<Line>) inline constexpr bool is_line_in_order<Line> = is_ordered<typename Line::number>;
+
+/// Says why they cannot. Questions go on only where they can.
+template <class Line>
+constexpr void expect_line() {
+    constexpr bool right = is_line<Line>;
+    static_assert(right, "sagitta: an elastic line is expected here: beam.under(loads)");
+    if constexpr (right) expect_order<typename Line::number>();
+}
+
 /// A list with room for so many values a segment: bounded where the line's joints are, else a vector.
 template <class Value, std::size_t a_segment, class Joints>
 struct list_by_segment {

@@ -4,52 +4,16 @@
 // 7.2*m, 24*ft, 4.5*kN/m, 210.0*GPa * 8356.0*cm4. Dividing a quantity by a unit gives the plain number back.
 #pragma once
 
+#include <sagitta/detail/dimension.hpp>
 #include <sagitta/detail/scale.hpp>
+#include <sagitta/detail/unlike.hpp>
 
 #include <boost/units/get_dimension.hpp>
-#include <boost/units/pow.hpp>
 #include <boost/units/quantity.hpp>
-#include <boost/units/systems/si/area.hpp>
-#include <boost/units/systems/si/dimensionless.hpp>
-#include <boost/units/systems/si/energy.hpp>
-#include <boost/units/systems/si/force.hpp>
-#include <boost/units/systems/si/length.hpp>
-#include <boost/units/systems/si/plane_angle.hpp>
-#include <boost/units/systems/si/pressure.hpp>
-#include <boost/units/systems/si/surface_tension.hpp>
-#include <boost/units/systems/si/temperature.hpp>
-#include <boost/units/systems/si/wavenumber.hpp>
 
 #include <type_traits>
 
 namespace sagitta {
-
-/// The dimensions of beam theory, each as its coherent SI unit. A moment is force times length: the torque of
-/// Boost.Units is divided by an angle and is another thing. (In a namespace of their own, so that a program may call
-/// its variables length, area or moment.)
-namespace dimension {
-
-using dimensionless = boost::units::si::dimensionless;
-using length = boost::units::si::length;
-using plane_angle = boost::units::si::plane_angle;
-using force = boost::units::si::force;
-using moment = boost::units::si::energy;
-using line_load = boost::units::si::surface_tension;
-using stress = boost::units::si::pressure;
-using area = boost::units::si::area;
-using second_moment_of_area = boost::units::power_typeof_helper<length, boost::units::static_rational<4>>::type;
-using curvature = boost::units::si::wavenumber;
-using temperature = boost::units::si::temperature;
-using expansion_coefficient = boost::units::divide_typeof_helper<dimensionless, temperature>::type;
-using flexural_rigidity = boost::units::multiply_typeof_helper<stress, second_moment_of_area>::type;
-using spring_stiffness = boost::units::divide_typeof_helper<force, length>::type;
-using rotational_stiffness = boost::units::divide_typeof_helper<moment, plane_angle>::type;
-
-}  // namespace dimension
-
-/// A value of one dimension: quantity<dimension::length>, quantity<dimension::moment, float>.
-template <class Dimension, class T = double>
-using quantity = boost::units::quantity<Dimension, T>;
 
 namespace detail {
 

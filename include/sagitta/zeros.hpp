@@ -82,9 +82,8 @@ private:
 };
 
 template <response R, class Line>
-constexpr auto zeros_of(const Line& line) {
-    static_assert(is_line<Line>, "sagitta: an elastic line is expected here: beam.under(loads)");
-    using T = typename in_order<typename Line::number>::number;
+constexpr auto zeros_along(const Line& line) {
+    using T = typename Line::number;
     const T tolerance = zero_tolerance<R>(line);
     const auto sign_of = [&](const T& value) { return value > tolerance ? 1 : value < -tolerance ? -1 : 0; };
     // Within a segment at most as many roots as the degree, and the joint before it.
@@ -112,13 +111,28 @@ constexpr auto zeros_of(const Line& line) {
 }
 
 template <response R, class Line>
-constexpr auto sign_changes_of(const Line& line) {
-    const auto zeros = zeros_of<R>(line);
-    list_along<zero_place<typename Line::number>, 6, Line> places;
-    for (const auto& zero : zeros) {
-        if (zero.changes_sign) places.push_back(zero);
+constexpr auto zeros_of(const Line& line) {
+    expect_line<Line>();
+    if constexpr (is_line_in_order<Line>) {
+        return zeros_along<R>(line);
+    } else {
+        return no_answer{};
     }
-    return places;
+}
+
+template <response R, class Line>
+constexpr auto sign_changes_of(const Line& line) {
+    expect_line<Line>();
+    if constexpr (is_line_in_order<Line>) {
+        const auto zeros = zeros_along<R>(line);
+        list_along<zero_place<typename Line::number>, 6, Line> places;
+        for (const auto& zero : zeros) {
+            if (zero.changes_sign) places.push_back(zero);
+        }
+        return places;
+    } else {
+        return no_answer{};
+    }
 }
 
 }  // namespace detail

@@ -6,6 +6,7 @@ cd "$(dirname "$0")/../.."
 . ./.ci/setup.sh
 need_packages libboost-dev libfmt-dev doctest-dev clang libclang-rt-dev cmake make
 
+mkdir -p build
 cmake -S . -B build/fuzz -D CMAKE_CXX_COMPILER=clang++ -D CMAKE_CXX_FLAGS=-O1 -D SAGITTA_FUZZ=ON \
     -D SAGITTA_BENCHMARKS=OFF > build/fuzz.log || { cat build/fuzz.log; exit 1; }
 cmake --build build/fuzz --target fuzz_read_schedule

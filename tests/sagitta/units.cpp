@@ -216,6 +216,15 @@ TEST_CASE("quantities of Boost.Units are accepted in any unit of the right dimen
     // Numbers that are integers do not truncate on the way.
     const bu::quantity<centimetre, int> whole = 725 * centimetre();
     CHECK(relative(simple_beam(whole, EI).span().value(), 7.25) < 1e-15);
+    // The system of units is the library's own (short names in messages); Boost's converts to it and back by itself.
+    const quantity<dimension::length> ours = span;
+    const bu::quantity<bu::si::length> theirs = expected;
+    const bu::quantity<bu::si::energy> moment = plain.moment(3.0 * m);
+    CHECK(ours == 7.2 * m);
+    CHECK(theirs.value() == expected.value());
+    CHECK(moment.value() == plain.moment(3.0 * m).value());
+    static_assert(std::is_same_v<bu::get_dimension<dimension::flexural_rigidity>::type,
+                                 bu::get_dimension<decltype(rigidity)::unit_type>::type>);
     // Results convert to any unit.
     CHECK(relative(bu::quantity<centimetre>(expected).value(), 100 * expected.value()) < 1e-14);
 }

@@ -225,6 +225,34 @@ concept load_expression = load_case<L> || is_load_sum<L>;
 template <class L>
 inline constexpr bool is_loads = load_expression<L>;
 
+template <class X>
+concept not_a_load = !is_loads<X>;
+template <class X>
+concept not_a_number = !detail::number_type<X> && !is_loads<X>;
+
+// What else is added to loads, or multiplied with them, is answered by a sentence.
+
+template <class X>
+constexpr void expect_load_to_add() {
+    constexpr bool right = is_loads<X>;
+    static_assert(right, "sagitta: to a load only another load is added");
+}
+template <class X>
+constexpr void expect_load_to_subtract() {
+    constexpr bool right = is_loads<X>;
+    static_assert(right, "sagitta: from a load only another load is subtracted");
+}
+template <class X>
+constexpr void expect_factor() {
+    constexpr bool right = detail::number_type<X>;
+    static_assert(right, "sagitta: a load is multiplied by a plain number");
+}
+template <class X>
+constexpr void expect_divisor() {
+    constexpr bool right = detail::number_type<X>;
+    static_assert(right, "sagitta: a load is divided by a plain number");
+}
+
 /// The cases of a load expression as a tuple.
 template <load_case L>
 constexpr std::tuple<L> cases_of(const L& single) {

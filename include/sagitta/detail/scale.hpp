@@ -33,6 +33,14 @@ struct in_order {
                   "deflection, slope, moment, shear or reaction of a single-span beam instead");
     using number = T;
 };
+/// What a function returns that has said why it does not go on: one sentence is enough.
+struct no_answer {};
+
+/// The same for functions, which go on only if is_ordered<T>.
+template <class T>
+constexpr void expect_order() {
+    [[maybe_unused]] const typename in_order<T>::number* said = nullptr;
+}
 
 template <class T>
 concept number_type = is_number<T>;

@@ -1,4 +1,4 @@
-// expect the compiler's: operand
+// expect: a unit alone is not added to a quantity or compared with it
 #include "twin.hpp"
 
 #ifdef WRONG

@@ -1,4 +1,4 @@
-// expect the compiler's: operand
+// expect: only quantities of the same dimension are added or compared
 #include "twin.hpp"
 
 #ifdef WRONG

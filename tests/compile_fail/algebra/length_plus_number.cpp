@@ -1,4 +1,4 @@
-// expect the compiler's: and 'double')
+// expect: a plain number is not added to a quantity or compared with it
 #include "twin.hpp"
 
 #ifdef WRONG

@@ -1,4 +1,4 @@
-// expect the compiler's: +='
+// expect: to a load only another load is added
 #include "twin.hpp"
 
 #ifdef WRONG

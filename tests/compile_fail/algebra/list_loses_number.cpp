@@ -1,4 +1,4 @@
-// expect the compiler's: -='
+// expect: from a load only another load is subtracted
 #include "twin.hpp"
 
 #ifdef WRONG

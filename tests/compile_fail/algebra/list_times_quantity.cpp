@@ -1,4 +1,4 @@
-// expect the compiler's: *='
+// expect: a load is multiplied by a plain number
 #include "twin.hpp"
 
 #ifdef WRONG

@@ -1,4 +1,4 @@
-// expect the compiler's: operand
+// expect: only quantities of the same dimension are added or compared
 #include "twin.hpp"
 
 constexpr auto method = force_method(joist, translation_at(3.0 * m), rotation_at(0.0 * m));
