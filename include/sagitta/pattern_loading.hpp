@@ -1,8 +1,7 @@
 // Pattern loading: which spans of a continuous beam have to be loaded for an action to become greatest or least.
 //
 //     const auto worst = governing_patterns(influence_of_moment(bridge, 9.0*m), 12.0*kN/m);
-//     worst.greatest.value; worst.greatest.spans;     // the moment, and the numbers of the spans that are loaded for
-//     it
+//     worst.greatest.value;  worst.greatest.spans;    // the moment, and the numbers of the spans loaded for it
 //
 // The influence line tells at once: a span adds to the action if the load on it has a positive effect. No pattern is
 // tried.
@@ -59,9 +58,13 @@ template <class Influence>
                                       const std::vector<load_list<typename Influence::number>>& loads) {
     using T = typename Influence::number;
     const auto spans = detail::spans_along(influence);
-    if (loads.size() != spans.size()) [[unlikely]]
-        detail::refuse("governing_patterns: number of loads", T(static_cast<double>(loads.size())),
-                       "must be the number of spans");
+    if (loads.size() != spans.size()) [[unlikely]] {
+        const auto count = [](const auto& list) {
+            return quantity<dimension::dimensionless>(static_cast<double>(list.size()));
+        };
+        detail::refuse("governing_patterns: number of loads", count(loads), "must be the number of spans, ",
+                       count(spans));
+    }
     span_patterns<typename Influence::action_unit, T> found;
     const auto add = [&](auto& pattern, std::size_t i, const auto& effect) {
         pattern.spans.push_back(i);

@@ -1,5 +1,6 @@
 // Chords and tangents of an elastic line.
 #include <support/doctest_quantities.hpp>
+#include <support/refusal.hpp>
 #include <support/relative.hpp>
 #include <support/scene.hpp>
 
@@ -22,16 +23,6 @@ namespace {
 constexpr auto EI = 1.0e4 * kN * m2;
 constexpr auto line = simple_beam(8.0 * m, EI).under(uniform_load(6.0 * kN / m));
 constexpr double w_over_EI = 6e3 / 1e7;
-
-template <class F>
-std::string refusal(const F& f) {
-    try {
-        f();
-    } catch (const invalid_input& refused) {
-        return refused.what();
-    }
-    return "nothing was refused";
-}
 
 }  // namespace
 

@@ -1,4 +1,6 @@
 // Continuous beams that can move, and wrong values in their description: refused in words.
+#include <support/refusal.hpp>
+
 #include <sagitta/continuous_beam.hpp>
 
 #include <doctest/doctest.h>
@@ -15,16 +17,6 @@ namespace {
 
 constexpr double not_a_number = std::numeric_limits<double>::quiet_NaN();
 constexpr double infinity = std::numeric_limits<double>::infinity();
-
-template <class F>
-std::string refusal(const F& f) {
-    try {
-        f();
-    } catch (const invalid_input& refused) {
-        return refused.what();
-    }
-    return "nothing was refused";
-}
 
 bool holds(const std::string& text, std::initializer_list<const char*> parts) {
     std::size_t at = 0;

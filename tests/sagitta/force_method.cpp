@@ -3,6 +3,7 @@
 #include <sagitta/force_method.hpp>
 
 #include <support/doctest_quantities.hpp>
+#include <support/refusal.hpp>
 #include <support/relative.hpp>
 
 #include <sagitta/continuous_beam.hpp>
@@ -52,16 +53,6 @@ double gap(const A& a, const B& b) {
     compare([](const auto& l, const auto& x) { return l.moment(x).value(); });
     compare([](const auto& l, const auto& x) { return l.shear(x).value(); });
     return greatest;
-}
-
-template <class Function>
-std::string refusal(const Function& f) {
-    try {
-        f();
-    } catch (const invalid_input& e) {
-        return e.what();
-    }
-    return "";
 }
 
 continuous_beam<> on_supports(std::initializer_list<double> places) {

@@ -1,6 +1,7 @@
 // Imposed curvatures and temperature gradients: handbook values, the stiffness reference, the integrator.
 #include <support/continuous_scene.hpp>
 #include <support/doctest_quantities.hpp>
+#include <support/refusal.hpp>
 #include <support/relative.hpp>
 
 #include <sagitta/cross_check.hpp>
@@ -28,16 +29,6 @@ using wide = mp::number<mp::cpp_bin_float<50>, mp::et_off>;
 constexpr double L = 10, EI = 1e6, kappa = 2e-3;
 constexpr auto span = L * m;
 constexpr auto rigidity = EI * N * m2;
-
-template <class F>
-std::string refusal(const F& f) {
-    try {
-        f();
-    } catch (const invalid_input& refused) {
-        return refused.what();
-    }
-    return "nothing was refused";
-}
 
 }  // namespace
 

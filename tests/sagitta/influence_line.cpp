@@ -3,6 +3,7 @@
 
 #include <support/continuous_scene.hpp>
 #include <support/doctest_quantities.hpp>
+#include <support/refusal.hpp>
 #include <support/relative.hpp>
 
 #include <sagitta/continuous_beam.hpp>
@@ -32,16 +33,6 @@ static_assert(std::is_same_v<decltype(influence_of_deflection(simple, 4.0 * m).o
                              quantity<dimension::length>>);
 // Area of the triangle of the midspan moment: L^2/8.
 static_assert(abs(influence_of_moment(simple, 5.0 * m).area(between(0.0 * m, 10.0 * m)) - 12.5 * m2) < 1e-11 * m2);
-
-template <class F>
-std::string refusal(const F& f) {
-    try {
-        f();
-    } catch (const invalid_input& refused) {
-        return refused.what();
-    }
-    return "nothing was refused";
-}
 
 /// The greatest differences between ordinates and responses to a unit load, relative to the greatest ordinate. Where
 /// that is less than 1e-6 of the size that the beam implies (a moment in a hinge, the deflection of a support), only
@@ -132,7 +123,7 @@ TEST_CASE("random continuous beams: ordinates are responses to a unit load, also
         auto c = scene::random_continuous(random, how).draw();
         for (auto& s : c.supports) s.settled = 0;  // the response to a unit load is asked for
         const auto b = scene::beam_of(c);
-        if (refusal([&] { (void)b.under(load_list<>{}); }) != "nothing was refused") continue;
+        if (refusal([&] { (void)b.under(load_list<>{}); }) != "") continue;
         ++beams;
         CAPTURE(scene::text(c));
         std::vector<double> places{0, c.L};
@@ -169,7 +160,7 @@ TEST_CASE("ordinates, effects of trains and patterns against direct stiffness in
     while (compared < 400) {
         auto c = scene::random_continuous(random, small).draw();
         const auto b = scene::beam_of(c);
-        if (refusal([&] { (void)b.under(load_list<>{}); }) != "nothing was refused") continue;
+        if (refusal([&] { (void)b.under(load_list<>{}); }) != "") continue;
         CAPTURE(scene::text(c));
         const double section = random.in(0, c.L);
         const auto eta = influence_of_moment(b, section * m);

@@ -1,6 +1,7 @@
 // Values that are wrong at run time: each is refused by a sentence that names the argument, its value with unit,
 // and the bound. Nothing is clamped.
 #include <support/doctest_quantities.hpp>
+#include <support/refusal.hpp>
 
 #include <sagitta/core.hpp>
 
@@ -21,17 +22,6 @@ namespace {
 
 constexpr double not_a_number = std::numeric_limits<double>::quiet_NaN();
 constexpr double infinity = std::numeric_limits<double>::infinity();
-
-/// What the exception says; a text that no sentence holds where nothing is thrown.
-template <class F>
-std::string refusal(const F& f) {
-    try {
-        f();
-    } catch (const invalid_input& refused) {
-        return refused.what();
-    }
-    return "nothing was refused";
-}
 
 /// True where a text holds all parts, in this order.
 bool holds(const std::string& text, std::initializer_list<const char*> parts) {

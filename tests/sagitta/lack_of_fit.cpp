@@ -1,5 +1,6 @@
 // Kinks and offsets: the reciprocal theorem, the integrator with a stiffness that varies, sides, shear, refusals.
 #include <support/doctest_quantities.hpp>
+#include <support/refusal.hpp>
 #include <support/relative.hpp>
 #include <support/scene.hpp>
 
@@ -30,16 +31,6 @@ constexpr auto stepped = simple_beam(8.0 * m, EI).under(imposed_offset(4.0 * mm,
 static_assert(abs(stepped.deflection(2.0 * m, just_left) + 1.0 * mm) < 1e-12 * mm);
 static_assert(abs(stepped.deflection(2.0 * m) - 3.0 * mm) < 1e-12 * mm);
 static_assert(abs(stepped.slope(7.0 * m) + 0.5 * mrad) < 1e-12 * mrad);
-
-template <class F>
-std::string refusal(const F& f) {
-    try {
-        f();
-    } catch (const invalid_input& refused) {
-        return refused.what();
-    }
-    return "nothing was refused";
-}
 
 }  // namespace
 

@@ -3,6 +3,7 @@
 
 #include <support/continuous_scene.hpp>
 #include <support/doctest_quantities.hpp>
+#include <support/refusal.hpp>
 #include <support/relative.hpp>
 
 #include <sagitta/continuous_beam.hpp>
@@ -20,16 +21,6 @@ using namespace sagitta;
 using namespace sagitta::units;
 
 namespace {
-
-template <class F>
-std::string refusal(const F& f) {
-    try {
-        f();
-    } catch (const invalid_input& refused) {
-        return refused.what();
-    }
-    return "nothing was refused";
-}
 
 continuous_beam<> equal_spans(int count) {
     continuous_beam<> b(count * 1.0 * m, 1.0 * N * m2);
@@ -153,5 +144,5 @@ TEST_CASE("what is refused, by name") {
     const auto eta = influence_of_moment(b, 0.5 * m);
     CHECK(refusal([&] {
               (void)governing_patterns(eta, std::vector<load_list<>>(2));
-          }).find("governing_patterns: number of loads = 2 must be the number of spans") == 0);
+          }).find("governing_patterns: number of loads = 2 must be the number of spans, 3") == 0);
 }

@@ -2,6 +2,7 @@
 #include <sagitta/release.hpp>
 
 #include <support/doctest_quantities.hpp>
+#include <support/refusal.hpp>
 
 #include <doctest/doctest.h>
 
@@ -14,16 +15,6 @@ using namespace sagitta::units;
 using release_types::kind;
 
 namespace {
-
-template <class Function>
-std::string refusal(const Function& f) {
-    try {
-        f();
-    } catch (const invalid_input& e) {
-        return e.what();
-    }
-    return "";
-}
 
 constexpr double infinite = std::numeric_limits<double>::infinity();
 constexpr double no_number = std::numeric_limits<double>::quiet_NaN();

@@ -23,7 +23,7 @@ struct shape {
     static constexpr int common = [] {
         int g = Divisor;
         for (const int k : coefficient) g = std::gcd(g, k);
-        return Divisor < 0 ? -g : g;
+        return g;
     }();
     static constexpr bool is_zero = ((c == 0) && ...);
 
@@ -104,7 +104,7 @@ struct derivative_of<Shape, std::index_sequence<i...>> {
 };
 
 /// The derivative of a shape with respect to near (far = 1 - near falls while near grows).
-template <class Shape, int order = 1>
+template <class Shape, int order>
 struct derivative {
     using type = typename derivative_of<typename derivative<Shape, order - 1>::type>::type;
 };
@@ -112,7 +112,7 @@ template <class Shape>
 struct derivative<Shape, 0> {
     using type = Shape;
 };
-template <class Shape, int order = 1>
+template <class Shape, int order>
 using derivative_t = typename derivative<Shape, order>::type;
 
 /// A stretch of the beam as fractions of the span: the distances of its middle from the two ends of the beam,

@@ -56,7 +56,7 @@ void compare_all() {
                              [&](auto row) { return decltype(row)::value(near, far); });
         // A clockwise couple is a force at a + d/2 and an opposite one at a - d/2: the derivative.
         compare<Here, There>(solved<Here, There>([&](auto& b) { b.add_couple(1, a); }),
-                             [&](auto row) { return detail::derivative_t<decltype(row)>::value(near, far); });
+                             [&](auto row) { return detail::derivative_t<decltype(row), 1>::value(near, far); });
     }
     for (const auto& stretch : stretches) {
         const double from = stretch.first;
