@@ -74,7 +74,7 @@ TEST_CASE("closed forms and integrator agree to 1e-12 for every load case on eve
             cases.push_back({scene::kind::linear, 0, w, from, to});
             cases.push_back({scene::kind::partial_curvature, 0.003 / L, 0, from, to});
         }
-        scene::with_each_beam(L, EI, [&](const std::string& name, const auto& b, auto left, auto right) {
+        scene::with_each_beam_and_guided(L, EI, [&](const std::string& name, const auto& b, auto left, auto right) {
             for (const auto& one : cases) {
                 if (!scene::can_act(one, left, right)) continue;
                 CAPTURE(name);
@@ -97,7 +97,7 @@ TEST_CASE("they agree on superpositions of random loads") {
     const double L = 7.2;
     const double EI = 1.75e7;
     for (int i = 0; i < 50; ++i) {
-        scene::with_each_beam(L, EI, [&](const std::string& name, const auto& b, auto left, auto right) {
+        scene::with_each_beam_and_guided(L, EI, [&](const std::string& name, const auto& b, auto left, auto right) {
             CAPTURE(name);
             CAPTURE(i);
             const auto all = scene::random_loads(random, random.whole(2, 8), L, EI, left, right);

@@ -165,7 +165,7 @@ void check(const found& worst) {
 }
 
 void each_load_on_each_beam(double L, double EI, scene::chance& random, found& worst) {
-    scene::with_each_beam(L, EI, [&](const std::string& name, const auto& b, hold left, hold right) {
+    scene::with_each_beam_and_guided(L, EI, [&](const std::string& name, const auto& b, hold left, hold right) {
         for (const auto& l : every_load(L, EI, random)) {
             if (!scene::can_act(l, left, right)) continue;
             found of_case;

@@ -257,3 +257,29 @@ TEST_CASE("the integrator refuses what the closed forms refuse") {
     sunk += settlement(end::right, 1.0 * mm);
     CHECK_THROWS_AS((void)integrate_moment_area(cantilever(4.0 * m, rigidity(1e6)), sunk), invalid_input);
 }
+
+TEST_CASE("an integrated line tells what acts at a place, on both sides of a bound") {
+    const auto b = propped_cantilever(4.0 * m, 1.0e7 * N * m2);
+    const auto loads = partial_uniform_load(3.0 * kN / m, between(1.0 * m, 2.0 * m)) +
+                       linear_load(0.0 * kN / m, 6.0 * kN / m, between(2.0 * m, 3.0 * m)) +
+                       imposed_curvature(0.002 / m, between(1.0 * m, 3.0 * m)) +
+                       imposed_curvature(0.001 / m, between(2.0 * m, 4.0 * m));
+    const auto integrated = integrate_moment_area(b, loads);
+    const auto curvature_at = [&](double x, side which) {
+        return integrated.imposed_curvature(x * m, which) / (0.001 / (1.0 * m));
+    };
+    const auto load_at = [&](double x, side which) { return integrated.load(x * m, which) / (kN / m); };
+    struct place {
+        double x, curvature_left, curvature_right, load_left, load_right;
+    };
+    for (const auto& at : {place{0, 0, 0, 0, 0}, place{0.5, 0, 0, 0, 0}, place{1, 0, 2, 0, 3}, place{1.5, 2, 2, 3, 3},
+                           place{2, 2, 3, 3, 0}, place{2.5, 3, 3, 3, 3}, place{3, 3, 1, 6, 0}, place{4, 1, 0, 0, 0}}) {
+        CAPTURE(at.x);
+        CHECK(curvature_at(at.x, just_left) == doctest::Approx(at.curvature_left).epsilon(1e-14));
+        CHECK(curvature_at(at.x, just_right) == doctest::Approx(at.curvature_right).epsilon(1e-14));
+        CHECK(load_at(at.x, just_left) == doctest::Approx(at.load_left).epsilon(1e-14));
+        CHECK(load_at(at.x, just_right) == doctest::Approx(at.load_right).epsilon(1e-14));
+    }
+    CHECK(integrated.imposed_curvature(1.0 * m) == integrated.imposed_curvature(1.0 * m, just_right));
+    CHECK(integrated.imposed_curvature(4.0 * m) == integrated.imposed_curvature(4.0 * m, just_left));
+}

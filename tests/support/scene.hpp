@@ -203,6 +203,19 @@ void with_each_beam(double span, double rigidity, const F& f) {
     f(std::string("mirrored propped"), mirrored(propped_cantilever(L, EI)), hold::pinned, hold::fixed);
     f(std::string("fixed"), fixed_beam(L, EI), hold::fixed, hold::fixed);
 }
+/// The same with those that have an end that slides without turning.
+template <class F>
+void with_each_beam_and_guided(double span, double rigidity, const F& f) {
+    using reference::hold;
+    using namespace sagitta;
+    const auto L = span * units::m;
+    const auto EI = quantity<dimension::flexural_rigidity>::from_value(rigidity);
+    with_each_beam(span, rigidity, f);
+    f(std::string("guided, pinned"), beam_with_ends<held::guided, held::pinned>(L, EI), hold::guided, hold::pinned);
+    f(std::string("pinned, guided"), beam_with_ends<held::pinned, held::guided>(L, EI), hold::pinned, hold::guided);
+    f(std::string("guided, fixed"), beam_with_ends<held::guided, held::fixed>(L, EI), hold::guided, hold::fixed);
+    f(std::string("fixed, guided"), beam_with_ends<held::fixed, held::guided>(L, EI), hold::fixed, hold::guided);
+}
 
 /// Numbers that are the same on every platform; the seed is named where it is used.
 class chance {

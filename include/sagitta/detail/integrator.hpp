@@ -223,8 +223,9 @@ private:
         }
     }
 
-    /// Deflection and slope at the panel bounds. Between two supports by both of them; else from the clamped end
-    /// to the free one.
+    /// Deflection and slope at the panel bounds. Between two supports by both of them; else slopes from the end that
+    /// is held against rotation and deflections from the one that is held against deflection, which are one but for
+    /// guided beams: no slope is the difference of greater ones.
     void march(const acting_loads<T>& acting) {
         if constexpr (carried_by_both) {
             ends_ = {acting.settlement_left, acting.settlement_right};
@@ -242,23 +243,9 @@ private:
                 p.at_from = between_supports(p.from, p.left_of_it, p.right_of_it + about_right(p.to, p.curvature));
                 p.at_to = between_supports(p.to, p.left_of_it + about_left(p.from, p.curvature), p.right_of_it);
             }
-        } else if constexpr (Left::against_deflection) {
-            deflected here{acting.rotation_left, acting.settlement_left};
-            if constexpr (!Left::against_rotation) here.slope = acting.rotation_right + total_angle();
-            for (auto& p : panels_) {
-                p.at_from = here;
-                here = forward(here, p.to - p.from, p.curvature);
-                p.at_to = here;
-            }
         } else {
-            deflected here{acting.rotation_right, acting.settlement_right};
-            if constexpr (!Right::against_rotation) here.slope = acting.rotation_left - total_angle();
-            for (std::size_t i = panels_.size(); i-- > 0;) {
-                auto& p = panels_[i];
-                p.at_to = here;
-                here = backward(here, p.to - p.from, p.curvature);
-                p.at_from = here;
-            }
+            march_slopes(acting);
+            march_deflections(acting);
         }
     }
 
@@ -267,6 +254,44 @@ private:
         T sum(0);
         for (const auto& p : panels_) sum += p.curvature.area;
         return sum;
+    }
+
+    void march_slopes(const acting_loads<T>& acting) {
+        if constexpr (Left::against_rotation) {
+            T slope = acting.rotation_left;
+            for (auto& p : panels_) {
+                p.at_from.slope = slope;
+                slope -= p.curvature.area;
+                p.at_to.slope = slope;
+            }
+        } else {
+            T slope = acting.rotation_right;
+            for (std::size_t i = panels_.size(); i-- > 0;) {
+                auto& p = panels_[i];
+                p.at_to.slope = slope;
+                slope += p.curvature.area;
+                p.at_from.slope = slope;
+            }
+        }
+    }
+
+    void march_deflections(const acting_loads<T>& acting) {
+        if constexpr (Left::against_deflection) {
+            T deflection = acting.settlement_left;
+            for (auto& p : panels_) {
+                p.at_from.deflection = deflection;
+                deflection = forward(p.at_from, p.to - p.from, p.curvature).deflection;
+                p.at_to.deflection = deflection;
+            }
+        } else {
+            T deflection = acting.settlement_right;
+            for (std::size_t i = panels_.size(); i-- > 0;) {
+                auto& p = panels_[i];
+                p.at_to.deflection = deflection;
+                deflection = backward(p.at_to, p.to - p.from, p.curvature).deflection;
+                p.at_from.deflection = deflection;
+            }
+        }
     }
 
     static T about_left(const T& from, const panel_moments<T>& c) { return c.area * from + c.about_from; }
