@@ -5,24 +5,17 @@
 
 #include <sagitta/detail/acting_loads.hpp>
 #include <sagitta/detail/balanced_beam.hpp>
+#include <sagitta/detail/curvature_diagram.hpp>
 #include <sagitta/detail/panel.hpp>
 #include <sagitta/detail/refinement.hpp>
 #include <sagitta/ends.hpp>
 
-#include <algorithm>
 #include <array>
 #include <cstddef>
-#include <iterator>
 #include <type_traits>
 #include <vector>
 
 namespace sagitta::detail {
-
-template <class T>
-struct slope_and_deflection {
-    T slope{};
-    T deflection{};
-};
 
 /// A beam of span L under loads. Rigidity is EI: a number of type T, or a function from x to one.
 /// Prismatic beams are exact up to rounding, since the Gauss rule integrates their polynomials exactly; others
@@ -38,13 +31,13 @@ public:
 
     integrator(const T& span, const acting_loads<T>& acting, const Rigidity& rigidity, const std::vector<T>& steps = {},
                const T& tolerance = T(0))
-        : L_(span), EI_(rigidity), balance_(span, acting) {
+        : L_(span), EI_(rigidity), balance_(span, acting), diagram_(span) {
         joints_ = acting.joints(span, steps);
-        make_panels(panel_places(joints_, panels_between_joints));
+        diagram_.divide(panel_places(joints_, panels_between_joints));
         if constexpr (!is_prismatic) refine(tolerance);
-        for (const auto& misfit : acting.misfits) insert_misfit(panels_, misfit);
+        for (const auto& misfit : acting.misfits) diagram_.insert(misfit);
         solve_redundants(acting);
-        march(acting);
+        diagram_.march(acting);
     }
 
     [[nodiscard]] const T& span() const { return L_; }
@@ -62,35 +55,16 @@ public:
 
     /// Just left or just right of x where a lack of fit makes them jump.
     [[nodiscard]] slope_and_deflection<T> state_at(const T& x, side which) const {
-        const panel& p = panel_of(x, which);
-        if (x == p.from && (p.from < p.to || which == side::just_left)) return p.at_from;
-        if (x == p.to) return p.at_to;
-        if constexpr (carried_by_both) {
-            return between_supports(x, p.left_of_it + about_left(p.from, bending(p.from, x)),
-                                    p.right_of_it + about_right(p.to, bending(x, p.to)));
-        } else if constexpr (Left::against_deflection) {
-            return forward(p.at_from, x - p.from, bending(p.from, x));
-        } else {
-            return backward(p.at_to, p.to - x, bending(x, p.to));
-        }
+        return diagram_.state_at(x, which, [this](const T& from, const T& to) { return bending(from, to); });
     }
 
     /// Moments of the curvature about both ends of a stretch that may cross panels.
     [[nodiscard]] panel_moments<T> curvature_between(const T& a, const T& b) const {
-        panel_moments<T> sum;
-        const auto part = [this](const T& from, const T& to) { return bending(from, to); };
-        for (const auto& p : panels_) add_within(sum, a, b, p, part);
-        return sum;
+        return diagram_.between(a, b, [this](const T& from, const T& to) { return bending(from, to); });
     }
 
     /// The places that bound the panels of integration, ascending: ends, bounds of loads, steps, points between.
-    [[nodiscard]] std::vector<T> panel_bounds() const {
-        std::vector<T> bounds;
-        bounds.reserve(panels_.size() + 1);
-        for (const auto& p : panels_) bounds.push_back(p.from);
-        bounds.push_back(L_);
-        return bounds;
-    }
+    [[nodiscard]] std::vector<T> panel_bounds() const { return diagram_.bounds(); }
 
 private:
     /// The moments of clamped ends are redundant where both ends carry the beam.
@@ -102,15 +76,8 @@ private:
     static constexpr bool left_guided = !Left::against_deflection && Left::against_rotation;
     static constexpr bool right_guided = !Right::against_deflection && Right::against_rotation;
 
-    using deflected = slope_and_deflection<T>;
-
-    /// A stretch without joints, or a lack of fit: a place (from = to) whose curvature is concentrated there.
-    struct panel {
-        T from, to;
-        panel_moments<T> curvature{};
-        T left_of_it{}, right_of_it{};  // moments of the curvature there about the nearer end of the beam
-        deflected at_from{}, at_to{};
-    };
+    using diagram = curvature_diagram<Left, Right, T>;
+    using panel = typename diagram::panel;
 
     T EI_at(const T& x) const {
         if constexpr (is_prismatic) {
@@ -133,14 +100,8 @@ private:
         });
     }
 
-    void make_panels(const std::vector<T>& bounds) {
-        panels_.clear();
-        panels_.reserve(bounds.size() - 1);
-        for (std::size_t i = 1; i < bounds.size(); ++i) panels_.push_back({bounds[i - 1], bounds[i]});
-    }
-
     void integrate_curvature() {
-        for (auto& p : panels_) {
+        for (auto& p : diagram_.panels()) {
             if (p.from < p.to) p.curvature = bending(p.from, p.to);
         }
     }
@@ -160,7 +121,7 @@ private:
         };
         const auto refined = refine_panels<T, count>(panel_bounds(), fields, tolerance);
         error_estimate_ = refined.error_estimate;
-        make_panels(refined.bounds);
+        diagram_.divide(refined.bounds);
     }
 
     /// The integral over the beam of a curvature times a moment that varies linearly from end to end: the
@@ -168,7 +129,7 @@ private:
     template <class Moments>
     T work(const Moments& moments_of, const T& left, const T& right) const {
         T sum(0);
-        for (const auto& p : panels_) {
+        for (const auto& p : diagram_.panels()) {
             const auto& c = moments_of(p);
             sum +=
                 c.area * (left * ((L_ - p.from) / L_) + right * (p.from / L_)) + c.about_from * ((right - left) / L_);
@@ -185,10 +146,11 @@ private:
             if constexpr (Left::against_rotation && Right::against_rotation) {
                 // The angle between the ends is imposed.
                 T flexibility(0);
-                for (const auto& p : panels_) {
+                for (const auto& p : diagram_.panels()) {
                     flexibility += integrate(p.from, p.to, [&](const section& x) { return T(1) / EI_at(x.x()); }).area;
                 }
-                balance_everywhere((acting.rotation_left - acting.rotation_right - total_angle()) / flexibility);
+                balance_everywhere((acting.rotation_left - acting.rotation_right - diagram_.total_angle()) /
+                                   flexibility);
             } else {
                 // The pinned end passes no moment on.
                 const section pinned{left_guided ? L_ : T(0)};
@@ -223,116 +185,12 @@ private:
         }
     }
 
-    /// Deflection and slope at the panel bounds. Between two supports by both of them; else slopes from the end that
-    /// is held against rotation and deflections from the one that is held against deflection, which are one but for
-    /// guided beams: no slope is the difference of greater ones.
-    void march(const acting_loads<T>& acting) {
-        if constexpr (carried_by_both) {
-            ends_ = {acting.settlement_left, acting.settlement_right};
-            T sum(0);
-            for (auto& p : panels_) {
-                p.left_of_it = sum;
-                sum += about_left(p.from, p.curvature);
-            }
-            sum = T(0);
-            for (std::size_t i = panels_.size(); i-- > 0;) {
-                panels_[i].right_of_it = sum;
-                sum += about_right(panels_[i].to, panels_[i].curvature);
-            }
-            for (auto& p : panels_) {
-                p.at_from = between_supports(p.from, p.left_of_it, p.right_of_it + about_right(p.to, p.curvature));
-                p.at_to = between_supports(p.to, p.left_of_it + about_left(p.from, p.curvature), p.right_of_it);
-            }
-        } else {
-            march_slopes(acting);
-            march_deflections(acting);
-        }
-    }
-
-    /// By how much the slope falls from end to end.
-    T total_angle() const {
-        T sum(0);
-        for (const auto& p : panels_) sum += p.curvature.area;
-        return sum;
-    }
-
-    void march_slopes(const acting_loads<T>& acting) {
-        if constexpr (Left::against_rotation) {
-            T slope = acting.rotation_left;
-            for (auto& p : panels_) {
-                p.at_from.slope = slope;
-                slope -= p.curvature.area;
-                p.at_to.slope = slope;
-            }
-        } else {
-            T slope = acting.rotation_right;
-            for (std::size_t i = panels_.size(); i-- > 0;) {
-                auto& p = panels_[i];
-                p.at_to.slope = slope;
-                slope += p.curvature.area;
-                p.at_from.slope = slope;
-            }
-        }
-    }
-
-    void march_deflections(const acting_loads<T>& acting) {
-        if constexpr (Left::against_deflection) {
-            T deflection = acting.settlement_left;
-            for (auto& p : panels_) {
-                p.at_from.deflection = deflection;
-                deflection = forward(p.at_from, p.to - p.from, p.curvature).deflection;
-                p.at_to.deflection = deflection;
-            }
-        } else {
-            T deflection = acting.settlement_right;
-            for (std::size_t i = panels_.size(); i-- > 0;) {
-                auto& p = panels_[i];
-                p.at_to.deflection = deflection;
-                deflection = backward(p.at_to, p.to - p.from, p.curvature).deflection;
-                p.at_from.deflection = deflection;
-            }
-        }
-    }
-
-    static T about_left(const T& from, const panel_moments<T>& c) { return c.area * from + c.about_from; }
-    T about_right(const T& to, const panel_moments<T>& c) const { return c.area * (L_ - to) + c.about_to; }
-
-    /// The conjugate beam (Mohr) on its two supports: what bends left of x and right of it, each seen from its own
-    /// side, so that nothing cancels. Clamped ends are level because the redundants make them so.
-    deflected between_supports(const T& x, const T& left_of_x, const T& right_of_x) const {
-        const T xi = x / L_;
-        const T eta = (L_ - x) / L_;
-        return {(ends_.right - ends_.left + right_of_x - left_of_x) / L_,
-                eta * (ends_.left + left_of_x) + xi * (ends_.right + right_of_x)};
-    }
-
-    static deflected forward(const deflected& start, const T& width, const panel_moments<T>& c) {
-        return {start.slope - c.area, start.deflection + start.slope * width - c.about_to};
-    }
-    static deflected backward(const deflected& stop, const T& width, const panel_moments<T>& c) {
-        return {stop.slope + c.area, stop.deflection - stop.slope * width - c.about_from};
-    }
-
-    /// The panel that x lies in; where one panel ends and another begins, what lies on that side of all that is there.
-    const panel& panel_of(const T& x, side which) const {
-        if (which == side::just_left) {
-            return *std::lower_bound(panels_.begin(), panels_.end(), x,
-                                     [](const panel& p, const T& place) { return p.to < place; });
-        }
-        const auto after = std::upper_bound(panels_.begin(), panels_.end(), x,
-                                            [](const T& place, const panel& p) { return place < p.from; });
-        return *std::prev(after);
-    }
-
     T L_;
     Rigidity EI_;
     balanced_beam<Left, Right, T> balance_;
     std::vector<T> joints_;
-    std::vector<panel> panels_;
+    diagram diagram_;
     T error_estimate_{};
-    struct {
-        T left{}, right{};
-    } ends_;  // how far the supports have settled
 };
 
 }  // namespace sagitta::detail
