@@ -144,6 +144,7 @@ public:
             const std::array<T, 4> to_moment{e.EI / (L0 * L0), e.EI / L0, T(1), L0};
             for (std::size_t q = 0; q < 4; ++q) {
                 take(greatest, start[q] * to_moment[q]);
+                take(greatest, there[q] * to_moment[q]);
                 take(gap, (integrated[q] - there[q]) * to_moment[q]);
             }
         }

@@ -3,6 +3,7 @@
 
 #include <sagitta/detail/banded_system.hpp>
 #include <sagitta/detail/beam_part.hpp>
+#include <sagitta/detail/mechanism.hpp>
 #include <sagitta/detail/node.hpp>
 #include <sagitta/detail/refuse.hpp>
 #include <sagitta/ends.hpp>
@@ -14,7 +15,8 @@
 
 namespace sagitta::detail {
 
-/// Places every part and returns the moments at the nodes; invalid_input where the beam is a mechanism.
+/// Places every part and returns the moments at the nodes; invalid_input where the beam is a mechanism, or so near to
+/// one that nothing but rounding would be left.
 ///
 /// Two unknowns a node, its moment and its deflection, and two equations: the sections left and right of it turn
 /// alike, and forces balance. Two more a part, the tilt of its chord and the shear that its end moments make: written
@@ -23,6 +25,8 @@ namespace sagitta::detail {
 /// coefficient is near 1 and any stiffness k from 0 to infinite enters as k/(1 + k) and 1/(1 + k).
 template <class T>
 std::vector<quantity<moment, T>> place_parts(const std::vector<node<T>>& nodes, std::vector<beam_part<T>>& parts) {
+    if (const node<T>* const loose = loose_node(nodes)) [[unlikely]]
+        refuse("continuous_beam: the place", loose->at, "can move freely: the beam is a mechanism");
     const std::size_t count = nodes.size();
     const T L0 = nodes.back().at.value() / T(static_cast<double>(parts.size()));
     const T EI0 = parts.front().EI().value();
@@ -102,8 +106,7 @@ std::vector<quantity<moment, T>> place_parts(const std::vector<node<T>>& nodes, 
     const std::size_t free_unknown = equations.solve(unknowns);
     if (free_unknown < 4 * count - 2) [[unlikely]]
         refuse("continuous_beam: the place", nodes[free_unknown / 4].at,
-               free_unknown % 4 == 0 ? "can turn freely: the beam is a mechanism"
-                                     : "can move freely: the beam is a mechanism");
+               "gives way so much more than the rest that the beam cannot be told from a mechanism");
     // What is known beforehand is exact: the moment in a hinge, the movement of a rigid support.
     std::vector<quantity<moment, T>> node_moments;
     std::vector<quantity<length, T>> moved;
