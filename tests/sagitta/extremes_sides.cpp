@@ -1,5 +1,6 @@
 // Extremes at jumps, at the ends of a stretch, at hinges: both sides count.
 #include <support/doctest_quantities.hpp>
+#include <support/refusal.hpp>
 #include <support/relative.hpp>
 
 #include <sagitta/continuous_beam.hpp>
@@ -8,6 +9,7 @@
 #include <doctest/doctest.h>
 
 #include <cmath>
+#include <limits>
 #include <string>
 
 using namespace sagitta;
@@ -148,4 +150,55 @@ TEST_CASE("an overhang's tip") {
     CHECK(std::abs(moment.least.at / m - 6) < 1e-12);
     CHECK(relative(moment.least.value / (kN * m), -24) < 1e-13);
     CHECK(relative(moment.governing().value / (kN * m), -24) < 1e-13);
+}
+
+TEST_CASE("the extreme that governs is the greater in magnitude, of equal ones the greatest") {
+    const auto governing = [](double greatest, double least) {
+        using one = extreme<dimension::length, double>;
+        const extreme_pair<dimension::length, double> pair{one{1.0 * m, greatest * m}, one{2.0 * m, least * m}};
+        return pair.governing().value / m;
+    };
+    CHECK(governing(3, -2) == 3);
+    CHECK(governing(2, -3) == -3);
+    CHECK(governing(2, -2) == 2);
+    CHECK(governing(-1, -3) == -3);
+}
+
+TEST_CASE("a response that overflows is refused by its name") {
+    const auto huge = [](double P, double L) {
+        return simple_beam(L * m, 1.0 * N * m2)
+            .under(point_load(P * N, at(L / 4 * m)) + point_load(P * N, at(0.0 * m)));
+    };
+    const auto begins = [](const std::string& said, const char* with) { return said.rfind(with, 0) == 0; };
+    CHECK(begins(refusal([&] { (void)extremes_of_deflection(huge(1e300, 1e4)); }), "deflection = inf m"));
+    CHECK(begins(refusal([&] { (void)extremes_of_slope(huge(1e300, 1e5)); }), "slope = "));
+    CHECK(begins(refusal([&] { (void)extremes_of_moment(huge(1e305, 1e5)); }), "moment = inf N*m"));
+    const auto sheared =
+        simple_beam(1.0 * m, 1.0 * N * m2)
+            .under(uniform_load(1.7e308 * N / m) + uniform_load(1.7e308 * N / m) + uniform_load(1.7e308 * N / m));
+    CHECK(begins(refusal([&] { (void)extremes_of_shear(sheared); }), "shear = inf N"));
+}
+
+TEST_CASE("of equal sizes the first is kept; a turning point takes it from a joint that is greater by rounding only") {
+    const auto kept = [](double first, bool first_turns, double second, bool second_turns) {
+        detail::greatest_of<int, double> greatest;
+        greatest.offer(1, first, first_turns);
+        greatest.offer(2, second, second_turns);
+        return greatest.found();
+    };
+    constexpr double ulp = std::numeric_limits<double>::epsilon();
+    for (const double size : {1.0, -1.0}) {
+        CAPTURE(size);
+        const double more = size + 4 * ulp, much_more = size + 20 * ulp;
+        CHECK(kept(size, false, size, false) == 1);
+        CHECK(kept(size, true, size, true) == 1);
+        CHECK(kept(size, false, more, false) == 2);
+        CHECK(kept(more, false, size, true) == 2);
+        CHECK(kept(much_more, false, size, true) == 1);
+        CHECK(kept(size, true, more, false) == 1);
+        CHECK(kept(size, true, much_more, false) == 2);
+    }
+    CHECK(kept(-5, false, -7, true) == 1);
+    CHECK(kept(-5, true, -3, false) == 2);
+    CHECK(kept(0, false, 0, true) == 1);
 }

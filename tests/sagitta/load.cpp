@@ -38,7 +38,9 @@ constexpr auto a = point_load(22.0 * kN, at(3.0 * m)) + partial_uniform_load(9.0
 constexpr auto b = applied_couple(8.0 * kN * m, at(4.1 * m)) + uniform_load(3.0 * kN / m) +
                    linear_load(0.0 * kN / m, 6.0 * kN / m, between(1.2 * m, 4.8 * m)) +
                    linear_load(2.0 * kN / m, 1.0 * kN / m) + settlement(end::left, 5.0 * mm) +
-                   support_rotation(end::right, 0.5 * mrad);
+                   support_rotation(end::right, 0.5 * mrad) + imposed_curvature(0.001 / m, between(1.2 * m, 4.8 * m)) +
+                   imposed_curvature(-0.0005 / m) + imposed_kink(0.4 * mrad, at(2.0 * m)) +
+                   imposed_offset(1.0 * mm, at(3.0 * m));
 constexpr auto c = point_load(-7.0 * kN, at(6.3 * m));
 
 }  // namespace
@@ -79,7 +81,7 @@ TEST_CASE("a load knows its size and place") {
 }
 
 TEST_CASE("compositions are flat and hold their cases in order") {
-    static_assert(std::tuple_size_v<std::remove_cvref_t<decltype((a + b).cases())>> == 8);
+    static_assert(std::tuple_size_v<std::remove_cvref_t<decltype((a + b).cases())>> == 12);
     static_assert(std::tuple_size_v<std::remove_cvref_t<decltype((c + c).cases())>> == 2);
     static_assert(std::get<1>((c + 2 * c).cases()).size() == -14.0 * kN);
 }
