@@ -7,7 +7,9 @@
 #include <doctest/doctest.h>
 
 #include <algorithm>
+#include <initializer_list>
 #include <limits>
+#include <utility>
 #include <vector>
 
 using namespace sagitta;
@@ -146,4 +148,44 @@ TEST_CASE("a discrepancy that is not a number is never small") {
     kept.compare(nan, 1);
     kept.compare(1, 1);
     CHECK_FALSE(kept.relative_to(0) <= bound);
+}
+
+TEST_CASE("a discrepancy keeps the greatest magnitude and the greatest difference, whatever their signs") {
+    const auto after = [](std::initializer_list<std::pair<double, double>> pairs) {
+        detail::discrepancy<double> d;
+        for (const auto& [closed, integrated] : pairs) d.compare(closed, integrated);
+        return std::pair(d.size, d.difference);
+    };
+    using result = std::pair<double, double>;
+    CHECK(after({{0.25, 0.25}}) == result(0.25, 0));
+    CHECK(after({{-0.25, -0.25}}) == result(0.25, 0));
+    CHECK(after({{0.25, 0.5}}) == result(0.5, 0.25));
+    CHECK(after({{0.5, 0.25}}) == result(0.5, 0.25));
+    CHECK(after({{-0.5, 0.25}}) == result(0.5, 0.75));
+    CHECK(after({{0.25, -0.5}}) == result(0.5, 0.75));
+    CHECK(after({{3, 1}, {4, 3.5}, {-2, -1.5}}) == result(4, 2));
+    CHECK(after({{4, 3.5}, {1, 3}}) == result(4, 2));
+}
+
+TEST_CASE("differences are relative to the greatest value, or to what the other responses imply of one that vanishes") {
+    // Over 2 m that turn by 0.01 under a unit moment: the deflection of 0.5 implies a moment of 0.25/0.01.
+    const detail::discrepancy<double> shear{4, 1}, moment{10, 2}, slope{0.125, 0.0125}, deflection{0.5, 0.05};
+    const auto all = detail::discrepancies<double>{shear, moment, slope, deflection, {}, {}}.relative(2, 0.01);
+    CHECK(all.shear == 0.25);
+    CHECK(all.moment == 0.2);
+    CHECK(all.slope == doctest::Approx(0.1));
+    CHECK(all.deflection == doctest::Approx(0.1));
+
+    const detail::discrepancy<double> vanishing{1e-13, 1e-13};
+    const auto flat = detail::discrepancies<double>{vanishing, vanishing, slope, deflection, {}, {}}.relative(2, 0.01);
+    CHECK(flat.shear == doctest::Approx(1e-13 / 12.5));
+    CHECK(flat.moment == doctest::Approx(1e-13 / 25));
+    const auto level = detail::discrepancies<double>{shear, moment, vanishing, vanishing, {}, {}}.relative(2, 0.01);
+    CHECK(level.slope == doctest::Approx(1e-13 / 0.1));
+    CHECK(level.deflection == doctest::Approx(1e-13 / 0.2));
+
+    // Forces at supports measure by themselves and by what is along the beam, whichever is greater.
+    const auto held = detail::discrepancies<double>{shear, moment, slope, deflection, {8, 4}, {5, 4}}.relative(2, 0.01);
+    CHECK(held.shear == 0.5);
+    CHECK(held.moment == 0.4);
 }

@@ -78,6 +78,10 @@ TEST_CASE("a load knows its size and place") {
     static_assert((3 * ramp).size_to() == 18.0 * kN / m);
     static_assert(settlement(end::right, 5.0 * mm).size() == 5.0 * mm);
     static_assert((2 * support_rotation(end::left, 0.5 * mrad)).size() == 1.0 * mrad);
+    // alpha dT/h, sagging where the bottom is warmer.
+    constexpr auto warm = temperature_gradient(12e-6 / K, 20.0 * K, warm_side::bottom, 0.4 * m);
+    static_assert(abs(warm.size() - 6e-4 / m) < 1e-18 / m);
+    static_assert(temperature_gradient(12e-6 / K, 20.0 * K, warm_side::top, 0.4 * m).size() == -warm.size());
 }
 
 TEST_CASE("compositions are flat and hold their cases in order") {
