@@ -39,6 +39,13 @@ public:
         loads_ += load_types::concentrated<Action, T>(size, place);
         if constexpr (Action == load_types::action::couple) {
             couples_.push_back({place.x, size});
+        } else if constexpr (Action == load_types::action::point_force) {
+            // What stands right at the left end goes into the node.
+            if (place.x > quantity<length, T>{}) {
+                add_resultant(size, span() - place.x);
+            } else {
+                force_at_left_end_ += size;
+            }
         }
     }
     template <class Load>
@@ -62,6 +69,11 @@ public:
         } else {
             loads_ += load_types::linear<T, load_types::stretch<T>>(w_at(from), w_at(to), where);
         }
+        // As two triangles.
+        const auto width = to - from;
+        const auto beyond = to_ - to;
+        add_resultant(w_at(from) * width / T(2), beyond + width * (T(2) / T(3)));
+        add_resultant((Load::is_uniform ? w_from : w_at(to)) * width / T(2), beyond + width / T(3));
     }
     template <class N, class Where>
     void add(const load_types::imposed_curvature<N, Where>& load) {
@@ -75,14 +87,18 @@ public:
     /// The part as a simple beam under its loads alone.
     [[nodiscard]] auto simply_supported() const { return beam_.under(loads_); }
 
-    /// What shear adds to the turning of a section: the mean shear of the loads, which end moments change by their
-    /// difference over the span.
-    [[nodiscard]] quantity<plane_angle, T> shear_turn() const {
-        return as_angle(sum_of_couples(span(), side::just_right) / span() * shear_flexibility_);
-    }
+    /// The forces right at its left end; all the others, and their moment about its right end.
+    [[nodiscard]] const quantity<force, T>& force_at_left_end() const { return force_at_left_end_; }
+    [[nodiscard]] const quantity<force, T>& force_of_loads() const { return force_of_loads_; }
+    [[nodiscard]] const quantity<moment, T>& moment_of_forces() const { return moment_of_forces_; }
+    [[nodiscard]] quantity<moment, T> couples_of_loads() const { return sum_of_couples(span(), side::just_right); }
+
+    /// What shear adds to the turning of a section: how much less the mean shear is than that at the left end.
+    [[nodiscard]] quantity<plane_angle, T> shear_turn() const { return as_angle(shear_drop() * shear_flexibility_); }
 
     /// Fixes the part in the whole beam: sagging moments at its ends and how far these have moved down; and, as solved
-    /// for and not as a difference of those, the tilt of its chord and the shear that the end moments make.
+    /// for and not as a difference of those, the tilt of its chord and the shear at its left end, behind the loads that
+    /// stand right there.
     void place(const quantity<moment, T>& M_left, const quantity<moment, T>& M_right, const quantity<length, T>& v_left,
                const quantity<length, T>& v_right, const quantity<plane_angle, T>& tilt,
                const quantity<force, T>& shear) {
@@ -105,12 +121,12 @@ public:
             const auto chord = v_left_ * ((span() - s) / span()) + v_right_ * (s / span());
             return chord + (loaded.deflection(s, which) + bent.deflection(s) + shear_deflection(s));
         } else if constexpr (R == response::slope) {
-            const auto sliding = loaded.shear(s, inside(s, which)) + shear_ - mean_shear();
+            const auto sliding = shear_gained(s, which) + shear_drop();
             return tilt_ + (loaded.slope(s, which) + bent.slope(s) + as_angle(sliding * shear_flexibility_));
         } else if constexpr (R == response::moment) {
             return loaded.moment(s, inside(s, which)) + bent.moment(s);
         } else {
-            return loaded.shear(s, inside(s, which)) + shear_;
+            return shear_ + shear_gained(s, which);
         }
     }
     [[nodiscard]] quantity<line_load, T> load(const quantity<length, T>& x, side which) const {
@@ -120,8 +136,8 @@ public:
         return loaded_.front().imposed_curvature(std::min(x - from_, span()), which);
     }
     /// Shear at the ends of the part, loads that stand right there included.
-    [[nodiscard]] quantity<force, T> outer_shear_left() const { return loaded_.front().reaction(end::left) + shear_; }
-    [[nodiscard]] quantity<force, T> outer_shear_right() const { return shear_ - loaded_.front().reaction(end::right); }
+    [[nodiscard]] quantity<force, T> outer_shear_left() const { return shear_ + force_at_left_end_; }
+    [[nodiscard]] quantity<force, T> outer_shear_right() const { return shear_ - force_of_loads_; }
 
     [[nodiscard]] auto joints() const { return loaded_.front().joints(); }
 
@@ -144,7 +160,18 @@ private:
         return sum;
     }
 
-    quantity<force, T> mean_shear() const { return shear_ - sum_of_couples(span(), side::just_right) / span(); }
+    void add_resultant(const quantity<force, T>& size, const quantity<length, T>& to_right_end) {
+        force_of_loads_ += size;
+        moment_of_forces_ += size * to_right_end;
+    }
+
+    /// By how much the shear at s exceeds that at the left end. What couples make of the simple beam's own shear
+    /// cancels exactly: it may be a million times what is left of it in the whole beam.
+    quantity<force, T> shear_gained(const quantity<length, T>& s, side which) const {
+        return loaded_.front().shear(s, inside(s, which)) - loaded_.front().shear(quantity<length, T>{});
+    }
+    quantity<force, T> shear_drop() const { return moment_of_forces_ / span(); }
+    quantity<force, T> mean_shear() const { return shear_ - shear_drop(); }
 
     /// The integral of (shear - mean shear)/kGA up to s. Zero at both ends of the part.
     quantity<length, T> shear_deflection(const quantity<length, T>& s) const {
@@ -158,6 +185,8 @@ private:
     quantity<inverse_force, T> shear_flexibility_;
     load_list<T> loads_;
     std::vector<couple_at> couples_;
+    quantity<force, T> force_at_left_end_{}, force_of_loads_{};
+    quantity<moment, T> moment_of_forces_{};
     // One of each, once placed: under the loads, and under the end moments.
     std::vector<elastic_line<simple, load_list<T>>> loaded_;
     std::vector<elastic_line<simple, load_types::load_sum<couple, couple>>> bent_;

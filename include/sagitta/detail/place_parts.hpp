@@ -19,10 +19,11 @@ namespace sagitta::detail {
 /// one that nothing but rounding would be left.
 ///
 /// Two unknowns a node, its moment and its deflection, and two equations: the sections left and right of it turn
-/// alike, and forces balance. Two more a part, the tilt of its chord and the shear that its end moments make: written
-/// out as equations of their own, so that differences of deflections and of moments keep coefficients that are exact (a
-/// beam on soft springs moves far more than it bends). Scaled to a mean span and the first EI, so that every
-/// coefficient is near 1 and any stiffness k from 0 to infinite enters as k/(1 + k) and 1/(1 + k).
+/// alike, and forces balance. Two more a part, the tilt of its chord and the shear at its left end: written out as
+/// equations of their own, so that differences of deflections and of moments keep coefficients that are exact (a beam
+/// on soft springs moves far more than it bends, and under couples its shear may be a millionth of what they are
+/// apart). Scaled to a mean span and the first EI, so that every coefficient is near 1 and any stiffness k from 0 to
+/// infinite enters as k/(1 + k) and 1/(1 + k).
 template <class T>
 std::vector<quantity<moment, T>> place_parts(const std::vector<node<T>>& nodes, std::vector<beam_part<T>>& parts) {
     if (const node<T>* const loose = loose_node(nodes)) [[unlikely]]
@@ -81,9 +82,10 @@ std::vector<quantity<moment, T>> place_parts(const std::vector<node<T>>& nodes, 
         equations(V(i), M(i + 1)) = T(1);
         equations(V(i), M(i)) = T(-1);
         equations(V(i), V(i)) = -L / power;
+        equations.right_hand_side(V(i)) = (p.couples_of_loads() - p.moment_of_forces()).value() * L0 / EI0;
         powers.push_back(power);
         // One end of the part at a time: sign is 1 for its left end, -1 for its right end.
-        const auto join = [&](std::size_t near, std::size_t far, int sign, const T& slope, const T& reaction) {
+        const auto join = [&](std::size_t near, std::size_t far, int sign, const T& slope, const T& force) {
             // The turn of the section, equal on both sides of the node.
             const T w = T(-sign) * turning_weight[near];
             equations(M(near), M(near)) += w * T(sign) * bend / T(3);
@@ -94,12 +96,12 @@ std::vector<quantity<moment, T>> place_parts(const std::vector<node<T>>& nodes, 
             // What the part rests on the node with.
             const T b = balance_weight[near];
             equations(v(near), V(i)) += T(sign) * b / power;
-            equations.right_hand_side(v(near)) -= b * reaction * L0 * L0 / EI0;
+            equations.right_hand_side(v(near)) -= b * force * L0 * L0 / EI0;
         };
         // A kink that stands right at a node lies between the slope of the node and that of the part.
         const quantity<length, T> start{};
-        join(i, i + 1, 1, loaded.slope(start, just_left).value(), loaded.reaction(end::left).value());
-        join(i + 1, i, -1, loaded.slope(p.span(), just_right).value(), loaded.reaction(end::right).value());
+        join(i, i + 1, 1, loaded.slope(start, just_left).value(), p.force_at_left_end().value());
+        join(i + 1, i, -1, loaded.slope(p.span(), just_right).value(), p.force_of_loads().value());
     }
 
     std::vector<T> unknowns;

@@ -21,8 +21,9 @@ using flexibility = quantity<beam_part<double>::inverse_force>;
 beam_part<double> part(const flexibility& shear = {}) { return {4.0 * m, 10.0 * m, EI * N * m2, shear}; }
 
 void place(beam_part<double>& p, double M_left = 0, double M_right = 0, double v_left = 0, double v_right = 0) {
-    p.place(M_left * N * m, M_right * N * m, v_left * m, v_right * m, (v_right - v_left) / 6 * rad,
-            (M_right - M_left) / 6 * N);
+    // Moments about the right end.
+    const auto shear = ((M_right - M_left) * N * m + p.moment_of_forces() - p.couples_of_loads()) / (6.0 * m);
+    p.place(M_left * N * m, M_right * N * m, v_left * m, v_right * m, (v_right - v_left) / 6 * rad, shear);
 }
 
 double deflection(const beam_part<double>& p, double x) { return p.at<response::deflection>(x * m, just_right) / m; }
@@ -45,6 +46,27 @@ TEST_CASE("places are those of the whole beam") {
     CHECK(relative(moment_of(p, 6), 16e3) < 1e-14);
     CHECK(relative(shear_of(p, 6, just_left), 8e3) < 1e-14);
     CHECK(relative(shear_of(p, 6, just_right), -4e3) < 1e-14);
+}
+
+TEST_CASE("forces as the node equations see them") {
+    auto p = part();
+    p.add(point_load(3.0 * kN, at(4.0 * m)));   // right at the left end
+    p.add(point_load(5.0 * kN, at(10.0 * m)));  // and at the right one
+    p.add(point_load(12.0 * kN, at(6.0 * m)));
+    p.add(partial_uniform_load(2.0 * kN / m, between(3.0 * m, 7.0 * m)));
+    p.add(linear_load(0.0 * kN / m, 3.0 * kN / m, between(5.0 * m, 8.0 * m)));
+    p.add(applied_couple(9.0 * kN * m, at(6.0 * m)));
+    CHECK(p.force_at_left_end() == 3.0 * kN);
+    CHECK(relative(p.force_of_loads() / kN, 5 + 12 + 2 * 3 + 4.5) < 1e-14);
+    // Resultants times their distances from 10 m: half of 4 m to 7 m, two thirds of 5 m to 8 m.
+    CHECK(relative(p.moment_of_forces() / (kN * m), 12 * 4 + 6 * 4.5 + 4.5 * 3) < 1e-14);
+    CHECK(p.couples_of_loads() == 9.0 * kN * m);
+    place(p);
+    const double V = (12 * 4 + 6 * 4.5 + 4.5 * 3 - 9) / 6;
+    CHECK(relative(shear_of(p, 4) / 1e3, V) < 1e-14);
+    CHECK(relative(p.outer_shear_left() / kN, V + 3) < 1e-14);
+    CHECK(relative(p.outer_shear_right() / kN, V - 27.5) < 1e-14);
+    CHECK(relative(shear_of(p, 10, just_left) / 1e3, V - 22.5) < 1e-14);
 }
 
 TEST_CASE("line loads are cut to the part") {
@@ -100,15 +122,16 @@ TEST_CASE("shear deformation adds the integral of V/kGA, zero at both ends") {
     // dv/dx is steeper by V/kGA at the end; the section itself turns no more than before.
     const auto slope = [](const auto& q) { return q.template at<response::slope>(4.0 * m, just_right) / rad; };
     CHECK(relative(slope(p) - slope(stiff), 6e3 / kGA) < 1e-12);
-    CHECK(p.shear_turn() == 0.0 * rad);
+    // The mean shear is 0: that at the left end less w L/2.
+    CHECK(relative(p.shear_turn() / rad, 6e3 / kGA) < 1e-14);
 }
 
-TEST_CASE("couples turn sections also by shear") {
+TEST_CASE("couples make a shear that deflects nothing") {
     auto p = part(1.0 / (kGA * N));
     p.add(applied_couple(9.0 * kN * m, at(6.0 * m)));
     place(p);
-    CHECK(relative(p.shear_turn() / rad, 9e3 / 6 / kGA) < 1e-14);
-    // The shear is the same everywhere: between ends that do not move it tilts the sections and deflects nothing.
+    CHECK(p.shear_turn() == 0.0 * rad);  // the shear is the same everywhere
+    // Between ends that do not move it tilts the sections and deflects nothing.
     auto stiff = part();
     stiff.add(applied_couple(9.0 * kN * m, at(6.0 * m)));
     place(stiff);
