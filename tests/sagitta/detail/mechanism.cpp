@@ -52,9 +52,9 @@ TEST_CASE("random beams are mechanisms for the sweep if they are for direct stif
         const int last = random.whole(1, 8);
         for (int x = 0; x <= last; ++x) {
             node here{static_cast<double>(x) * m};
-            if (random.in(0, 1) < 0.5) here.transverse = random.toss() ? rigid : 2;
+            if (random.in(0, 1) < 0.5) here.transverse = random.toss() ? rigid : 0.5;
             const bool at_end = x == 0 || x == last;
-            if (at_end && random.in(0, 1) < 0.3) here.turning = random.toss() ? rigid : 3;
+            if (at_end && random.in(0, 1) < 0.3) here.turning = random.toss() ? rigid : 0.25;
             if (!at_end && random.in(0, 1) < 0.4) here.is_hinge = true;
             text += std::to_string(x) + (here.transverse > 0 ? " held" : "") + (here.turning > 0 ? " turning" : "") +
                     (here.is_hinge ? " hinge; " : "; ");
