@@ -9,6 +9,7 @@
 
 #include <algorithm>
 #include <cmath>
+#include <limits>
 #include <string>
 
 using namespace sagitta;
@@ -185,20 +186,37 @@ TEST_CASE("a stepped cantilever") {
     //   tip slope      = P/(2K) [ (L^2 - (L - a)^2)/2 + (L - a)^2 ]. Derived for this test.
     const double P = 5e3;
     const double L = 3;
-    const double a = 1.3;
     const double base_EI = 8e5;  // K
+    for (const double a : {0.4, 1.3}) {
+        CAPTURE(a);
+        const auto EI = [=](const quantity<dimension::length>& x) {
+            return rigidity(x.value() < a ? 2 * base_EI : base_EI);
+        };
+        const auto line =
+            integrate_moment_area(cantilever(L * m, rigidity(base_EI)), point_load(P * N, at(L * m)), EI, {a * m});
+        const double rest = L - a;
+        CHECK(relative(line.deflection(L * m).value(),
+                       P / (3 * base_EI) * ((L * L * L - rest * rest * rest) / 2 + rest * rest * rest)) < 1e-13);
+        CHECK(relative(line.slope(L * m).value(), P / (2 * base_EI) * ((L * L - rest * rest) / 2 + rest * rest)) <
+              1e-13);
+        // A step is no place without memory: between the points left of it only 2K counts.
+        CHECK(relative(line.between(0.0 * m, a * m).angle_change.value(), P / (4 * base_EI) * (L * L - rest * rest)) <
+              1e-13);
+    }
+}
+
+TEST_CASE("a notch that is narrow beside the panels: they are halved until the default tolerance is met") {
+    // A couple C at the tip turns it by the integral of C/EI. EI = K (w^2 + (s - c)^2) with s = x/L:
+    //   C L/(K w) [ atan((1 - c)/w) + atan(c/w) ]
+    const double w = 0.01, c = 0.37, C = 2e3, L = 4, K = 3e7;
     const auto EI = [=](const quantity<dimension::length>& x) {
-        return rigidity(x.value() < a ? 2 * base_EI : base_EI);
+        const double s = x.value() / L;
+        return rigidity(K * (w * w + (s - c) * (s - c)));
     };
-    const auto line =
-        integrate_moment_area(cantilever(L * m, rigidity(base_EI)), point_load(P * N, at(L * m)), EI, {a * m});
-    const double rest = L - a;
-    CHECK(relative(line.deflection(L * m).value(),
-                   P / (3 * base_EI) * ((L * L * L - rest * rest * rest) / 2 + rest * rest * rest)) < 1e-13);
-    CHECK(relative(line.slope(L * m).value(), P / (2 * base_EI) * ((L * L - rest * rest) / 2 + rest * rest)) < 1e-13);
-    // A step is no place without memory: between the points left of it only 2K counts.
-    CHECK(relative(line.between(0.0 * m, a * m).angle_change.value(), P / (4 * base_EI) * (L * L - rest * rest)) <
-          1e-13);
+    const auto line = integrate_moment_area(cantilever(L * m, rigidity(K)), applied_couple(C * N * m, at(L * m)), EI);
+    const double turn = C * L / (K * w) * (std::atan((1 - c) / w) + std::atan(c / w));
+    CHECK(relative(std::abs(line.slope(L * m).value()), turn) < 1e-12);
+    CHECK(line.error_estimate() <= 1000 * std::numeric_limits<double>::epsilon());
 }
 
 TEST_CASE("a stepped simple beam, published") {
