@@ -1,4 +1,4 @@
-// expect the compiler's: conversion from 'quantity<unit<
+// expect the compiler's: conversion from 'quantity<
 #include "twin.hpp"
 
 #ifdef WRONG
