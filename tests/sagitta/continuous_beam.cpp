@@ -446,3 +446,37 @@ TEST_CASE("a hinge that passes on the moment that stood there changes nothing") 
     CHECK(still.under(load_list<>{}).deflection(6.0 * m) == 0.0 * m);
     CHECK(still.under(loads).moment(4.0 * m) == 0.0 * kN * m);
 }
+
+TEST_CASE("an offset at a node puts the beam beside what holds it, and costs no digits where little is bent") {
+    // By the definition of an offset: the part right of it is lower. Its 2 m are 10,000 million times the deflection.
+    const double L = 10, EI = 1e6, w = 1e-3;
+    const auto offset_at = [](double x) { return imposed_offset(2.0 * m, at(x * m)); };
+    const auto load = uniform_load(w * N / m);
+    const auto guided = continuous_beam(L * m, EI * N * m2).guide(end::left).hinge_at(3.0 * m).clamp(end::right);
+    const auto plain = guided.under(load);
+    const auto moved = guided.under(load + offset_at(0));
+    const auto free = continuous_beam(L * m, EI * N * m2).clamp(end::left).hinge_at(7.0 * m).guide(end::right);
+    const auto free_plain = free.under(load);
+    const auto free_moved = free.under(load + offset_at(L));
+    for (const double x : {0.0, 1.0, 3.0, 5.0, 9.0, 10.0}) {
+        CAPTURE(x);
+        CHECK(moved.deflection(x * m) == plain.deflection(x * m));
+        CHECK(moved.slope(x * m) == plain.slope(x * m));
+        CHECK(free_moved.deflection(x * m) == free_plain.deflection(x * m));
+        CHECK(free_moved.slope(x * m) == free_plain.slope(x * m));
+    }
+    CHECK(moved.deflection(0.0 * m, just_left) == plain.deflection(0.0 * m) - 2.0 * m);
+    CHECK(free_moved.deflection(L * m, just_right) == free_plain.deflection(L * m) + 2.0 * m);
+
+    // At a rigid support the part left of it rests on it, at the left end whatever holds that.
+    const auto two = continuous_beam(L * m, EI * N * m2).support_at(0.0 * m).support_at(4.0 * m).support_at(L * m);
+    const auto stepped = two.under(offset_at(4));
+    CHECK(stepped.deflection(4.0 * m, just_left) == 0.0 * m);
+    CHECK(stepped.deflection(4.0 * m, just_right) == 2.0 * m);
+    const auto lower = continuous_beam(L * m, EI * N * m2).support_at(0.0 * m).support_at(L * m).under(offset_at(0));
+    CHECK(lower.deflection(0.0 * m, just_left) == 0.0 * m);
+    CHECK(relative(lower.deflection(2.5 * m) / m, 1.5) < 1e-15);
+    const auto higher = continuous_beam(L * m, EI * N * m2).support_at(0.0 * m).support_at(L * m).under(offset_at(L));
+    CHECK(higher.deflection(L * m, just_right) == 0.0 * m);
+    CHECK(relative(higher.deflection(2.5 * m) / m, -0.5) < 1e-15);
+}

@@ -36,6 +36,14 @@ public:
     void add(const load_types::concentrated<Action, N>& load) {
         const auto place = load_types::position<T>{coherent<length, T>(load.at()) - from_};
         const auto size = coherent<typename load_types::concentrated<Action, N>::unit, T>(load.size());
+        if constexpr (Action == load_types::action::offset) {
+            // At an end the whole part is lower than what holds it, and nothing is bent.
+            const bool is_left = !(place.x > quantity<length, T>{});
+            if (is_left || !(place.x < span())) {
+                (is_left ? offset_at_left_end_ : offset_at_right_end_) += size;
+                return;
+            }
+        }
         loads_ += load_types::concentrated<Action, T>(size, place);
         if constexpr (Action == load_types::action::couple) {
             couples_.push_back({place.x, size});
@@ -91,14 +99,17 @@ public:
     [[nodiscard]] const quantity<force, T>& force_at_left_end() const { return force_at_left_end_; }
     [[nodiscard]] const quantity<force, T>& force_of_loads() const { return force_of_loads_; }
     [[nodiscard]] const quantity<moment, T>& moment_of_forces() const { return moment_of_forces_; }
+    /// Offsets right at its ends: how much lower it is than the node left of it, and the node right of it than it.
+    [[nodiscard]] const quantity<length, T>& offset_at_left_end() const { return offset_at_left_end_; }
+    [[nodiscard]] const quantity<length, T>& offset_at_right_end() const { return offset_at_right_end_; }
     [[nodiscard]] quantity<moment, T> couples_of_loads() const { return sum_of_couples(span(), side::just_right); }
 
     /// What shear adds to the turning of a section: how much less the mean shear is than that at the left end.
     [[nodiscard]] quantity<plane_angle, T> shear_turn() const { return as_angle(shear_drop() * shear_flexibility_); }
 
-    /// Fixes the part in the whole beam: sagging moments at its ends and how far these have moved down; and, as solved
-    /// for and not as a difference of those, the tilt of its chord and the shear at its left end, behind the loads that
-    /// stand right there.
+    /// Fixes the part in the whole beam: sagging moments at its ends and how far these have moved down, offsets
+    /// included; and, as solved for and not as a difference of those, the tilt of its chord and the shear at its left
+    /// end, behind the loads that stand right there.
     void place(const quantity<moment, T>& M_left, const quantity<moment, T>& M_right, const quantity<length, T>& v_left,
                const quantity<length, T>& v_right, const quantity<plane_angle, T>& tilt,
                const quantity<force, T>& shear) {
@@ -111,13 +122,16 @@ public:
         shear_ = shear;
     }
 
-    /// A response at x of the whole beam. At the ends of the part moment and shear are those inside it.
+    /// A response at x of the whole beam. At the ends of the part moment and shear are those inside it; outside it
+    /// deflections are those of the nodes.
     template <response R>
     [[nodiscard]] response_quantity<R, T> at(const quantity<length, T>& x, side which) const {
         const auto s = std::min(x - from_, span());
         const auto& loaded = loaded_.front();
         const auto& bent = bent_.front();
         if constexpr (R == response::deflection) {
+            if (which == side::just_left && !(s > quantity<length, T>{})) return v_left_ - offset_at_left_end_;
+            if (which == side::just_right && !(s < span())) return v_right_ + offset_at_right_end_;
             const auto chord = v_left_ * ((span() - s) / span()) + v_right_ * (s / span());
             return chord + (loaded.deflection(s, which) + bent.deflection(s) + shear_deflection(s));
         } else if constexpr (R == response::slope) {
@@ -187,6 +201,7 @@ private:
     std::vector<couple_at> couples_;
     quantity<force, T> force_at_left_end_{}, force_of_loads_{};
     quantity<moment, T> moment_of_forces_{};
+    quantity<length, T> offset_at_left_end_{}, offset_at_right_end_{};
     // One of each, once placed: under the loads, and under the end moments.
     std::vector<elastic_line<simple, load_list<T>>> loaded_;
     std::vector<elastic_line<simple, load_types::load_sum<couple, couple>>> bent_;

@@ -18,8 +18,9 @@ namespace sagitta::detail {
 /// Places every part and returns the moments at the nodes; invalid_input where the beam is a mechanism, or so near to
 /// one that nothing but rounding would be left.
 ///
-/// Two unknowns a node, its moment and its deflection, and two equations: the sections left and right of it turn
-/// alike, and forces balance. Two more a part, the tilt of its chord and the shear at its left end: written out as
+/// Two unknowns a node, its moment and the deflection of the part right of it (at the last node, left of it: offsets
+/// may lie between a part and the node), and two equations: the sections left and right of it turn alike, and forces
+/// balance. Two more a part, the tilt of its chord and the shear at its left end: written out as
 /// equations of their own, so that differences of deflections and of moments keep coefficients that are exact (a beam
 /// on soft springs moves far more than it bends, and under couples its shear may be a millionth of what they are
 /// apart). Scaled to a mean span and the first EI, so that every coefficient is near 1 and any stiffness k from 0 to
@@ -45,6 +46,12 @@ std::vector<quantity<moment, T>> place_parts(const std::vector<node<T>>& nodes, 
     const auto V = [](std::size_t part_number) { return 4 * part_number + 3; };
     banded_system<T, 4> equations(4 * count - 2);
 
+    // How much lower a node is than the part whose deflection is its unknown. A beam may be far from what holds it and
+    // bend little: what is asked for is where the beam is.
+    const auto below_part = [&](std::size_t i) {
+        const auto gap = i < parts.size() ? -parts[i].offset_at_left_end() : parts.back().offset_at_right_end();
+        return gap.value();
+    };
     std::vector<T> turning_weight(count, T(1)), balance_weight(count, T(1));
     for (std::size_t i = 0; i < count; ++i) {
         const node<T>& here = nodes[i];
@@ -53,7 +60,7 @@ std::vector<quantity<moment, T>> place_parts(const std::vector<node<T>>& nodes, 
         const T k_transverse = scaled(here.transverse, L0 * L0 * L0 / EI0);
         balance_weight[i] = soft(k_transverse);
         equations(v(i), v(i)) = -stiff(k_transverse);
-        equations.right_hand_side(v(i)) = -stiff(k_transverse) * here.settled / L0;
+        equations.right_hand_side(v(i)) = -stiff(k_transverse) * (here.settled - below_part(i)) / L0;
         if (here.is_hinge || (at_end && here.turning == T(0))) {
             turning_weight[i] = T(0);
             equations(M(i), M(i)) = T(1);
@@ -79,6 +86,7 @@ std::vector<quantity<moment, T>> place_parts(const std::vector<node<T>>& nodes, 
         equations(tilt(i), v(i + 1)) = T(1);
         equations(tilt(i), v(i)) = T(-1);
         equations(tilt(i), tilt(i)) = -L / power;
+        equations.right_hand_side(tilt(i)) = i + 1 < parts.size() ? -below_part(i + 1) / L0 : T(0);
         equations(V(i), M(i + 1)) = T(1);
         equations(V(i), M(i)) = T(-1);
         equations(V(i), V(i)) = -L / power;
@@ -111,18 +119,22 @@ std::vector<quantity<moment, T>> place_parts(const std::vector<node<T>>& nodes, 
                "gives way so much more than the rest that the beam cannot be told from a mechanism");
     // What is known beforehand is exact: the moment in a hinge, the movement of a rigid support.
     std::vector<quantity<moment, T>> node_moments;
-    std::vector<quantity<length, T>> moved;
     for (std::size_t i = 0; i < count; ++i) {
-        const T& weight = turning_weight[i];
-        const T known = nodes[i].passed;
-        node_moments.push_back(quantity<moment, T>::from_value(weight == T(0) ? known : unknowns[M(i)] * EI0 / L0));
-        const T settled = nodes[i].settled;
-        moved.push_back(quantity<length, T>::from_value(balance_weight[i] == T(0) ? settled : unknowns[v(i)] * L0));
+        const bool is_known = turning_weight[i] == T(0);
+        node_moments.push_back(quantity<moment, T>::from_value(is_known ? nodes[i].passed : unknowns[M(i)] * EI0 / L0));
     }
+    const auto moved = [&](std::size_t i, const T& of_node, const T& of_unknown) {
+        const bool is_known = balance_weight[i] == T(0);
+        return quantity<length, T>::from_value(is_known ? nodes[i].settled + of_node
+                                                        : unknowns[v(i)] * L0 + of_unknown);
+    };
     for (std::size_t i = 0; i < parts.size(); ++i) {
         const T tilted = unknowns[tilt(i)] / powers[i];
         const T shear = unknowns[V(i)] / powers[i] * EI0 / (L0 * L0);
-        parts[i].place(node_moments[i], node_moments[i + 1], moved[i], moved[i + 1],
+        const bool is_last = i + 1 == parts.size();
+        const T below = below_part(i + 1);
+        parts[i].place(node_moments[i], node_moments[i + 1], moved(i, -below_part(i), T(0)),
+                       is_last ? moved(i + 1, -below, T(0)) : moved(i + 1, T(0), below),
                        quantity<plane_angle, T>::from_value(tilted), quantity<force, T>::from_value(shear));
     }
     return node_moments;

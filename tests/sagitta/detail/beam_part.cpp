@@ -137,3 +137,25 @@ TEST_CASE("couples make a shear that deflects nothing") {
     place(stiff);
     for (const double x : {4.5, 6.0, 7.0, 9.9}) CHECK(relative(deflection(p, x), deflection(stiff, x)) < 1e-12);
 }
+
+TEST_CASE("an offset right at an end lies between the part and the node, one inside bends the simple beam") {
+    auto p = part();
+    p.add(imposed_offset(0.2 * m, at(4.0 * m)));
+    p.add(imposed_offset(0.1 * m, at(10.0 * m)));
+    CHECK(p.offset_at_left_end() == 0.2 * m);
+    CHECK(p.offset_at_right_end() == 0.1 * m);
+    place(p, 0, 0, 0.3, 0.6);
+    for (const double x : {4.0, 5.0, 10.0}) {
+        CHECK(relative(p.at<response::deflection>(x * m, x < 10 ? just_right : just_left) / m, 0.3 + (x - 4) * 0.05) <
+              1e-15);
+    }
+    CHECK(relative(p.at<response::deflection>(4.0 * m, just_left) / m, 0.1) < 1e-15);
+    CHECK(relative(p.at<response::deflection>(10.0 * m, just_right) / m, 0.7) < 1e-15);
+    auto inside = part();
+    inside.add(imposed_offset(0.6 * m, at(6.0 * m)));
+    place(inside);
+    CHECK(inside.offset_at_left_end() == 0.0 * m);
+    // Both pieces stay parallel: down to the left of it, up to the right.
+    CHECK(relative(deflection(inside, 5), -0.1) < 1e-14);
+    CHECK(relative(deflection(inside, 7), 0.3) < 1e-14);
+}
