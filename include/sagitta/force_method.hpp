@@ -124,7 +124,7 @@ private:
 
     /// Fills the flexibility matrix, and adds to its diagonal what the springs give way.
     constexpr auto coefficients() {
-        auto sum = releases().template values<number, 2>();
+        auto sum = releases().template table<number>();
         if constexpr (is_structure) measure(sum);
         return sum;
     }

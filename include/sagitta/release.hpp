@@ -146,10 +146,14 @@ public:
         [&]<std::size_t... i>(std::index_sequence<i...>) { (f(i, std::get<i>(each_)), ...); }
         (std::index_sequence_for<R...>{});
     }
-    /// As many values as releases to the given power.
-    template <class Value, int power = 1>
+    /// A value for each release, and for each pair of them.
+    template <class Value>
     [[nodiscard]] static constexpr auto values() {
-        return std::array < Value, power == 1 ? size() : size() * size() > {};
+        return std::array<Value, size()>{};
+    }
+    template <class Value>
+    [[nodiscard]] static constexpr auto table() {
+        return std::array<Value, size() * size()>{};
     }
 
 private:
@@ -216,9 +220,13 @@ public:
             std::visit([&](const auto& one) { f(i, one); }, each_[i]);
         }
     }
-    template <class Value, int power = 1>
+    template <class Value>
     [[nodiscard]] auto values() const {
-        return std::vector<Value>(power == 1 ? size() : size() * size());
+        return std::vector<Value>(size());
+    }
+    template <class Value>
+    [[nodiscard]] auto table() const {
+        return std::vector<Value>(size() * size());
     }
 
 private:

@@ -38,6 +38,8 @@ BETWEEN = {
 OTHER = {
     "near": "far", "far": "near", "min": "max", "max": "min", "true": "false", "false": "true",
     "just_left": "just_right", "just_right": "just_left", "lower_bound": "upper_bound", "upper_bound": "lower_bound",
+    "from": "to", "to": "from", "front": "back", "back": "front", "first": "last", "last": "first",
+    "before": "after", "after": "before", "left_end": "right_end", "right_end": "left_end",
 }
 
 

@@ -3,8 +3,8 @@
 
     sh tests/mutation/run.sh [--headers NAME ...] [--kinds KIND ...] [--count N] [--seed S] [--jobs J]
 
-A mutant counts as caught if it does not compile, if a test fails, or if it takes far longer than the headers as they
-stand. Which mutants are tried, and in which order, depends on the seed alone, so a run can be stopped, continued and
+A mutant counts as caught if it does not compile, if a test fails, if a twin of tests/compile_fail is not refused as it
+should be, or if it takes far longer than the headers as they stand. Which mutants are tried, and in which order, depends on the seed alone, so a run can be stopped, continued and
 repeated: what is known is read from results.jsonl in the build folder. A survivor that does not stand in
 survivors.txt, with the reason why it is equivalent, fails the run.
 
@@ -22,6 +22,7 @@ import json
 import os
 import pathlib
 import random
+import re
 import resource
 import shutil
 import subprocess
@@ -64,14 +65,19 @@ def limited(seconds):
     return set_limits
 
 
-def run(command, seconds):
+def run(command, seconds, said=subprocess.DEVNULL):
     """The exit status, or None where it took too long. Seconds of the processor, so that a busy machine kills nobody."""
     try:
-        done = subprocess.run(command, stdout=subprocess.DEVNULL, stderr=subprocess.DEVNULL,
-                              preexec_fn=limited(seconds), timeout=20 * seconds + 60)
+        done = subprocess.run(command, stdout=subprocess.DEVNULL, stderr=said, preexec_fn=limited(seconds),
+                              timeout=20 * seconds + 60)
     except subprocess.TimeoutExpired:
         return None
     return None if done.returncode in (-24, -9) else done.returncode
+
+
+def announced(twin):
+    """What the compiler must say of the wrong form of a twin."""
+    return re.match(r"// expect(?: in a note| the compiler's)?: (.+)", twin.read_text()).group(1)
 
 
 class bench:
@@ -85,15 +91,30 @@ class bench:
         shutil.copytree(root / "include", self.include)
 
     def flags(self):
-        return [self.compiler, "-std=c++20", "-O0", "-w", "-I", str(self.include), "-I", str(root / "tests")]
+        return [self.compiler, "-std=c++20", "-O0", "-w", "-I", str(self.include), "-I", str(root / "tests"),
+                "-include-pch", str(self.build / "common.pch")]
+
+    def outcome_of_twins(self, folder, seconds):
+        """'fail' if a wrong form compiles, or the compiler does not say what it should."""
+        said = self.folder / "said"
+        for twin in sorted((root / "tests" / folder).glob("*.cpp")):
+            with open(said, "wb") as file:
+                status = run(self.flags() + ["-fsyntax-only", "-D", "WRONG", "-I", str(root / "tests" / "compile_fail"),
+                                             str(twin)], seconds, file)
+            if status is None:
+                return "time"
+            if status == 0 or announced(twin).replace("\\;", ";") not in said.read_text(errors="replace"):
+                return "fail"
+        return None
 
     def outcome_of(self, test, limits):
         """'compile', 'fail' or 'time' if the test notices something, else None."""
+        if test.startswith("compile_fail/"):
+            return self.outcome_of_twins(test, limits[0])
         program = self.folder / "test"
         compile_limit, run_limit = limits
-        status = run(self.flags() + ["-include-pch", str(self.build / "common.pch"), "-fuse-ld=lld",
-                                     str(root / "tests" / "sagitta" / (test + ".cpp")), str(self.build / "main.o"),
-                                     "-lfmt", "-o", str(program)], compile_limit)
+        status = run(self.flags() + ["-fuse-ld=lld", str(root / "tests" / "sagitta" / (test + ".cpp")),
+                                     str(self.build / "main.o"), "-lfmt", "-o", str(program)], compile_limit)
         if status != 0:
             return "time" if status is None else "compile"
         status = run([str(program), "--abort-after=1"], run_limit)
@@ -131,7 +152,8 @@ def measure(build, compiler, tests):
     known = json.loads(path.read_text()) if path.exists() else {}
     table = bench(build, compiler, "unchanged")
     for test in tests:
-        newest = (root / "tests" / "sagitta" / (test + ".cpp")).stat().st_mtime
+        is_twins = test.startswith("compile_fail/")
+        newest = (root / "tests" / (test if is_twins else "sagitta/" + test + ".cpp")).stat().st_mtime
         if test in known and known[test]["of"] == newest:
             continue
         spent = []
@@ -141,7 +163,7 @@ def measure(build, compiler, tests):
                 how = table.outcome_of(test, (600, 600))
                 if how:
                     sys.exit(f"{test} notices something ({how}) where nothing is changed")
-            else:
+            elif not is_twins:
                 run([str(table.folder / "test")], 600)
             after = resource.getrusage(resource.RUSAGE_CHILDREN)
             spent.append(after.ru_utime + after.ru_stime - before.ru_utime - before.ru_stime)

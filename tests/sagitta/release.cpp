@@ -43,6 +43,8 @@ TEST_CASE("a release carries its place, its prescribed movement and its spring")
 
     // A rigid spring is none.
     static_assert(translation_at(6.0 * m).on_spring(infinite * N / m).spring_flexibility().value() == 0);
+    static_assert(
+        translation_at(6.0 * m).on_spring(std::numeric_limits<double>::max() * N / m).spring_flexibility().value() > 0);
 }
 
 TEST_CASE("the dimensions of displacements, redundants and flexibilities") {

@@ -22,7 +22,7 @@ constexpr T rounding_share() {
 template <class T, class Count>
 class compatibility_equations {
     using numbers = decltype(std::declval<const Count&>().template values<T>());
-    using table = decltype(std::declval<const Count&>().template values<T, 2>());
+    using table = decltype(std::declval<const Count&>().template table<T>());
     using order = decltype(std::declval<const Count&>().template values<std::size_t>());
 
 public:
@@ -39,15 +39,19 @@ public:
     /// The first unknown that the equations do not determine, or how many there are.
     [[nodiscard]] constexpr std::size_t undetermined() const { return undetermined_; }
 
-    /// Solves, and once more for what the first solution leaves over.
+    /// The unknowns for a right-hand side. What they leave over is rounding of the sums in it.
     [[nodiscard]] constexpr numbers solve(const numbers& right) const {
-        numbers unknowns = substitute(right);
-        numbers rest = right;
-        for (std::size_t i = 0; i < n_; ++i) {
-            for (std::size_t j = 0; j < n_; ++j) rest[i] -= coefficients_[i * n_ + j] * unknowns[j];
+        numbers reached = zeros_;
+        for (std::size_t k = 0; k < n_; ++k) {
+            reached[k] = right[order_[k]];
+            for (std::size_t j = 0; j < k; ++j) reached[k] -= factor(k, j) * reached[j];
         }
-        const numbers correction = substitute(rest);
-        for (std::size_t i = 0; i < n_; ++i) unknowns[i] += correction[i];
+        numbers unknowns = zeros_;
+        for (std::size_t k = n_; k-- > 0;) {
+            for (std::size_t j = k + 1; j < n_; ++j) reached[k] -= factor(k, j) * reached[j];
+            reached[k] /= factor(k, k);
+            unknowns[order_[k]] = reached[k];
+        }
         return unknowns;
     }
 
@@ -84,21 +88,6 @@ private:
                 for (std::size_t j = k + 1; j < n_; ++j) factor(i, j) -= factor(i, k) * factor(k, j);
             }
         }
-    }
-
-    constexpr numbers substitute(const numbers& right) const {
-        numbers reached = zeros_;
-        for (std::size_t k = 0; k < n_; ++k) {
-            reached[k] = right[order_[k]];
-            for (std::size_t j = 0; j < k; ++j) reached[k] -= factor(k, j) * reached[j];
-        }
-        numbers unknowns = zeros_;
-        for (std::size_t k = n_; k-- > 0;) {
-            for (std::size_t j = k + 1; j < n_; ++j) reached[k] -= factor(k, j) * reached[j];
-            reached[k] /= factor(k, k);
-            unknowns[order_[k]] = reached[k];
-        }
-        return unknowns;
     }
 
     std::size_t n_;

@@ -21,6 +21,7 @@ constexpr void expect_release() {
 /// The root of a b, of two positive numbers, to a thousandth: with no more than arithmetic, for any number type.
 template <class T>
 constexpr T geometric_mean(T a, T b) {
+    // Bounded, since the least numbers have no thousandth to come near to.
     for (int i = 0; i < 2000 && (a > b ? a - b > b / T(1000) : b - a > a / T(1000)); ++i) {
         const T mean = (a + b) / T(2);
         b = a / mean * b;
@@ -41,7 +42,7 @@ class flexibility_matrix {
 
 public:
     constexpr explicit flexibility_matrix(const Releases& releases)
-        : releases_(releases), f_(releases.template values<T, 2>()) {}
+        : releases_(releases), f_(releases.template table<T>()) {}
 
     /// f_ij.
     template <std::size_t i, std::size_t j>
@@ -115,7 +116,7 @@ private:
     }
 
     Releases releases_;
-    decltype(std::declval<const Releases&>().template values<T, 2>()) f_;
+    decltype(std::declval<const Releases&>().template table<T>()) f_;
 };
 
 }  // namespace sagitta

@@ -3,6 +3,8 @@
 
 #include <support/scene.hpp>
 
+#include <boost/multiprecision/cpp_int.hpp>
+
 #include <doctest/doctest.h>
 
 #include <array>
@@ -18,18 +20,26 @@ namespace {
 template <std::size_t n>
 struct fixed_count {
     static constexpr std::size_t size() { return n; }
-    template <class Value, int power = 1>
+    template <class Value>
     static constexpr auto values() {
-        return std::array < Value, power == 1 ? n : n * n > {};
+        return std::array<Value, n>{};
+    }
+    template <class Value>
+    static constexpr auto table() {
+        return std::array<Value, n * n>{};
     }
 };
 
 struct listed_count {
     std::size_t n;
     std::size_t size() const { return n; }
-    template <class Value, int power = 1>
+    template <class Value>
     auto values() const {
-        return std::vector<Value>(power == 1 ? n : n * n);
+        return std::vector<Value>(n);
+    }
+    template <class Value>
+    auto table() const {
+        return std::vector<Value>(n * n);
     }
 };
 
@@ -90,6 +100,15 @@ TEST_CASE("the first unknown that depends on others is named, whatever its unit"
         const any_system independent({3}, {2, 2 * u, 0, 2 * u, 5.001 * u * u, 3 * u, 0, 3 * u, 3});
         CHECK(independent.undetermined() == 3);
     }
+    // Of rational numbers nothing is rounding: a share that is left is one, however small.
+    using exact =
+        boost::multiprecision::number<boost::multiprecision::cpp_rational_backend, boost::multiprecision::et_off>;
+    using exact_system = compatibility_equations<exact, listed_count>;
+    CHECK(exact_system({2}, {1, 2, 2, 4}).undetermined() == 1);
+    const exact little = exact(1) / exact("1000000000000000000000000000000");
+    const exact_system near({2}, {1, 1, 1, 1 + little});
+    REQUIRE(near.undetermined() == 2);
+    CHECK(near.solve({exact(2), exact(2 + little)}) == std::vector<exact>{1, 1});
     const any_system nothing({0}, {});
     CHECK(nothing.undetermined() == 0);
     CHECK(nothing.solve({}).empty());

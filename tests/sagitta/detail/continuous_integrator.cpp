@@ -1,5 +1,6 @@
 // The integrator of continuous beams against direct stiffness in exact arithmetic: no answer of the library takes part.
 #include <support/continuous_scene.hpp>
+#include <support/relative.hpp>
 
 #include <sagitta/detail/continuous_integrator.hpp>
 
@@ -148,4 +149,33 @@ TEST_CASE("random beams with parts shorter than a fiftieth of the mean span, int
         how.shortest_part = shortest;
         MESSAGE("shortest part " << shortest << ": " << report(random_beams(8104, 300, how, 1e-12)));
     }
+}
+
+TEST_CASE("a hinge that passes on the moment of Clapeyron's equation changes nothing") {
+    using namespace sagitta::units;
+    const double EI = 5e6, w = 2e3, left = 4, right = 6;
+    // The support moment of two spans under a uniform load (Clapeyron's equation of three moments).
+    const double M = -w * (left * left * left + right * right * right) / (8 * (left + right));
+    auto beam = sagitta::continuous_beam((left + right) * m, EI * N * m2)
+                    .support_at(0.0 * m)
+                    .support_at(left * m)
+                    .support_at((left + right) * m);
+    beam.hinge_at(left * m, M * N * m);
+    const integrator integrated(beam, sagitta::load_list(sagitta::uniform_load(w * N / m)));
+    const auto& before = integrated.parts().front().end();
+    const auto& after = integrated.parts().back().start();
+    CHECK(relative(before.moment, M) < 1e-13);
+    CHECK(relative(after.moment, M) < 1e-13);
+    CHECK(relative(after.turn, before.turn) < 1e-13);
+    CHECK(relative(integrated.reaction(0), w * left / 2 + M / left) < 1e-13);
+    CHECK(relative(integrated.reaction(2), w * right / 2 + M / right) < 1e-13);
+}
+
+TEST_CASE("the mean length of parts, and what they turn by under a unit moment") {
+    using namespace sagitta::units;
+    auto beam = sagitta::continuous_beam(10.0 * m, 5.0 * MN * m2).support_at(0.0 * m).support_at(10.0 * m);
+    beam.rigidity_from(4.0 * m, 10.0 * MN * m2);
+    const integrator integrated(beam, sagitta::load_list(sagitta::uniform_load(1.0 * N / m)));
+    CHECK(integrated.mean_span() == 5);
+    CHECK(relative(integrated.mean_flexibility(), (4 / 5e6 + 6 / 10e6) / 2) < 1e-15);
 }

@@ -64,4 +64,6 @@ TEST_CASE("geometric means of numbers far apart") {
             CHECK(detail::geometric_mean(a, b) == doctest::Approx(std::sqrt(a) * std::sqrt(b)).epsilon(1e-3));
         }
     }
+    const double least = std::numeric_limits<double>::denorm_min();
+    CHECK(detail::geometric_mean(least, 2 * least) <= 2 * least);  // and ends
 }

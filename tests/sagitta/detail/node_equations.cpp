@@ -22,6 +22,8 @@ TEST_CASE("a spring of any stiffness: force = k movement") {
     const auto rigid = law::of(std::numeric_limits<double>::infinity(), 1e-9);
     CHECK(rigid.movement == 1);
     CHECK(rigid.force == 0);
+    // The stiffest of all that are not.
+    CHECK(law::of(std::numeric_limits<double>::max(), 1).force > 0);
     const auto none = law::of(0, 1e9);
     CHECK(none.movement == 0);
     CHECK(none.force == 1);

@@ -32,6 +32,16 @@ TEST_CASE("a clamp holds the section, not the slope, where the beam deforms in s
     CHECK(detail::turn_of_section(line, 3.0 * m) / rad == doctest::Approx(6e3 * 9 / 2 / 5e6).epsilon(1e-13));
 }
 
+TEST_CASE("at an end it is the section inside the beam that turns, not what lies on the support") {
+    const auto pinned = continuous_beam(3.0 * m, EI).support_at(0.0 * m).support_at(3.0 * m).shear_rigidity(4.0 * MN);
+    const auto load = uniform_load(2.0 * kN / m);
+    const auto ends = point_load(6.0 * kN, at(0.0 * m)) + point_load(9.0 * kN, at(3.0 * m));
+    for (const auto& x : {0.0 * m, 3.0 * m}) {
+        CHECK(detail::turn_of_section(pinned.under(load + ends), x) / rad ==
+              doctest::Approx(detail::turn_of_section(pinned.under(load), x) / rad).epsilon(1e-13));
+    }
+}
+
 TEST_CASE("the pair of couples of a hinge sags it") {
     // Two spans of 4 m and 6 m, hinged over the support: (l1 + l2)/3 EI for a unit pair (common practice, no source).
     const auto hinged =
@@ -60,6 +70,13 @@ TEST_CASE("what a support holds does not move, what stands close to it does") {
     CHECK_FALSE(moves(arm, rotation_at(0.0 * m)));
     CHECK(moves(arm, translation_at(7.0e-6 * m)));
     CHECK(moves(arm, rotation_at(7.0e-6 * m)));
+    // As close to a support, of beams of any size.
+    for (const double L : {1e-3, 1e3}) {
+        CAPTURE(L);
+        const auto beam = simple_beam(L * m, EI);
+        CHECK(moves(beam, translation_at(1e-10 * L * m)));
+        CHECK_FALSE(moves(beam, translation_at(L * m)));
+    }
     // The same held by the nodes of a continuous beam, at a place that rounding has moved.
     const double x = 0.1 * 3;
     const auto nodes = continuous_beam(1.0 * m, EI).support_at(x * m).clamp(end::left).support_at(1.0 * m);
