@@ -480,3 +480,20 @@ TEST_CASE("an offset at a node puts the beam beside what holds it, and costs no 
     CHECK(higher.deflection(L * m, just_right) == 0.0 * m);
     CHECK(relative(higher.deflection(2.5 * m) / m, -0.5) < 1e-15);
 }
+
+TEST_CASE("a kink at a node lies between the node and the part right of it") {
+    const double EI = 1e6, kink = 2e-3, left = 4, right = 6;
+    const auto three =
+        continuous_beam((left + right) * m, EI * N * m2).support_at(0.0 * m).support_at(left * m).support_at(10.0 * m);
+    const auto kinked = three.under(imposed_kink(kink * rad, at(left * m)));
+    // The moment that closes a kink over a support: (l1 + l2) M/3 EI turns as much (common practice, no source).
+    CHECK(relative(kinked.moment(left * m) / (N * m), -3 * EI * kink / (left + right)) < 1e-13);
+    CHECK(relative((kinked.slope(left * m, just_left) - kinked.slope(left * m, just_right)) / rad, kink) < 1e-13);
+    // At a clamped end it is as if the clamp were turned.
+    const auto propped = continuous_beam(left * m, EI * N * m2).clamp(end::left).support_at(left * m);
+    const auto at_clamp = propped.under(imposed_kink(kink * rad, at(0.0 * m)));
+    const auto turned = propped.under(support_rotation(end::left, -kink * rad));
+    CHECK(relative(at_clamp.end_moment(end::left) / (N * m), turned.end_moment(end::left) / (N * m)) < 1e-13);
+    CHECK(relative(std::abs(at_clamp.end_moment(end::left) / (N * m)), 3 * EI * kink / left) < 1e-13);
+    CHECK(relative(at_clamp.deflection(1.0 * m) / m, turned.deflection(1.0 * m) / m) < 1e-13);
+}

@@ -31,7 +31,11 @@ int beams_wanted() { return asked_for("SAGITTA_BEAMS", 20000); }
 /// Every number of a scene as N holds it, so that library and reference are given the same beam.
 template <class N>
 scene::continuous as_held_by(scene::continuous c) {
-    const auto hold = [](double& x) { x = static_cast<double>(static_cast<N>(x)); };
+    const auto hold = [](double& x) {
+        // g++ 12 at -O2 takes two neighbouring conversions to float and back for none.
+        const volatile N held = static_cast<N>(x);
+        x = static_cast<double>(held);
+    };
     for (double* each : {&c.L, &c.EI, &c.kGA, &c.turning[0], &c.turning[1]}) hold(*each);
     for (auto& s : c.supports) {
         for (double* each : {&s.at, &s.stiffness, &s.settled}) hold(*each);

@@ -115,6 +115,13 @@ TEST_CASE("barely held is held") {
     CHECK(std::abs(line.reaction(end::right) / kN - 0.5) < 1e-6);
 }
 
+TEST_CASE("what is held by less than rounding of the beam's own stiffness is told apart from a mechanism") {
+    const auto on_softest = [](double at) { return bare().support_at(0.0 * m).spring_at(at * m, 1e-16 * kN / m); };
+    // At the last node, and at one before it.
+    CHECK_REFUSED(on_softest(10).under(load), "place = 10 m", "cannot be told from a mechanism");
+    CHECK_REFUSED(on_softest(4).under(load), "place = ", "cannot be told from a mechanism");
+}
+
 TEST_CASE("the beam itself") {
     CHECK_REFUSED(continuous_beam(0.0 * m, EI), "span = 0 m", "greater than 0 m");
     CHECK_REFUSED(continuous_beam(-2.0 * m, EI), "span = -2 m", "greater than 0 m");

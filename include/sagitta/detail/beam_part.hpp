@@ -9,6 +9,7 @@
 #include <sagitta/load_list.hpp>
 
 #include <algorithm>
+#include <optional>
 #include <vector>
 
 namespace sagitta::detail {
@@ -113,8 +114,8 @@ public:
     void place(const quantity<moment, T>& M_left, const quantity<moment, T>& M_right, const quantity<length, T>& v_left,
                const quantity<length, T>& v_right, const quantity<plane_angle, T>& tilt,
                const quantity<force, T>& shear) {
-        loaded_.emplace_back(beam_, loads_);
-        bent_.emplace_back(beam_, couple(M_left, {quantity<length, T>{}}) + couple(-M_right, {span()}));
+        loaded_.emplace(beam_, loads_);
+        bent_.emplace(beam_, couple(M_left, {quantity<length, T>{}}) + couple(-M_right, {span()}));
         M_left_ = M_left;
         v_left_ = v_left;
         v_right_ = v_right;
@@ -127,8 +128,8 @@ public:
     template <response R>
     [[nodiscard]] response_quantity<R, T> at(const quantity<length, T>& x, side which) const {
         const auto s = std::min(x - from_, span());
-        const auto& loaded = loaded_.front();
-        const auto& bent = bent_.front();
+        const auto& loaded = *loaded_;
+        const auto& bent = *bent_;
         if constexpr (R == response::deflection) {
             if (which == side::just_left && !(s > quantity<length, T>{})) return v_left_ - offset_at_left_end_;
             if (which == side::just_right && !(s < span())) return v_right_ + offset_at_right_end_;
@@ -144,16 +145,16 @@ public:
         }
     }
     [[nodiscard]] quantity<line_load, T> load(const quantity<length, T>& x, side which) const {
-        return loaded_.front().load(std::min(x - from_, span()), which);
+        return loaded_->load(std::min(x - from_, span()), which);
     }
     [[nodiscard]] quantity<curvature, T> imposed_curvature(const quantity<length, T>& x, side which) const {
-        return loaded_.front().imposed_curvature(std::min(x - from_, span()), which);
+        return loaded_->imposed_curvature(std::min(x - from_, span()), which);
     }
     /// Shear at the ends of the part, loads that stand right there included.
     [[nodiscard]] quantity<force, T> outer_shear_left() const { return shear_ + force_at_left_end_; }
     [[nodiscard]] quantity<force, T> outer_shear_right() const { return shear_ - force_of_loads_; }
 
-    [[nodiscard]] auto joints() const { return loaded_.front().joints(); }
+    [[nodiscard]] auto joints() const { return loaded_->joints(); }
 
 private:
     struct couple_at {
@@ -182,14 +183,14 @@ private:
     /// By how much the shear at s exceeds that at the left end. What couples make of the simple beam's own shear
     /// cancels exactly: it may be a million times what is left of it in the whole beam.
     quantity<force, T> shear_gained(const quantity<length, T>& s, side which) const {
-        return loaded_.front().shear(s, inside(s, which)) - loaded_.front().shear(quantity<length, T>{});
+        return loaded_->shear(s, inside(s, which)) - loaded_->shear(quantity<length, T>{});
     }
     quantity<force, T> shear_drop() const { return moment_of_forces_ / span(); }
     quantity<force, T> mean_shear() const { return shear_ - shear_drop(); }
 
     /// The integral of (shear - mean shear)/kGA up to s. Zero at both ends of the part.
     quantity<length, T> shear_deflection(const quantity<length, T>& s) const {
-        const auto M = loaded_.front().moment(s, inside(s, side::just_right)) + bent_.front().moment(s);
+        const auto M = loaded_->moment(s, inside(s, side::just_right)) + bent_->moment(s);
         const auto risen = M - M_left_ - sum_of_couples(s, inside(s, side::just_right));
         return (risen - mean_shear() * s) * shear_flexibility_;
     }
@@ -202,9 +203,9 @@ private:
     quantity<force, T> force_at_left_end_{}, force_of_loads_{};
     quantity<moment, T> moment_of_forces_{};
     quantity<length, T> offset_at_left_end_{}, offset_at_right_end_{};
-    // One of each, once placed: under the loads, and under the end moments.
-    std::vector<elastic_line<simple, load_list<T>>> loaded_;
-    std::vector<elastic_line<simple, load_types::load_sum<couple, couple>>> bent_;
+    // Once placed: under the loads, and under the end moments.
+    std::optional<elastic_line<simple, load_list<T>>> loaded_;
+    std::optional<elastic_line<simple, load_types::load_sum<couple, couple>>> bent_;
     quantity<moment, T> M_left_{};
     quantity<length, T> v_left_{}, v_right_{};
     quantity<plane_angle, T> tilt_{};

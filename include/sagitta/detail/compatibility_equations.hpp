@@ -4,6 +4,7 @@
 
 #include <cstddef>
 #include <limits>
+#include <numeric>
 #include <utility>
 
 namespace sagitta::detail {
@@ -72,7 +73,7 @@ private:
 
     constexpr void eliminate() {
         undetermined_ = n_;
-        for (std::size_t k = 0; k < n_; ++k) order_[k] = k;
+        std::iota(order_.begin(), order_.end(), std::size_t{0});
         for (std::size_t k = 0; k < n_; ++k) {
             std::size_t pivot = k;
             for (std::size_t i = k + 1; i < n_; ++i) {
