@@ -53,6 +53,9 @@ struct differences {
         }
         for (int i = 0; i <= 20; ++i)
             size = std::max(size, std::abs(eta.ordinate(std::min(L * i / 20, L) * m).value()));
+        // Loads left and right of the section: a part that hangs on a hinge may have ordinates there alone.
+        for (const side which : {just_left, just_right})
+            size = std::max(size, std::abs(eta.deflected().deflection(eta.section(), which).value()));
         worst = std::max(worst, gap / size);
     }
 };
