@@ -368,3 +368,22 @@ TEST_CASE("a line knows its beam and its loads") {
     static_assert(line.supported().EI() == 1.0e4 * kN * m2);
     static_assert(line.loads().size() == 7.0 * kN);
 }
+
+TEST_CASE("supports stay where they are, to the bit, whatever stands right at them") {
+    for (const double L : {1.0, 3.3, 7.1, 9.7, 12.6}) {
+        CAPTURE(L);
+        const auto simple = simple_beam(L * m, 1.0 * MN * m2);
+        const auto fixed = fixed_beam(L * m, 1.0 * MN * m2);
+        for (const double a : {0.0, L / 3, L}) {
+            CAPTURE(a);
+            const auto couple = applied_couple(7.0 * kN * m, at(a * m));
+            const auto kink = imposed_kink(3.0 * mrad, at(a * m));
+            for (const double x : {0.0, L}) {
+                CHECK(simple.under(couple).deflection(x * m) == 0.0 * m);
+                CHECK(simple.under(kink).deflection(x * m) == 0.0 * m);
+                CHECK(fixed.under(couple).deflection(x * m) == 0.0 * m);
+                CHECK(fixed.under(couple).slope(x * m) == 0.0 * rad);
+            }
+        }
+    }
+}
