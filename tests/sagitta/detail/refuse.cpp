@@ -1,6 +1,8 @@
 // Sentences of refusal, and what counts as finite.
 #include <sagitta/detail/refuse.hpp>
 
+#include <boost/numeric/interval.hpp>
+
 #include <doctest/doctest.h>
 
 #include <limits>
@@ -18,6 +20,12 @@ TEST_CASE("a refusal names argument, value with unit, bound and limit") {
     CHECK_THROWS_WITH_AS(detail::refuse("size", 2.0 * kN / m, "is wrong"), "size = 2000 N/m is wrong", invalid_input);
     CHECK_THROWS_WITH_AS(detail::refuse("size", 2.0 * mrad, "is wrong"), "size = 0.002 rad is wrong", invalid_input);
     CHECK_THROWS_WITH_AS(detail::refuse("factor", 2.5, "is wrong"), "factor = 2.5 is wrong", invalid_input);
+}
+
+TEST_CASE("an interval is shown by its middle") {
+    const boost::numeric::interval<double> between(1.0, 4.0);
+    static_assert(!detail::is_ordered<boost::numeric::interval<double>>);
+    CHECK(detail::as_double(between) == 2.5);
 }
 
 TEST_CASE("finite numbers") {

@@ -38,6 +38,9 @@ TEST_CASE("pi has the digits of its number type") {
     CHECK(pi<double>() == static_cast<double>(digits));
     CHECK(pi<long double>() == static_cast<long double>(digits));
     CHECK(abs(pi<precise>() - digits) <= std::numeric_limits<precise>::epsilon() * 4);
+    // The sum of its parts is pi to half a unit in the last place of the last of them.
+    using wider = boost::multiprecision::cpp_bin_float_100;
+    CHECK(abs(pi<wider>() - boost::math::constants::pi<wider>()) <= ldexp(wider(1), -216));
 }
 
 TEST_CASE("integers promote, everything else stays") {
