@@ -6,6 +6,7 @@
 #include <doctest/doctest.h>
 
 #include <algorithm>
+#include <array>
 #include <cmath>
 #include <cstddef>
 #include <vector>
@@ -128,4 +129,25 @@ TEST_CASE("one equation, and a long chain") {
         worst = std::max(worst, std::abs(x[i] - t * (1 - t)));
     }
     CHECK(worst < 1e-11);
+}
+
+TEST_CASE("a system that elimination alone solves to nine digits is solved to rounding") {
+    // Fourth differences of 300 whole numbers: everything given is exact, the condition number is some 1e9.
+    constexpr std::size_t n = 300;
+    const std::array<double, 3> coefficient{6, -4, 1};
+    scene::chance random(77);
+    std::vector<double> whole(n);
+    for (double& each : whole) each = random.whole(-1000, 1000);
+    banded_system<double, 2> system(n);
+    for (std::size_t i = 0; i < n; ++i) {
+        for (std::size_t j = 0; j < n; ++j) {
+            const std::size_t apart = i < j ? j - i : i - j;
+            if (apart > 2) continue;
+            system(i, j) = coefficient[apart];
+            system.right_hand_side(i) += coefficient[apart] * whole[j];
+        }
+    }
+    std::vector<double> x;
+    REQUIRE(system.solve(x) == n);
+    for (std::size_t i = 0; i < n; ++i) CHECK(std::abs(x[i] - whole[i]) <= 1e-12);
 }
