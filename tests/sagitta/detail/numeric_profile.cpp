@@ -122,7 +122,10 @@ TEST_CASE("zeros of a tapered beam: each change of sign that is sampled is found
 TEST_CASE("a constant stiffness, given as a function, has the extremes and zeros of the closed forms") {
     scene::with_each_beam(L, EI, [&](const std::string& name, const auto& b, auto, auto) {
         int number = 0;
-        for (const auto& loads : several_loads()) {
+        auto all = several_loads();
+        all.push_back(point_load(20.0 * kN, at(2.0 * m)) + imposed_kink(-6.0 * mrad, at(2.5 * m)) +
+                      imposed_offset(4.0 * mm, at(4.5 * m)) + imposed_kink(3.0 * mrad, at(4.5 * m)));
+        for (const auto& loads : all) {
             CAPTURE(name);
             CAPTURE(number++);
             const auto exact = b.under(loads);
