@@ -481,6 +481,16 @@ TEST_CASE("an offset at a node puts the beam beside what holds it, and costs no 
     CHECK(relative(higher.deflection(2.5 * m) / m, -0.5) < 1e-15);
 }
 
+TEST_CASE("where it is supported: at its supports and springs, not at its other nodes or between") {
+    const auto beam = continuous_beam(10.0 * m, 1.0 * MN * m2)
+                          .clamp(end::left)
+                          .hinge_at(3.0 * m)
+                          .spring_at(6.0 * m, 2.0 * kN / mm)
+                          .guide(end::right);
+    for (const double x : {0.0, 6.0}) CHECK(beam.is_supported_at(x * m));
+    for (const double x : {1.0, 3.0, 5.999, 10.0}) CHECK_FALSE(beam.is_supported_at(x * m));
+}
+
 TEST_CASE("a kink at a node lies between the node and the part right of it") {
     const double EI = 1e6, kink = 2e-3, left = 4, right = 6;
     const auto three =

@@ -247,9 +247,17 @@ TEST_CASE("an answer that is wrong in one span only is noticed, one that is not 
             CHECK_FALSE(cross_check(misprinted_line(line, what, nan, from, to)).greatest() <= 1);
         }
     }
-    for (const wrong what : {wrong::reaction, wrong::end_moment}) {
-        const double nan = std::numeric_limits<double>::quiet_NaN();
-        CHECK_FALSE(cross_check(misprinted_line(line, what, nan)).greatest() <= 1);
+    // Of every support and every end.
+    const double nan = std::numeric_limits<double>::quiet_NaN();
+    const auto three =
+        continuous_beam(10.0 * m, 1.0 * MN * m2).support_at(0.0 * m).support_at(4.0 * m).clamp(end::right);
+    const auto of_three = three.under(uniform_load(2.0 * kN / m));
+    for (const double x : {0.0, 4.0, 10.0}) {
+        CAPTURE(x);
+        CHECK_FALSE(cross_check(misprinted_line(of_three, wrong::reaction, nan, x, x)).greatest() <= 1);
+    }
+    for (const double x : {0.0, 10.0}) {
+        CHECK_FALSE(cross_check(misprinted_line(of_three, wrong::end_moment, nan, x, x)).greatest() <= 1);
     }
 }
 

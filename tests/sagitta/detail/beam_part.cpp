@@ -67,10 +67,17 @@ TEST_CASE("forces as the node equations see them") {
     CHECK(relative(p.outer_shear_left() / kN, V + 3) < 1e-14);
     CHECK(relative(p.outer_shear_right() / kN, V - 27.5) < 1e-14);
     CHECK(relative(shear_of(p, 10, just_left) / 1e3, V - 22.5) < 1e-14);
+    // Beyond its ends a part answers from inside.
+    CHECK(shear_of(p, 10, just_right) == shear_of(p, 10, just_left));
+    CHECK(shear_of(p, 4, just_left) == shear_of(p, 4, just_right));
 }
 
 TEST_CASE("line loads are cut to the part") {
     auto p = part();
+    // These only touch it.
+    p.add(partial_uniform_load(5.0 * kN / m, between(1.0 * m, 4.0 * m)));
+    p.add(linear_load(5.0 * kN / m, 2.0 * kN / m, between(10.0 * m, 12.0 * m)));
+    p.add(imposed_curvature(0.01 / m, between(2.0 * m, 4.0 * m)));
     // 1 kN/m at 2 m to 11 kN/m at 12 m: 3 kN/m and 9 kN/m at the ends of the part.
     p.add(linear_load(1.0 * kN / m, 11.0 * kN / m, between(2.0 * m, 12.0 * m)));
     place(p);
