@@ -2,7 +2,8 @@
 // errors in units of last place of the greatest value of each quantity, held to declared budgets.
 //
 // The normal run draws 20,000 beams. SAGITTA_BEAMS=2000000 in the environment asks for as many as one likes, and
-// SAGITTA_FIRST_BEAM=12345 begins there: every beam is drawn from the seed and its own number i, which a failure prints.
+// SAGITTA_FIRST_BEAM=12345 begins there: every beam is drawn from the seed and its own number i, which a failure
+// prints.
 #include <support/continuous_comparison.hpp>
 
 #include <boost/multiprecision/cpp_bin_float.hpp>

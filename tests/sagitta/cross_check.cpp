@@ -111,6 +111,20 @@ TEST_CASE("they agree on superpositions of random loads") {
     report(worst);
 }
 
+TEST_CASE("they agree on what stands right at an end, on both sides of it") {
+    const double L = 7.2;
+    scene::with_each_beam_and_guided(L, 1.75e7, [&](const std::string& name, const auto& b, auto, auto) {
+        CAPTURE(name);
+        for (const double x : {0.0, L}) {
+            CAPTURE(x);
+            const auto here = at(x * m);
+            check(cross_check(b.under(imposed_kink(2.0 * mrad, here) + imposed_offset(3.0 * mm, here) +
+                                      applied_couple(4.0 * kN * m, here) + point_load(5.0 * kN, here) +
+                                      uniform_load(1.0 * kN / m))));
+        }
+    });
+}
+
 TEST_CASE("a composition known when compiling is checked like a list") {
     const auto loads = point_load(22.0 * kN, at(3.0 * m)) + uniform_load(4.5 * kN / m) +
                        settlement(end::right, 5.0 * mm) + linear_load(0.0 * kN / m, 6.0 * kN / m);

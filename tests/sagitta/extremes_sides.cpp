@@ -202,3 +202,12 @@ TEST_CASE("of equal sizes the first is kept; a turning point takes it from a joi
     CHECK(kept(-5, true, -3, false) == 2);
     CHECK(kept(0, false, 0, true) == 1);
 }
+
+TEST_CASE("a turning point right at the end of the beam is seen from inside") {
+    // The moment of a cantilever turns where its shear vanishes, at the free end; the couple there is a hogging one.
+    const auto line = cantilever(4.0 * m, 1.0 * MN * m2)
+                          .under(uniform_load(2.0 * kN / m) + applied_couple(3.0 * kN * m, at(4.0 * m)));
+    const auto moment = extremes_of_moment(line);
+    CHECK(relative(moment.greatest.value / (kN * m), -3) < 1e-13);
+    CHECK(relative(moment.least.value / (kN * m), -19) < 1e-13);
+}

@@ -257,3 +257,20 @@ TEST_CASE("what is refused, by name") {
     CHECK(refusal([&] { (void)eta.effect_of(imposed_kink(1.0 * mrad, at(1.0 * m))); }).find("is no force") !=
           std::string::npos);
 }
+
+TEST_CASE("a couple at a hinge turns the part right of it") {
+    const auto b = continuous_beam(12.0 * m, 1.0e6 * N * m2)
+                       .clamp(end::left)
+                       .hinge_at(3.0 * m)
+                       .support_at(5.0 * m)
+                       .hinge_at(5.0 * m)
+                       .support_at(12.0 * m);
+    for (const double x : {3.0, 5.0}) {
+        CAPTURE(x);
+        const auto couple = applied_couple(7.0e3 * N * m, at(x * m));
+        const auto line = b.under(couple);
+        CHECK(std::abs((influence_of_moment(b, 4.0 * m).effect_of(couple) - line.moment(4.0 * m)) / (N * m)) < 1e-9);
+        CHECK(std::abs((influence_of_shear(b, 8.0 * m).effect_of(couple) - line.shear(8.0 * m)) / N) < 1e-9);
+        CHECK(std::abs((influence_of_reaction(b, 5.0 * m).effect_of(couple) - line.reaction_at(5.0 * m)) / N) < 1e-9);
+    }
+}

@@ -110,3 +110,14 @@ TEST_CASE("a shear rigidity must be positive") {
                          "shear rigidity kGA = 0 N must be greater than 0 N", invalid_input);
     CHECK_THROWS_AS((void)simple_beam(L, EI).with_shear_rigidity(std::nan("") * N), invalid_input);
 }
+
+TEST_CASE("at an end the response is that inside the beam, not beyond what stands there") {
+    const auto beam = simple_beam(L, EI).with_shear_rigidity(kGA);
+    const auto line = beam.under(uniform_load(4.5 * kN / m) + point_load(22.0 * kN, at(0.0 * m)) +
+                                 point_load(22.0 * kN, at(L)) + applied_couple(8.0 * kN * m, at(L)));
+    CHECK(line.slope(L) == line.slope(L, just_left));
+    CHECK(line.slope(0.0 * m) == line.slope(0.0 * m, just_right));
+    CHECK(line.shear(L) == line.shear(L, just_left));
+    CHECK(line.moment(L) == line.moment(L, just_left));
+    CHECK(abs(line.shear(L) - line.shear(L, just_right)) > 20.0 * kN);
+}
