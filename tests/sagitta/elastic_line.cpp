@@ -370,15 +370,15 @@ TEST_CASE("a line knows its beam and its loads") {
 }
 
 TEST_CASE("supports stay where they are, to the bit, whatever stands right at them") {
-    for (const double L : {1.0, 3.3, 7.1, 9.7, 12.6}) {
-        CAPTURE(L);
-        const auto simple = simple_beam(L * m, 1.0 * MN * m2);
-        const auto fixed = fixed_beam(L * m, 1.0 * MN * m2);
-        for (const double a : {0.0, L / 3, L}) {
+    for (const double span : {1.0, 3.3, 7.1, 9.7, 12.6}) {
+        CAPTURE(span);
+        const auto simple = simple_beam(span * m, 1.0 * MN * m2);
+        const auto fixed = fixed_beam(span * m, 1.0 * MN * m2);
+        for (const double a : {0.0, span / 3, span}) {
             CAPTURE(a);
             const auto couple = applied_couple(7.0 * kN * m, at(a * m));
             const auto kink = imposed_kink(3.0 * mrad, at(a * m));
-            for (const double x : {0.0, L}) {
+            for (const double x : {0.0, span}) {
                 CHECK(simple.under(couple).deflection(x * m) == 0.0 * m);
                 CHECK(simple.under(kink).deflection(x * m) == 0.0 * m);
                 CHECK(fixed.under(couple).deflection(x * m) == 0.0 * m);

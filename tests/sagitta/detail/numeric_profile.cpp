@@ -26,13 +26,15 @@ auto rigidity(double value) { return quantity<dimension::flexural_rigidity>::fro
 
 /// Loads that bend a beam to both sides, with and without an imposed curvature.
 std::vector<load_list<>> several_loads() {
-    std::vector<load_list<>> all(4);
+    std::vector<load_list<>> all(5);
     all[0] += point_load(20.0 * kN, at(2.0 * m)) - partial_uniform_load(9.0 * kN / m, between(3.0 * m, 6.0 * m));
     all[1] += applied_couple(30.0 * kN * m, at(4.0 * m)) + linear_load(0.0 * kN / m, 5.0 * kN / m);
     all[2] += partial_uniform_load(12.0 * kN / m, between(0.5 * m, 2.5 * m)) +
               imposed_curvature(-0.004 / m, between(1.0 * m, 5.0 * m));
     all[3] += imposed_curvature(0.003 / m) - point_load(15.0 * kN, at(3.5 * m)) +
               imposed_curvature(-0.005 / m, between(2.0 * m, 4.0 * m));
+    // The slope of a simple beam is greatest where the curvature vanishes, a little before the couple turns it back.
+    all[4] += imposed_curvature(-0.001 / m) - applied_couple(20.0 * kN * m, at(5.4 * m));
     return all;
 }
 
