@@ -151,3 +151,16 @@ TEST_CASE("a system that elimination alone solves to nine digits is solved to ro
     REQUIRE(system.solve(x) == n);
     for (std::size_t i = 0; i < n; ++i) CHECK(std::abs(x[i] - whole[i]) <= 1e-12);
 }
+
+TEST_CASE("a row that is taken off as it is, and one that needs none") {
+    // x + y = 3, x - y = 1; and below a zero: z = 7.
+    banded_system<double, 1> system(3);
+    system(0, 0) = system(0, 1) = system(1, 0) = system(2, 2) = 1;
+    system(1, 1) = -1;
+    system.right_hand_side(0) = 3;
+    system.right_hand_side(1) = 1;
+    system.right_hand_side(2) = 7;
+    std::vector<double> x;
+    REQUIRE(system.solve(x) == 3);
+    CHECK(x == std::vector<double>{2, 1, 7});
+}
