@@ -370,7 +370,8 @@ TEST_CASE("a line knows its beam and its loads") {
 }
 
 TEST_CASE("supports stay where they are, to the bit, whatever stands right at them") {
-    for (const double span : {1.0, 3.3, 7.1, 9.7, 12.6}) {
+    for (int i = 1; i <= 40; ++i) {
+        const double span = 0.37 * i;
         CAPTURE(span);
         const auto simple = simple_beam(span * m, 1.0 * MN * m2);
         const auto fixed = fixed_beam(span * m, 1.0 * MN * m2);

@@ -48,6 +48,10 @@ void same(const Closed& closed, continuous_beam<double> described, const load_li
     CHECK(gap(line, solved, [](const auto& l, auto x) { return l.slope(x, just_left).value(); }) < 1e-13);
     CHECK(gap(line, solved, [](const auto& l, auto x) { return l.moment(x, just_left).value(); }) < 1e-13);
     CHECK(gap(line, solved, [](const auto& l, auto x) { return l.shear(x, just_right).value(); }) < 1e-13);
+    // Where couples stand, too.
+    for (const auto& x : {5.2 * m, 0.0 * m}) {
+        CHECK(abs(line.deflection(x) - solved.deflection(x)) < 1e-13 * greatest_deflection(solved).value);
+    }
     CHECK(std::abs(line.reaction(end::left) / N - solved.reaction(end::left) / N) < 1e-13 * 200e3);
     CHECK(std::abs(line.end_moment(end::right) / (N * m) - solved.end_moment(end::right) / (N * m)) < 1e-13 * 400e3);
 }
