@@ -60,6 +60,10 @@ TEST_CASE("at the ends the inner side answers for the beam, the outer one for th
     CHECK(right.slope(L, just_right) == 0.0 * rad);
     CHECK(relative(right.slope(L) / rad, 0.002) < 1e-13);
     CHECK(relative(right.deflection(L) / m, -0.003) < 1e-13);
+    // Beside other loads, and in a list.
+    const auto mixed = point_load(5.0 * kN, at(2.0 * m)) + imposed_offset(3.0 * mm, at(L));
+    CHECK(relative(b.under(mixed).deflection(L) / m, -0.003) < 1e-13);
+    CHECK(relative(b.under(load_list(mixed)).deflection(L) / m, -0.003) < 1e-13);
 }
 
 TEST_CASE("a kink at a clamped end is a rotation of its support the other way") {
