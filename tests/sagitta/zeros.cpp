@@ -195,3 +195,15 @@ TEST_CASE("zeros of a continuous beam: every support") {
     CHECK(stands_at(zeros[2], 9, true));
     CHECK(points_of_contraflexure(line).size() == 2);
 }
+
+TEST_CASE("a deflection that touches zero between the supports, without changing its sign") {
+    // 5 w L^4/384 of the load are C L^2/8 of the couples (common practice): 80 kN m to 48 kN/m over 4 m.
+    const auto line = simple_beam(4.0 * m, 1.0 * MN * m2)
+                          .under(uniform_load(48.0 * kN / m) - applied_couple(80.0 * kN * m, at(0.0 * m)) +
+                                 applied_couple(80.0 * kN * m, at(4.0 * m)));
+    const auto zeros = zeros_of_deflection(line);
+    REQUIRE(zeros.size() == 3);
+    CHECK(std::abs(zeros[1].from / m - 2) < 1e-7);
+    CHECK(zeros[1].to - zeros[1].from < 1e-7 * m);
+    CHECK_FALSE(zeros[1].changes_sign);
+}

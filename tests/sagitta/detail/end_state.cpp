@@ -36,6 +36,9 @@ TEST_CASE("a clamped end has a moment and a shear") {
 TEST_CASE("a pinned end has a slope and a shear") {
     check(end_state<held::pinned, double>{48.0 * N, 0.25 * rad}, 0, 0.25, 0, 48);
 }
+TEST_CASE("a guided end has a deflection and a moment") {
+    check(end_state<held::guided, double>{2.0 * m, -80.0 * N * m}, 2, 0, -80, 0);
+}
 TEST_CASE("a free end has a deflection and a slope") {
     check(end_state<held::free, double>{2.0 * m, 0.25 * rad}, 2, 0.25, 0, 0);
 }
