@@ -4,9 +4,9 @@
     sh tests/mutation/run.sh [--headers NAME ...] [--kinds KIND ...] [--count N] [--seed S] [--jobs J]
 
 A mutant counts as caught if it does not compile, if a test fails, if a twin of tests/compile_fail is not refused as it
-should be, or if it takes far longer than the headers as they stand. Which mutants are tried, and in which order, depends on the seed alone, so a run can be stopped, continued and
-repeated: what is known is read from results.jsonl in the build folder. A survivor that does not stand in
-survivors.txt, with the reason why it is equivalent, fails the run.
+should be, or if it takes far longer than the headers as they stand. Which mutants are tried, and in which order,
+depends on the seed alone, so a run can be stopped, continued and repeated: what is known is read from results.jsonl in
+the build folder. A survivor that does not stand in survivors.txt, with the reason why it is equivalent, fails the run.
 
     --list       prints what would be tried
     --again      tries the known survivors once more
